@@ -1,0 +1,29 @@
+/*
+ * options.h - the options text: "barometer 0.98 bar; work by gas; flow; datum 0 degC; agree 0.5 %; hard errors".
+ */
+#ifndef SHEET_OPTIONS_H
+#define SHEET_OPTIONS_H
+
+#include <gasleaf/path.h>
+#include <gasleaf/state.h>
+#include <gasleaf/unit.h>
+
+#include "sheet/cell.h"
+#include "sheet/sentence.h"
+
+struct gas_options {
+    double barometer;                 /* Pa */
+    enum gas_system system;           /* GAS_CLOSED, or GAS_FLOW after `flow` */
+    bool work_by_gas;                 /* W is shown positive out of the gas */
+    bool hard_errors;                 /* #N/A in place of a sentence */
+    struct gas_datum datum;           /* h = s = 0 */
+    double agree;                     /* relative disagreement allowed among over-determined givens */
+    struct gas_references references; /* what Nm3, Sm3, scf mean */
+};
+
+extern const struct gas_options gas_options_default;
+
+/* gas_options_read - omitted gives the defaults; a word that is not known is refused with the known ones. */
+bool gas_options_read(const struct gas_block *argument, struct gas_options *options, struct gas_refusal *refusal);
+
+#endif

@@ -1,0 +1,53 @@
+/*
+ * table.h - the `given` and `wanted` arguments, whatever their form, brought to headings and rows of figures.
+ *
+ * given:   a text "7 bar(g); 35 degC; 12 m3"
+ *          a block heading | value, or label | value | unit (one case)
+ *          a table of numbers with `headings` beside it: one case per row, or per column when the headings stand in a
+ *          column; a blank cell is "not given in this case"
+ * wanted:  a text "m, kg" or "P2, bar(g); V2, m3", or a range of headings
+ */
+#ifndef SHEET_TABLE_H
+#define SHEET_TABLE_H
+
+#include <stdint.h>
+
+#include <gasleaf/heading.h>
+
+#include "sheet/cell.h"
+#include "sheet/options.h"
+#include "sheet/sentence.h"
+
+enum { GAS_COLUMNS = 32 };
+
+struct gas_table {
+    size_t columns;
+    struct gas_heading heading[GAS_COLUMNS];
+    size_t rows;                   /* cases, at least 1 */
+    bool across;                   /* the cases stand side by side: so do the answers */
+    bool one_case;                 /* text or block: a single case whose figures are below */
+    double figure[GAS_COLUMNS];    /* of a single case, in the units of the headings; NAN: blank */
+    const struct gas_block *block; /* of a table */
+};
+
+/* Figures of one case in the units of the headings; bit i of `given` tells whether column i is given. */
+struct gas_row {
+    uint32_t given;
+    double figure[GAS_COLUMNS];
+};
+
+bool gas_table_read(const struct gas_block *given, const struct gas_block *headings, const struct gas_options *options,
+                    struct gas_table *table, struct gas_refusal *refusal);
+
+/* gas_table_row - the figures of one case; a text that is no number, or a sentence, refuses this case only. */
+bool gas_table_row(const struct gas_table *table, size_t row, struct gas_row *figures, struct gas_refusal *refusal);
+
+struct gas_wanted {
+    size_t columns; /* 0: nothing wanted in particular */
+    struct gas_heading heading[GAS_COLUMNS];
+};
+
+bool gas_wanted_read(const struct gas_block *argument, const struct gas_options *options, struct gas_wanted *wanted,
+                     struct gas_refusal *refusal);
+
+#endif
