@@ -1,28 +1,49 @@
 # Gasleaf. `make help` prints the targets.
-VERSION  := 0.1.0
-BUILD    ?= build
-CC       ?= cc
-CFLAGS   ?= -O2 -g
+
+# --- settings -------------------------------------------------------------------------------------------------------
+VERSION ?= 0.1.0
+BUILD   ?= build
+CC      ?= cc
+CFLAGS  ?= -O2 -g
+# The office, its development kit, and the unit library that travels inside the extension.
+OFFICE    ?= /usr/lib/libreoffice
+SDK       ?= $(OFFICE)/sdk
+UDUNITS   ?= $(firstword $(wildcard /usr/lib/*/libudunits2.so.0 /usr/lib64/libudunits2.so.0 /usr/lib/libudunits2.so.0))
+UDUNITS_LICENCE ?= /usr/share/doc/libudunits2-0/copyright
+# Debian packages that `make deps` installs when they are missing.
+BUILD_PACKAGES := gcc libc6-dev make zip libudunits2-dev libreoffice-calc libreoffice-dev libreoffice-dev-common
+TEST_PACKAGES  := libcunit1-dev libgsl-dev units unzip
+DEMO_PACKAGES  := poppler-utils fonts-dejavu-core
+LINT_PACKAGES  := clang-format clang-tidy cppcheck valgrind
+
 WARN     := -std=c11 -Wall -Wextra -Wconversion -Wshadow -pedantic -Werror
 CPPFLAGS += -D_GNU_SOURCE -Iinclude -Isrc -DGASLEAF_VERSION='"$(VERSION)"'
 COMPILE   = $(CC) $(WARN) $(CPPFLAGS) $(CFLAGS) -fPIC -fvisibility=hidden -MMD -MP
 
+# --- what is built from what ----------------------------------------------------------------------------------------
 LIB_LAYERS   := core data units
 SHEET_LAYERS := sheet audit
 sources = $(foreach layer,$(1),$(wildcard src/$(layer)/*.c))
 objects = $(patsubst %.c,$(BUILD)/%.o,$(1))
 
-LIB      := $(BUILD)/libgasleaf.a
-SHEETLIB := $(BUILD)/libgasleaf-sheet.a
-TEST_SRC := $(wildcard tests/support/*.c) $(foreach layer,core data units sheet audit check,$(wildcard tests/$(layer)/test_*.c))
-SUITES   := $(patsubst test_%.c,suite_%,$(filter test_%,$(notdir $(TEST_SRC))))
+LIB       := $(BUILD)/libgasleaf.a
+SHEETLIB  := $(BUILD)/libgasleaf-sheet.a
+ADDIN     := $(BUILD)/oxt/gasleaf.so
+OXT       := $(BUILD)/gasleaf.oxt
+GENERATOR := $(BUILD)/generate
 
-.PHONY: all check clean help
-all: $(LIB) $(SHEETLIB)
+UNIT_LAYERS := core data units sheet audit check
+TEST_SRC    := $(wildcard tests/support/*.c) $(foreach layer,$(UNIT_LAYERS),$(wildcard tests/$(layer)/test_*.c))
+GLUE_SRC    := $(wildcard tests/support/*.c) $(wildcard tests/glue/*.c) $(filter-out %/main.c,$(call sources,generate))
+suites = $(patsubst test_%.c,suite_%,$(filter test_%,$(notdir $(1))))
+
+.PHONY: all check test demo deps generate install lint valgrind clean help glue tools sdk
+all: $(OXT) ## build the extension, build/gasleaf.oxt
 
 help: ## print the targets
-	@grep -hE '^[a-z-]+:.*##' $(MAKEFILE_LIST) | sed 's/:.*##/\t/'
+	@awk -F ':.*## ' '/^[a-z-]+:.*## / { printf "make %-10s %s\n", $$1, $$2 }' $(MAKEFILE_LIST)
 
+# --- compiling ------------------------------------------------------------------------------------------------------
 $(BUILD)/%.o: %.c
 	@mkdir -p $(@D)
 	$(COMPILE) -c $< -o $@
@@ -33,24 +54,107 @@ $(LIB): $(call objects,$(call sources,$(LIB_LAYERS)))
 $(SHEETLIB): $(call objects,$(call sources,$(SHEET_LAYERS)))
 	rm -f $@ && ar rcs $@ $^
 
+$(GENERATOR): $(call objects,$(call sources,generate)) $(SHEETLIB) $(LIB)
+	$(CC) $^ -o $@ -ludunits2 -lm -pthread
+
+generate: $(GENERATOR) ## rewrite idl/, the wizard's texts and docs/functions.md from the catalogue
+	$(GENERATOR) .
+
+# --- the extension --------------------------------------------------------------------------------------------------
+ADDIN_OBJ := $(call objects,$(call sources,addin))
+$(ADDIN_OBJ) $(BUILD)/tests/glue/%.o: CPPFLAGS += -isystem $(SDK)/include
+$(ADDIN_OBJ): | sdk
+
+sdk:
+	@test -e $(SDK)/lib/libuno_cppu.so -a -e "$(UDUNITS)" || { \
+	  echo "The office's development kit or UDUNITS-2 is missing: 'make deps' installs them" \
+	       "(or set SDK=... and UDUNITS=...)."; exit 1; }
+
+$(ADDIN): $(ADDIN_OBJ) $(SHEETLIB) $(LIB)
+	@mkdir -p $(@D)
+	$(CC) -shared $^ -o $@ -Wl,-z,defs -Wl,--exclude-libs,ALL -Wl,--enable-new-dtags -Wl,-rpath,'$$ORIGIN' \
+	  -Wl,-soname,gasleaf.so -L$(SDK)/lib -luno_cppu -luno_sal -ludunits2 -lm -pthread
+
+$(BUILD)/oxt/gasleaf.rdb: $(wildcard idl/gasleaf/*.idl) | sdk
+	@mkdir -p $(@D)
+	$(SDK)/bin/unoidl-write $(OFFICE)/program/types.rdb $(OFFICE)/program/types/offapi.rdb idl $@
+
+$(OXT): $(ADDIN) $(BUILD)/oxt/gasleaf.rdb $(wildcard src/package/*) LICENSE Makefile
+	mkdir -p $(BUILD)/oxt/META-INF
+	cp src/package/CalcAddIns.xcu src/package/gasleaf.components src/package/about.txt LICENSE $(BUILD)/oxt/
+	cp src/package/manifest.xml $(BUILD)/oxt/META-INF/manifest.xml
+	sed 's/@VERSION@/$(VERSION)/' src/package/description.xml.in > $(BUILD)/oxt/description.xml
+	cp -L $(UDUNITS) $(BUILD)/oxt/libudunits2.so.0
+	cp $(UDUNITS_LICENCE) $(BUILD)/oxt/LICENSE-UDUNITS
+	rm -f $@ && cd $(BUILD)/oxt && zip -qrX ../$(@F) .
+
+install: $(OXT) ## install the extension for the current user
+	unopkg add --suppress-license --force $(OXT)
+
+deps: ## install the Debian packages that are missing
+	@tools/deps.sh $(BUILD_PACKAGES) $(TEST_PACKAGES) $(DEMO_PACKAGES)
+
+# --- tests ----------------------------------------------------------------------------------------------------------
+write_suites = { echo '\#include "check.h"'; for s in $(1); do echo "extern const struct test_suite $$s;"; done; \
+	  echo 'extern const struct test_suite *const all_suites[];'; \
+	  echo 'const struct test_suite *const all_suites[] = {'; for s in $(1); do echo "    &$$s,"; done; echo '    0};'; }
+
 $(BUILD)/tests/suites.c: $(TEST_SRC) Makefile
 	@mkdir -p $(@D)
-	@{ echo '#include "check.h"'; for s in $(SUITES); do echo "extern const struct test_suite $$s;"; done; \
-	   echo 'extern const struct test_suite *const all_suites[];'; \
-	   echo 'const struct test_suite *const all_suites[] = {'; for s in $(SUITES); do echo "    &$$s,"; done; \
-	   echo '    0};'; } > $@
+	@$(call write_suites,$(call suites,$(TEST_SRC))) > $@
 
-$(BUILD)/tests/suites.o: $(BUILD)/tests/suites.c
-	$(COMPILE) -Itests/support -c $< -o $@
+$(BUILD)/tests/glue_suites.c: $(GLUE_SRC) Makefile
+	@mkdir -p $(@D)
+	@$(call write_suites,$(call suites,$(GLUE_SRC))) > $@
 
 $(BUILD)/tests/%.o: CPPFLAGS += -Itests/support -Itests
-TEST_OBJ := $(call objects,$(TEST_SRC)) $(BUILD)/tests/suites.o
+$(BUILD)/tests/%suites.o: $(BUILD)/tests/%suites.c
+	$(COMPILE) -c $< -o $@
 
-$(BUILD)/tests/run: $(TEST_OBJ) $(SHEETLIB) $(LIB)
-	$(CC) $(TEST_OBJ) $(SHEETLIB) $(LIB) -o $@ -lcunit -lgsl -lgslcblas -ludunits2 -lm -pthread
+$(BUILD)/tests/run: $(call objects,$(TEST_SRC)) $(BUILD)/tests/suites.o $(SHEETLIB) $(LIB)
+	$(CC) $^ -o $@ -lcunit -lgsl -lgslcblas -ludunits2 -lm -pthread
 
-check: $(BUILD)/tests/run ## build and run the CUnit suites that need no office
+$(BUILD)/tests/glue-run: $(call objects,$(GLUE_SRC)) $(BUILD)/tests/glue_suites.o $(SHEETLIB) $(LIB)
+	$(CC) $^ -o $@ -L$(SDK)/lib -luno_cppu -luno_sal -lcunit -ludunits2 -lm -ldl -pthread \
+	  -Wl,-rpath,$(OFFICE)/program
+
+$(BUILD)/tests/tools/%: $(BUILD)/tests/tools/%.o
+	$(CC) $^ -o $@
+
+check: $(BUILD)/tests/run ## build and run the suites that need no office (SUITE=prefix runs a part)
 	$(BUILD)/tests/run $(SUITE)
+
+glue: $(BUILD)/tests/glue-run $(ADDIN) ## build and run the suites of the add-in's glue
+	GASLEAF_ADDIN=$(ADDIN) $(BUILD)/tests/glue-run $(SUITE)
+
+tools: $(BUILD)/tests/tools/make_sheet $(BUILD)/tests/tools/count_sheet
+
+test: deps ## install what is missing, build, and run every test, those in headless Calc too
+	@echo "Building"
+	@$(MAKE) --no-print-directory -s all tools $(BUILD)/tests/run $(BUILD)/tests/glue-run
+	@BUILD=$(BUILD) ADDIN=$(ADDIN) OXT=$(OXT) tests/run_all.sh
+
+demo: deps ## compute the sample sheets in headless Calc; prints them, pictures in build/demo
+	@echo "Building"
+	@$(MAKE) --no-print-directory -s all tools
+	@BUILD=$(BUILD) OXT=$(OXT) tools/demo.sh
+
+# --- quality --------------------------------------------------------------------------------------------------------
+C_FILES = $(shell git ls-files '*.c' '*.h')
+
+lint: ## layout, clang-tidy, cppcheck: silent when all is well
+	@tools/deps.sh $(LINT_PACKAGES)
+	@clang-format --dry-run -Werror $(C_FILES)
+	@clang-tidy --quiet $(filter %.c,$(C_FILES)) -- -std=c11 $(CPPFLAGS) -Itests/support -Itests -isystem $(SDK)/include \
+	  2>&1 | grep -vE '^[0-9]+ warnings? (generated|treated)|^Suppressed|^Use -' || true
+	@cppcheck --quiet --error-exitcode=1 --std=c11 --inline-suppr --enable=warning,performance,portability \
+	  -Iinclude -Isrc -Itests/support -DGASLEAF_VERSION='""' -DUNX -DLINUX $(filter %.c,$(C_FILES))
+
+valgrind: $(BUILD)/tests/run $(BUILD)/tests/glue-run $(ADDIN) ## the suites and the glue under memcheck
+	@tools/deps.sh $(LINT_PACKAGES)
+	GASLEAF_ADDIN=$(ADDIN) G_SLICE=always-malloc valgrind -q --error-exitcode=1 --leak-check=full \
+	  --errors-for-leak-kinds=definite,indirect,possible --suppressions=tests/glue/valgrind.supp $(BUILD)/tests/glue-run
+	valgrind -q --error-exitcode=1 --leak-check=full --errors-for-leak-kinds=definite,indirect $(BUILD)/tests/run $(SUITE)
 
 clean: ## remove what was built
 	rm -rf $(BUILD)
