@@ -1,0 +1,162 @@
+#include <math.h>
+
+#include <gasleaf/heat.h>
+#include <gasleaf/vessel.h>
+
+/* Molar flow of a perfect gas through an isentropic nozzle is  C A P/sqrt(M R T) phi(P_down/P)  with
+ *   choked    phi = sqrt(k) (2/(k + 1))^((k + 1)/(2 (k - 1)))
+ *   unchoked  phi = sqrt(2 k/(k - 1)) r^(1/k) s,   s = sqrt(1 - r^((k - 1)/k))
+ * (Shapiro, vol. 1, ch. 4). It chokes at s^2 = (k - 1)/(k + 1). */
+static double choked_flow(double k)
+{
+    return sqrt(k) * pow(2 / (k + 1), (k + 1) / (2 * (k - 1)));
+}
+
+/* s for r = P_down/P, without losing digits where r is near 1. */
+static double speed_measure(double k, double r)
+{
+    return r > 0 ? sqrt(-expm1((k - 1) / k * log(r))) : 1;
+}
+
+static double flow_function(double k, double r)
+{
+    double s = speed_measure(k, r);
+    return s * s >= (k - 1) / (k + 1) ? choked_flow(k) : sqrt(2 * k / (k - 1)) * pow(r, 1 / k) * s;
+}
+
+/* ---- what is given ------------------------------------------------------------------------------------------- */
+
+struct figure {
+    double value;
+    int argument;
+};
+
+static struct gas_result check_positive(const struct figure *figure, size_t count)
+{
+    for (size_t i = 0; i < count; i++) {
+        if (!isfinite(figure[i].value))
+            return gas_bad(GAS_NOT_FINITE, figure[i].argument, figure[i].value);
+        if (!(figure[i].value > 0))
+            return gas_bad(GAS_NOT_POSITIVE, figure[i].argument, figure[i].value);
+    }
+    return gas_good(1);
+}
+
+static struct gas_result check_orifice(double P_down, double area, double coefficient, int first)
+{
+    if (!isfinite(P_down))
+        return gas_bad(GAS_NOT_FINITE, first, P_down);
+    if (P_down < 0)
+        return gas_bad(GAS_NEGATIVE, first, P_down);
+    const struct figure figures[] = {{area, first + 1}, {coefficient, first + 2}};
+    struct gas_result checked = check_positive(figures, 2);
+    if (!checked.status && coefficient > 1)
+        return gas_bad(GAS_NOT_A_FRACTION, first + 2, coefficient);
+    return checked;
+}
+
+/* gamma of a gas whose molar mass is known; the temperature's argument number is handed in. */
+static struct gas_result gamma_of(const struct gas *gas, double T, int argument)
+{
+    const struct figure M = {gas->molar_mass, 0};
+    struct gas_result checked = check_positive(&M, 1);
+    if (checked.status)
+        return checked;
+    struct gas_result k = gas_gamma(gas, T);
+    if (k.status == GAS_NO_HEAT_CAPACITY)
+        return gas_bad(k.status, 0, NAN);
+    if (k.status || !(k.value > 1 && isfinite(k.value)))
+        return gas_bad(k.status ? k.status : GAS_OUTSIDE_DATA, argument, T);
+    return k;
+}
+
+struct gas_result gas_nozzle_flow(const struct gas *gas, double P, double T, double P_down, double area,
+                                  double coefficient)
+{
+    const struct figure upstream[] = {{P, 1}, {T, 2}};
+    struct gas_result checked = check_positive(upstream, 2);
+    if (!checked.status)
+        checked = check_orifice(P_down, area, coefficient, 3);
+    if (!checked.status && P_down > P)
+        return gas_bad(GAS_WRONG_SIDE, 3, P_down);
+    struct gas_result k = checked.status ? checked : gamma_of(gas, T, 2);
+    if (k.status)
+        return k;
+    return gas_good(coefficient * area * P / sqrt(gas->molar_mass * gas->R * T) * flow_function(k.value, P_down / P));
+}
+
+/* ---- the time a vessel takes --------------------------------------------------------------------------------- */
+
+/* Positive nodes and weights of 16-point Gauss-Legendre quadrature, Abramowitz & Stegun, table 25.4. */
+/* clang-format off */
+static const double gauss[8][2] = {
+    {0.09501250983763744019, 0.18945061045506849629}, {0.28160355077925891323, 0.18260341504492358887},
+    {0.45801677765722738634, 0.16915651939500253819}, {0.61787624440264374845, 0.14959598881657673208},
+    {0.75540440835500303390, 0.12462897125553387205}, {0.86563120238783174388, 0.09515851168249278481},
+    {0.94457502307323257608, 0.06225352393864789286}, {0.98940093499164993260, 0.02715245941175409485},
+};
+/* clang-format on */
+
+/* Integral of (1 - s^2)^exponent from s1 to s2. */
+static double tail_integral(double exponent, double s1, double s2)
+{
+    double middle = 0.5 * (s1 + s2), half = 0.5 * (s2 - s1), sum = 0;
+    for (int i = 0; i < 8; i++) {
+        double low = middle - half * gauss[i][0], high = middle + half * gauss[i][0];
+        sum += gauss[i][1] * (exp(exponent * log1p(-low * low)) + exp(exponent * log1p(-high * high)));
+    }
+    return half * sum;
+}
+
+/* Times below are in units of V/(C A sqrt(R T1/M)). Isothermal: dt = -dP/(P phi). Adiabatic, n ~ P^(1/k) and
+ * T ~ P^((k-1)/k): dt = -dP/(k P phi) (P/P1)^-m with m = (k - 1)/(2 k). In s, dP/P = 2 k/(k - 1) s ds/(1 - s^2) and
+ * the s of phi cancels. */
+static double choked_time(double k, int adiabatic, double P1, double from, double to)
+{
+    double m = (k - 1) / (2 * k);
+    if (!adiabatic)
+        return log(from / to) / choked_flow(k);
+    return pow(from / P1, -m) * expm1(m * log(from / to)) / (m * k * choked_flow(k));
+}
+
+static double tail_time(double k, int adiabatic, double P1, double P_down, double from, double to)
+{
+    double s_to = speed_measure(k, P_down / to), s_from = speed_measure(k, P_down / from);
+    double exponent = -k / (k - 1), factor = sqrt(2 * k / (k - 1));
+    if (adiabatic) {
+        factor *= pow(P_down / P1, -(k - 1) / (2 * k)) / k;
+        exponent += 0.5;
+    }
+    return factor * tail_integral(exponent, s_to, s_from);
+}
+
+static struct gas_result check_vent_time(const struct gas_vessel *vessel, double P_down, double area,
+                                         double coefficient)
+{
+    const struct figure start[] = {{vessel->V, 1}, {vessel->P1, 2}, {vessel->T1, 3}, {vessel->P2, 4}};
+    struct gas_result checked = check_positive(start, 4);
+    if (!checked.status && vessel->wall != GAS_WALL_ADIABATIC && vessel->wall != GAS_WALL_ISOTHERMAL)
+        return gas_bad(GAS_NOT_APPLICABLE, 6, NAN);
+    if (!checked.status)
+        checked = check_orifice(P_down, area, coefficient, 8);
+    if (!checked.status && (vessel->P2 > vessel->P1 || vessel->P2 < P_down))
+        return gas_bad(GAS_WRONG_SIDE, 4, vessel->P2);
+    return checked;
+}
+
+struct gas_result gas_vent_time(const struct gas *gas, const struct gas_vessel *vessel, double P_down, double area,
+                                double coefficient)
+{
+    struct gas_result checked = check_vent_time(vessel, P_down, area, coefficient);
+    struct gas_result gamma = checked.status ? checked : gamma_of(gas, vessel->T1, 3);
+    if (gamma.status)
+        return gamma;
+    double k = gamma.value, P1 = vessel->P1, P2 = vessel->P2;
+    int adiabatic = vessel->wall == GAS_WALL_ADIABATIC;
+    double choked_to = P_down * pow((k + 1) / 2, k / (k - 1)); /* the pressure down to which the flow is choked */
+    double turn = fmin(fmax(choked_to, P2), P1);
+    double time = choked_time(k, adiabatic, P1, P1, turn);
+    if (turn > P2)
+        time += tail_time(k, adiabatic, P1, P_down, turn, P2);
+    return gas_good(time * vessel->V / (coefficient * area * sqrt(gas->R * vessel->T1 / gas->molar_mass)));
+}
