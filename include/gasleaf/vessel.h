@@ -51,7 +51,7 @@ struct gas_vessel_end {
  *              GAS_OUTSIDE_DATA    argument 0 and the limit as figure when it is T2 that leaves the data
  *              GAS_UNREACHABLE     so much heat that P2 is passed without any gas coming in
  *              GAS_NOT_APPLICABLE  a wall exchanging over a time with no change of pressure to spread it over
- *   Argument   1 V, 2 P1, 3 T1, 4 P2, 5 T_line, 6 wall data, 7 T_settled
+ *   Argument   1 V, 2 P1, 3 T1, 4 P2, 5 T_line, 6 wall data, 7 T_settled; 0 the gas (no heat capacity)
  *   Notes      Evacuated and adiabatic with constant k: T2 = k T_line. T1 may be NAN when evacuated, unless the wall
  *              mode refers to it. Isothermal with T_line NAN: everything but the heat, which is NAN.
  *   Method     n2 u(T2) - n1 u(T1) = (n2 - n1) h(T_line) + Q with n = P V/(R T): one bracketed root in T2. GAS_WALL_UA
@@ -91,7 +91,7 @@ struct gas_result gas_vent(const struct gas *gas, const struct gas_vessel *vesse
  *   Returned   mol/s
  *   Status     GAS_NOT_FINITE, GAS_NOT_POSITIVE, GAS_NEGATIVE, GAS_NOT_A_FRACTION, GAS_OUTSIDE_DATA,
  *              GAS_WRONG_SIDE P_down above P
- *   Argument   1 P, 2 T, 3 P_down, 4 area, 5 coefficient; 0 the gas (no molar mass)
+ *   Argument   1 gas (no molar mass, no heat capacity), 2 P, 3 T, 4 P_down, 5 area, 6 coefficient
  *   Notes      Not for relief sizing.
  *   Method     perfect gas with gamma at T upstream
  *   Source     Shapiro, The Dynamics and Thermodynamics of Compressible Fluid Flow, vol. 1, ch. 4; NACA Report 1135
@@ -104,7 +104,7 @@ struct gas_result gas_nozzle_flow(const struct gas *gas, double P, double T, dou
  * gas_vent_time - s to fall from P1 to P2 through that orifice, isothermal or adiabatic vessel (gamma at T1).
  *
  *   Status     as gas_nozzle_flow; GAS_WRONG_SIDE: P2 above P1 or below P_down; GAS_NOT_APPLICABLE: another wall mode
- *   Argument   1 V, 2 P1, 3 T1, 4 P2, 6 wall; 8 P_down, 9 area, 10 coefficient; 0 the gas (no molar mass)
+ *   Argument   1 V, 2 P1, 3 T1, 4 P2, 6 wall; 8 P_down, 9 area, 10 coefficient; 0 the gas
  *   Notes      The time to come down to P_down itself is finite. Not for relief sizing.
  *   Method     choked: closed form. Below: the rate of fall integrated in the square root of 1 - (P_down/P)^((k-1)/k),
  *              which takes the infinite slope at P_down out of it, by 16-point Gauss-Legendre quadrature.

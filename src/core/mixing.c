@@ -95,9 +95,11 @@ static struct gas_result mixed_temperature(const struct mixing *mixing, double n
         return gas_good(coldest);
     if (lowest > highest)
         return gas_bad(GAS_OUTSIDE_DATA, lowest_of, lowest);
-    struct gas_result T = root_rising(gain, mixing, guess, fmax(lowest, coldest), fmin(highest, hottest));
+    /* a hair wider, as a portion may sit on the limit with a rounding of its own */
+    struct gas_result T =
+        root_rising(gain, mixing, guess, fmax(lowest * (1 - 1e-9), coldest), fmin(highest * (1 + 1e-9), hottest));
     if (T.status == GAS_OUTSIDE_DATA)
-        T.argument = T.figure == lowest ? lowest_of : highest_of;
+        return T.figure <= lowest ? gas_bad(T.status, lowest_of, lowest) : gas_bad(T.status, highest_of, highest);
     return T;
 }
 

@@ -55,16 +55,17 @@ static struct gas_result check_orifice(double P_down, double area, double coeffi
     return checked;
 }
 
-/* gamma of a gas whose molar mass is known; the temperature's argument number is handed in. */
-static struct gas_result gamma_of(const struct gas *gas, double T, int argument)
+/* gamma of a gas whose molar mass is known; the argument numbers of temperature and gas are
+ * handed in. */
+static struct gas_result gamma_of(const struct gas *gas, double T, int argument, int gas_argument)
 {
-    const struct figure M = {gas->molar_mass, 0};
+    const struct figure M = {gas->molar_mass, gas_argument};
     struct gas_result checked = check_positive(&M, 1);
     if (checked.status)
         return checked;
     struct gas_result k = gas_gamma(gas, T);
     if (k.status == GAS_NO_HEAT_CAPACITY)
-        return gas_bad(k.status, 0, NAN);
+        return gas_bad(k.status, gas_argument, NAN);
     if (k.status || !(k.value > 1 && isfinite(k.value)))
         return gas_bad(k.status ? k.status : GAS_OUTSIDE_DATA, argument, T);
     return k;
@@ -73,13 +74,13 @@ static struct gas_result gamma_of(const struct gas *gas, double T, int argument)
 struct gas_result gas_nozzle_flow(const struct gas *gas, double P, double T, double P_down, double area,
                                   double coefficient)
 {
-    const struct figure upstream[] = {{P, 1}, {T, 2}};
+    const struct figure upstream[] = {{P, 2}, {T, 3}};
     struct gas_result checked = check_positive(upstream, 2);
     if (!checked.status)
-        checked = check_orifice(P_down, area, coefficient, 3);
+        checked = check_orifice(P_down, area, coefficient, 4);
     if (!checked.status && P_down > P)
-        return gas_bad(GAS_WRONG_SIDE, 3, P_down);
-    struct gas_result k = checked.status ? checked : gamma_of(gas, T, 2);
+        return gas_bad(GAS_WRONG_SIDE, 4, P_down);
+    struct gas_result k = checked.status ? checked : gamma_of(gas, T, 3, 1);
     if (k.status)
         return k;
     return gas_good(coefficient * area * P / sqrt(gas->molar_mass * gas->R * T) * flow_function(k.value, P_down / P));
@@ -148,7 +149,7 @@ struct gas_result gas_vent_time(const struct gas *gas, const struct gas_vessel *
                                 double coefficient)
 {
     struct gas_result checked = check_vent_time(vessel, P_down, area, coefficient);
-    struct gas_result gamma = checked.status ? checked : gamma_of(gas, vessel->T1, 3);
+    struct gas_result gamma = checked.status ? checked : gamma_of(gas, vessel->T1, 3, 0);
     if (gamma.status)
         return gamma;
     double k = gamma.value, P1 = vessel->P1, P2 = vessel->P2;
