@@ -131,7 +131,8 @@ bool gas_plan_finds(const struct gas_plan *plan, enum gas_variable variable, int
 /*
  * gas_plan_trim - keep only the steps that the wanted variables and the checks need, in order.
  *
- *   Notes      gas_plan_finds is false afterwards for what is no longer computed. Tables trim once and run often.
+ *   Notes      gas_plan_finds is false afterwards for what is no longer computed. Tables trim once and run
+ *              often. Checks stay as they are.
  */
 void gas_plan_trim(struct gas_plan *plan, const struct gas_known *wanted, size_t count);
 
@@ -148,7 +149,8 @@ int gas_plan_slice(const struct gas_plan *plan, const struct gas_known *wanted, 
  *
  *   Given      candidate[room]  filled: P, T, V, n, m first, then v, rho, s, h; states of the wanted one first
  *   Returned   how many; 0 when it is found already or when one more figure is not enough
- *   Notes      Makes a plan for each trial: for the sentence of a refusal, not for every row.
+ *   Notes      Makes a plan for each trial: for the sentence of a refusal, not for every row. The plan must not be a
+ *              trimmed one.
  */
 size_t gas_plan_missing(const struct gas_plan *plan, struct gas_known wanted, struct gas_known *candidate, size_t room);
 

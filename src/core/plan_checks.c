@@ -14,6 +14,7 @@ enum { DIRECTIONS = GAS_CHECKS };
 
 struct slopes {
     int directions;
+    bool given[GAS_SLOTS];
     double by_slot[GAS_SLOTS][DIRECTIONS];
 };
 
@@ -74,8 +75,10 @@ static int relation_slopes(const struct gas_plan *plan, const struct gas_step *s
     return count;
 }
 
-static void follow_steps(const struct gas_plan *plan, struct slopes *slopes, bool *known)
+static void follow_steps(const struct gas_plan *plan, struct slopes *slopes)
 {
+    bool known[GAS_SLOTS];
+    memcpy(known, slopes->given, sizeof known);
     for (int i = 0; i < plan->step_count; i++) {
         const struct gas_step *step = &plan->step[i];
         int target = plan->slot[step->target_state][step->target];
@@ -94,15 +97,15 @@ static void follow_steps(const struct gas_plan *plan, struct slopes *slopes, boo
     }
 }
 
-static void start_slopes(const struct gas_plan *plan, struct slopes *slopes, bool *given)
+static void start_slopes(const struct gas_plan *plan, struct slopes *slopes)
 {
-    memset(given, 0, GAS_SLOTS * sizeof *given);
+    memset(slopes->given, 0, sizeof slopes->given);
     slopes->directions = plan->known_count < DIRECTIONS ? plan->known_count : DIRECTIONS;
     for (int i = 0; i < plan->known_count; i++) {
         if (plan->known[i].state < 0)
             continue;
         int slot = plan->slot[plan->known[i].state][plan->known[i].variable];
-        given[slot] = true;
+        slopes->given[slot] = true;
         for (int d = 0; d < slopes->directions; d++)
             slopes->by_slot[slot][d] = 2 * generic((uint64_t)slot * DIRECTIONS + (uint64_t)d + 100000) - 2;
     }
@@ -135,57 +138,82 @@ static void doubt(const struct gas_plan *plan, const struct relation_term *term,
             }
 }
 
-static void consider(struct gas_plan *plan, struct slopes *slopes, const bool *given, int not_given,
-                     struct gas_step check)
+/* How far a relation is from being implied: its balance along each direction, and the largest of them. */
+static int unbalanced(const struct slopes *slopes, const struct relation_term *term, const double *slope, int count,
+                      double *balance)
 {
-    struct relation_term term[2 * RELATION_FACTORS];
-    double slope[2 * RELATION_FACTORS], balance[DIRECTIONS];
-    int count = relation_slopes(plan, &check, term, slope), pivot = 0;
-    for (int k = 0; k < count; k++) {
-        if (!plan->found[term[k].slot])
-            return;
-        not_given -= !given[term[k].slot];
-    }
-    if (count == 0 || not_given != 0)
-        return;
+    int pivot = 0;
     for (int d = 0; d < slopes->directions; d++) {
         balance[d] = 0;
         for (int k = 0; k < count; k++)
             balance[d] += slope[k] * slopes->by_slot[term[k].slot][d];
         pivot = fabs(balance[d]) > fabs(balance[pivot]) ? d : pivot;
     }
-    if (slopes->directions == 0 || fabs(balance[pivot]) < 1e-7)
-        return;
-    doubt(plan, term, count, &check);
-    plan->check[plan->check_count++] = check;
-    spend_direction(plan, slopes, balance, pivot);
+    return slopes->directions > 0 && fabs(balance[pivot]) > 1e-7 ? pivot : -1;
 }
 
-static void consider_states(struct gas_plan *plan, struct slopes *slopes, const bool *given, int not_given,
-                            int relation)
+/* How many of the variables were not given; -1: one is not even found. */
+static int derived_count(const struct gas_plan *plan, const struct slopes *slopes, const struct relation_term *term,
+                         int count)
+{
+    int derived = 0;
+    for (int k = 0; k < count; k++) {
+        if (!plan->found[term[k].slot])
+            return -1;
+        derived += !slopes->given[term[k].slot];
+    }
+    return count > 0 ? derived : -1;
+}
+
+enum { ANY = -1 };
+
+/* Accept the relation as a check if it is one and exactly `derived` of its variables were not given; ANY: only ask.
+ * Returned: is it a check. */
+static bool consider(struct gas_plan *plan, struct slopes *slopes, int derived, struct gas_step check)
+{
+    struct relation_term term[2 * RELATION_FACTORS];
+    double slope[2 * RELATION_FACTORS], balance[DIRECTIONS];
+    int count = relation_slopes(plan, &check, term, slope);
+    int own = derived_count(plan, slopes, term, count);
+    if (own < 0 || (derived != ANY && own != derived))
+        return false;
+    int pivot = unbalanced(slopes, term, slope, count, balance);
+    if (pivot < 0)
+        return false;
+    if (derived != ANY) {
+        doubt(plan, term, count, &check);
+        plan->check[plan->check_count++] = check;
+        spend_direction(plan, slopes, balance, pivot);
+    }
+    return true;
+}
+
+static bool consider_all(struct gas_plan *plan, struct slopes *slopes, int derived)
 {
     int states = plan->unnumbered ? 1 : plan->states;
-    for (int a = 1; a <= states; a++) {
-        struct gas_step check = {(unsigned char)relation, (unsigned char)a, 0, 0, 0};
-        if (!gas_relations[relation].pair)
-            consider(plan, slopes, given, not_given, check);
-        for (int b = a + 1; gas_relations[relation].pair && b <= states; b++) {
-            check.state_b = (unsigned char)b;
-            consider(plan, slopes, given, not_given, check);
+    bool any = false;
+    for (int relation = 0; relation < RELATIONS; relation++)
+        for (int a = 1; a <= states; a++) {
+            struct gas_step check = {(unsigned char)relation, (unsigned char)a, 0, 0, 0};
+            if (!gas_relations[relation].pair)
+                any |= consider(plan, slopes, derived, check);
+            for (int b = a + 1; gas_relations[relation].pair && b <= states; b++) {
+                check.state_b = (unsigned char)b;
+                any |= consider(plan, slopes, derived, check);
+            }
         }
-    }
+    return any;
 }
 
 /* Relations between given figures alone come first: they read best and carry the least rounding. */
 void gas_plan_add_checks(struct gas_plan *plan)
 {
     struct slopes slopes;
-    bool given[GAS_SLOTS], known[GAS_SLOTS];
     plan->check_count = 0;
-    start_slopes(plan, &slopes, given);
-    memcpy(known, given, sizeof known);
-    follow_steps(plan, &slopes, known);
-    for (int not_given = 0; not_given <= 2 * RELATION_FACTORS; not_given++)
-        for (int relation = 0; relation < RELATIONS; relation++)
-            consider_states(plan, &slopes, given, not_given, relation);
+    start_slopes(plan, &slopes);
+    follow_steps(plan, &slopes);
+    if (!consider_all(plan, &slopes, ANY))
+        return;
+    for (int derived = 0; derived <= 2 * RELATION_FACTORS && slopes.directions > 0; derived++)
+        consider_all(plan, &slopes, derived);
 }

@@ -3,27 +3,7 @@
 
 #include <gasleaf/heat.h>
 
-#include "relations.h"
-
-struct run {
-    const struct gas_plan *plan;
-    const struct gas *gas;
-    struct gas_datum datum;
-    const double *slot;
-};
-
-static double of(const struct run *run, int state, enum gas_variable variable)
-{
-    return run->slot[run->plan->slot[state][variable]];
-}
-
-static void times_constants(const struct run *run, const struct relation *row, double *over, double *under)
-{
-    if (row->R < 0)
-        *under *= run->gas->R;
-    if (row->M != 0)
-        *(row->M > 0 ? over : under) *= run->gas->molar_mass;
-}
+#include "plan_run.h"
 
 /* Both sides of a product relation, without the term of the target, as over = numerator, under = denominator. */
 struct fraction {
@@ -64,12 +44,6 @@ static struct gas_result solve_product(const struct run *run, const struct gas_s
     return gas_good(f.target > 0 ? f.under / by : f.over / by);
 }
 
-/* u = h - R T, and R T0 is what u lacks of h at the datum. */
-static struct gas_result h_of(const struct run *run, double T)
-{
-    return gas_dh(run->gas, run->datum.T, T);
-}
-
 static struct gas_result solve_caloric(const struct run *run, const struct gas_step *step)
 {
     const double R = run->gas->R;
@@ -80,8 +54,8 @@ static struct gas_result solve_caloric(const struct run *run, const struct gas_s
                                                         : of(run, a, GAS_VAR_U_MOLAR) + R * of(run, a, GAS_VAR_T));
     case RELATION_H_OF_T:
         return step->target == GAS_VAR_T ? gas_T_after_dh(run->gas, run->datum.T, of(run, a, GAS_VAR_H_MOLAR))
-                                         : h_of(run, of(run, a, GAS_VAR_T));
-    default: /* RELATION_U_OF_T */
+                                         : gas_dh(run->gas, run->datum.T, of(run, a, GAS_VAR_T));
+    default: /* RELATION_U_OF_T; u at the datum is -R T0 */
         return gas_T_after_du(run->gas, run->datum.T, of(run, a, GAS_VAR_U_MOLAR) + R * run->datum.T);
     }
 }
@@ -120,7 +94,7 @@ static struct gas_result solve_entropy(const struct run *run, const struct gas_s
     return rise.status == GAS_OK ? gas_good(datum.P * exp((rise.value - s) / R)) : rise;
 }
 
-static bool inputs_there(const struct run *run, const struct gas_step *step)
+bool gas_step_ready(const struct run *run, const struct gas_step *step)
 {
     const struct relation *row = &gas_relations[step->relation];
     for (int i = 0; i < row->count; i++)
@@ -129,12 +103,12 @@ static bool inputs_there(const struct run *run, const struct gas_step *step)
     return true;
 }
 
-static struct gas_result solve(const struct run *run, const struct gas_step *step)
+struct gas_result gas_step_solve(const struct run *run, const struct gas_step *step)
 {
     struct gas_result result;
     if (gas_relations[step->relation].kind == RELATION_PRODUCT)
         result = solve_product(run, step);
-    else if (!inputs_there(run, step))
+    else if (!gas_step_ready(run, step))
         return gas_bad(GAS_UNDETERMINED, 0, NAN);
     else if (step->relation == RELATION_U_TOTAL_FROM_H)
         result = solve_total(run, step);
@@ -168,85 +142,6 @@ static struct gas_result take_figures(const struct gas_plan *plan, const double 
     return gas_good(0);
 }
 
-/* What counts as small for a relation with h, u or s, which may be near zero: R T or R, times the amount in it. */
-static double natural_scale(const struct run *run, const struct gas_step *check)
-{
-    const struct relation *row = &gas_relations[check->relation];
-    double T = of(run, check->state_a, GAS_VAR_T), scale = run->gas->R;
-    enum gas_variable first = (enum gas_variable)row->factor[0].variable;
-    if (gas_variable_positive(first))
-        return 0;
-    if (check->relation == RELATION_U_TOTAL_FROM_H)
-        return of(run, check->state_a, GAS_VAR_P) * of(run, check->state_a, GAS_VAR_V);
-    if (first != GAS_VAR_S_MOLAR && first != GAS_VAR_S_TOTAL)
-        scale *= isnan(T) ? run->datum.T : T;
-    for (int i = 1; i < row->count; i++) {
-        enum gas_variable variable = (enum gas_variable)row->factor[i].variable;
-        double x = of(run, check->state_a, variable);
-        scale *= variable == GAS_VAR_N ? x : variable == GAS_VAR_MASS ? x / run->gas->molar_mass : 1;
-    }
-    return scale;
-}
-
-static void product_sides(const struct run *run, const struct gas_step *check, double *left, double *right)
-{
-    const struct relation *row = &gas_relations[check->relation];
-    double side[2] = {1, 1};
-    for (int s = 0; s < 1 + row->pair; s++)
-        for (int i = 0; i < row->count; i++) {
-            int variable = row->factor[i].variable, exponent = row->factor[i].exponent;
-            double x = of(run, s == 0 ? check->state_a : check->state_b, (enum gas_variable)variable);
-            if (row->pair && run->plan->shared[variable])
-                continue;
-            if (row->pair)
-                side[s] *= exponent > 0 ? x : 1 / x;
-            else
-                side[exponent < 0] *= x;
-        }
-    times_constants(run, row, &side[0], &side[1]);
-    *left = side[0];
-    *right = side[1];
-}
-
-static struct gas_result u_of(const struct run *run, double T)
-{
-    struct gas_result h = h_of(run, T);
-    return h.status == GAS_OK ? gas_good(h.value - run->gas->R * T) : h;
-}
-
-static void caloric_sides(const struct run *run, const struct gas_step *check, double *left, double *right)
-{
-    struct gas_step step = *check;
-    step.target = gas_relations[check->relation].factor[0].variable;
-    double T = of(run, check->state_a, GAS_VAR_T), v = of(run, check->state_a, GAS_VAR_V_MOLAR);
-    *left = of(run, check->state_a, (enum gas_variable)step.target);
-    if (!inputs_there(run, &step))
-        *right = NAN;
-    else if (check->relation == RELATION_U_OF_T)
-        *right = u_of(run, T).value;
-    else if (check->relation == RELATION_S_OF_T_V)
-        *right = gas_ds(run->gas, run->datum.T, run->datum.P, T, run->gas->R * T / v).value;
-    else
-        *right = solve(run, &step).value;
-}
-
-static bool balanced(const struct run *run, const struct gas_step *check, double agree, struct gas_values *values)
-{
-    double left, right;
-    if (gas_relations[check->relation].kind == RELATION_PRODUCT)
-        product_sides(run, check, &left, &right);
-    else
-        caloric_sides(run, check, &left, &right);
-    double scale = fmax(fmax(fabs(left), fabs(right)), natural_scale(run, check));
-    if (!(fabs(left - right) > fmax(agree, 1e-9) * scale))
-        return true;
-    values->left = left;
-    values->right = right;
-    bool solvable = gas_relations[check->relation].formula[check->target];
-    values->balanced = solvable ? solve(run, check).value : NAN;
-    return false;
-}
-
 /* The first step on the way to a missing value that could not be carried out. */
 static int root_failure(const struct run *run, int slot)
 {
@@ -276,7 +171,7 @@ static struct gas_result needed_there(const struct run *run, const struct gas_kn
             values->failed_step = root_failure(run, run->plan->slot[needed[i].state][needed[i].variable]);
         if (values->failed_step < 0)
             return gas_bad(GAS_UNDETERMINED, 0, NAN);
-        return solve(run, &run->plan->step[values->failed_step]);
+        return gas_step_solve(run, &run->plan->step[values->failed_step]);
     }
     return gas_good(0);
 }
@@ -288,7 +183,7 @@ static void carry_out(const struct run *run, double *slot)
         const struct gas_step *step = &plan->step[i];
         int target = plan->slot[step->target_state][step->target];
         if (isnan(slot[target]))
-            slot[target] = solve(run, step).value;
+            slot[target] = gas_step_solve(run, step).value;
     }
 }
 
@@ -307,7 +202,7 @@ struct gas_result gas_plan_run(const struct gas_plan *plan, const struct gas *ga
         return result;
     carry_out(&run, values->slot);
     for (int i = 0; i < plan->check_count && agree < INFINITY; i++)
-        if (!balanced(&run, &plan->check[i], agree, values)) {
+        if (!gas_check_holds(&run, &plan->check[i], agree, values)) {
             values->failed_check = i;
             return gas_bad(GAS_CONTRADICTION, 0, values->balanced);
         }

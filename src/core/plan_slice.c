@@ -76,23 +76,53 @@ int gas_plan_slice(const struct gas_plan *plan, const struct gas_known *wanted, 
     return steps;
 }
 
+static void mark_checks(const struct gas_plan *plan, bool *mark)
+{
+    for (int i = 0; i < plan->check_count; i++) {
+        const struct gas_step *check = &plan->check[i];
+        mark[plan->slot[check->target_state][check->target]] = true;
+        gas_step_mark_inputs(plan, check, mark);
+        if (!gas_variable_positive((enum gas_variable)gas_relations[check->relation].factor[0].variable))
+            mark[plan->slot[check->state_a][GAS_VAR_T]] = true; /* R T is what h and u are compared against */
+    }
+}
+
+/* Lay the marked slots together, so that a run resets few; all others become one slot that is never found. */
+static void compact_slots(struct gas_plan *plan, const bool *mark)
+{
+    short place[GAS_SLOTS];
+    short slots = 0;
+    for (int slot = 0; slot < plan->slots; slot++) {
+        place[slot] = mark[slot] ? slots : -1;
+        plan->found[slots] = plan->found[slot];
+        slots = (short)(slots + mark[slot]);
+    }
+    for (int state = 0; state <= GAS_STATES; state++)
+        for (int variable = 0; variable < GAS_VARIABLES; variable++) {
+            short *slot = &plan->slot[state][variable];
+            if (*slot >= 0)
+                *slot = place[*slot] >= 0 ? place[*slot] : slots;
+        }
+    if (slots < plan->slots)
+        plan->found[slots++] = false;
+    plan->slots = slots;
+}
+
 void gas_plan_trim(struct gas_plan *plan, const struct gas_known *wanted, size_t count)
 {
     bool mark[GAS_SLOTS], needed[GAS_STEPS];
     int kept = 0;
     mark_wanted(plan, wanted, count, mark);
-    for (int i = 0; i < plan->check_count; i++) {
-        gas_step_mark_inputs(plan, &plan->check[i], mark);
-        mark[plan->slot[plan->check[i].target_state][plan->check[i].target]] = true;
-    }
+    mark_checks(plan, mark);
     mark_steps(plan, mark, needed);
-    for (int i = 0; i < plan->step_count; i++) {
-        int target = plan->slot[plan->step[i].target_state][plan->step[i].target];
-        plan->found[target] = mark[target];
+    for (int i = 0; i < plan->step_count; i++)
         if (needed[i])
             plan->step[kept++] = plan->step[i];
-    }
     plan->step_count = kept;
+    for (int i = 0; i < plan->known_count; i++)
+        if (plan->known[i].state >= 0)
+            mark[plan->slot[plan->known[i].state][plan->known[i].variable]] = true;
+    compact_slots(plan, mark);
 }
 
 static bool serves(const struct gas_plan *plan, struct gas_known more, struct gas_known wanted)

@@ -59,4 +59,22 @@ static inline void truth_state(double P, double T, double n, double truth[GAS_VA
         truth[i] = all[i];
 }
 
+/* A set of knowns with their true figures. */
+struct question {
+    struct gas_known known[GAS_SLOTS];
+    double figures[GAS_SLOTS];
+    size_t count;
+};
+
+static inline void ask(struct question *q, int variable, int state, double figure)
+{
+    q->known[q->count] = (struct gas_known){(enum gas_variable)variable, state};
+    q->figures[q->count++] = figure;
+}
+
+static inline struct gas_result run(const struct gas_plan *plan, const struct question *q, struct gas_values *values)
+{
+    return gas_plan_run(plan, &truth_gas, NULL, 1e-3, q->figures, q->count, NULL, 0, values);
+}
+
 #endif
