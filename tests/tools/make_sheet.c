@@ -185,7 +185,7 @@ static void put_verdict(FILE *out, long row, const char *expected, const char *t
     else if (*expected == '~')
         fprintf(out, "IF(ISTEXT([.B%ld]);IF(ISNUMBER(FIND(MID([.C%ld];2;9999);[.B%ld]));1;0);0)", row, row, row);
     else
-        fprintf(out, "IF(ISTEXT([.B%ld]);IF(EXACT([.B%ld];[.C%ld]);1;0);0)", row, row, row);
+        fprintf(out, "IF(ISTEXT([.B%ld]);IF(EXACT([.B%ld]&amp;&quot;&quot;;[.C%ld]);1;0);0)", row, row, row);
     fputs(";0)\"/>\n", out);
 }
 
