@@ -60,12 +60,13 @@ enum { GAS_UNIT_TEXT = 48 };
 
 struct gas_unit {
     enum gas_dimension dimension;
-    double scale;  /* SI = scale * (x + offset) for a level, scale * x for a difference */
-    double offset; /* in this unit; 273.15 for degC, 459.67 for degF, 0 otherwise */
-    enum gas_pressure_basis basis; /* of a pressure */
-    bool reference_volume;  /* Nm3, scf, ...: AMOUNT or AMOUNT_FLOW, to be shown as written */
+    double scale;                    /* SI = scale * (x + offset) for a level, scale * x for a difference */
+    double offset;                   /* in this unit; 273.15 for degC, 459.67 for degF, 0 otherwise */
+    enum gas_pressure_basis basis;   /* of a pressure */
+    bool reference_volume;           /* Nm3, scf, ...: AMOUNT or AMOUNT_FLOW, to be shown as written */
     double reference_T, reference_P; /* K, Pa of a reference volume, else 0 */
-    char text[GAS_UNIT_TEXT]; /* as the user wrote it, trimmed */
+    char text[GAS_UNIT_TEXT];        /* as the user wrote it, trimmed */
+    signed char power[5];            /* of kg, m, s, K, mol: tells whether two units of GAS_DIM_OTHER agree */
 };
 
 /* What `Nm3`, `Sm3` and `scf` mean; options may redefine them. */
@@ -78,11 +79,11 @@ extern const struct gas_references gas_references_default;
 
 enum gas_unit_status {
     GAS_UNIT_OK,
-    GAS_UNIT_EMPTY,       /* no text */
-    GAS_UNIT_UNKNOWN,     /* a name that is not in the table: `at`, `length` point at it, nearest may be filled */
-    GAS_UNIT_SYNTAX,      /* known names, but not a unit: "kg//h", unbalanced parentheses */
-    GAS_UNIT_AMBIGUOUS,   /* `hint` says between what: "standard" alone, "KPA" against kPa..., "ton" */
-    GAS_UNIT_REFERENCE,   /* a spelled-out reference that makes no sense */
+    GAS_UNIT_EMPTY,     /* no text */
+    GAS_UNIT_UNKNOWN,   /* a name that is not in the table: `at`, `length` point at it, nearest may be filled */
+    GAS_UNIT_SYNTAX,    /* known names, but not a unit: "kg//h", unbalanced parentheses */
+    GAS_UNIT_AMBIGUOUS, /* `hint` says between what: "standard" alone, "KPA" against kPa..., "ton" */
+    GAS_UNIT_REFERENCE, /* a spelled-out reference that makes no sense */
     GAS_UNIT_TOO_LONG
 };
 
@@ -104,6 +105,9 @@ struct gas_unit_fault {
 bool gas_unit_parse(const char *text, size_t length, const struct gas_references *references, struct gas_unit *unit,
                     struct gas_unit_fault *fault);
 
+/* Whether figures in the two units can be converted into one another. */
+bool gas_unit_compatible(const struct gas_unit *a, const struct gas_unit *b);
+
 /* The SI unit of a dimension, for bare numbers. */
 struct gas_unit gas_unit_si(enum gas_dimension dimension);
 
@@ -114,8 +118,9 @@ double gas_unit_from_si(const struct gas_unit *unit, double si, double barometer
 double gas_unit_difference_to_si(const struct gas_unit *unit, double x);
 double gas_unit_difference_from_si(const struct gas_unit *unit, double si);
 
-/* Number and unit from one text: "7 bar(g)", "7,5 m3", "-2.5e3kPa", "12". Decimal point or comma, no grouping;
- * independent of the locale. unit_from points at the first character of the unit ("" when bare). */
+/* The number at the start of a text: "7 bar(g)", "7,5 m3", "-2.5e3kPa", "12". Decimal point or comma, no grouping;
+ * independent of the locale. *used is where the unit begins (length when bare), behind any spaces. False when no number
+ * stands there, or digits follow it that would make it another number: "1 234", "1,234.5". */
 bool gas_number_parse(const char *text, size_t length, double *number, size_t *used);
 
 /* Shortest text that shows a figure to `digits` significant digits, locale-independent, no trailing zeros. */
