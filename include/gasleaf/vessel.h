@@ -95,7 +95,7 @@ struct gas_result gas_vent(const struct gas *gas, const struct gas_vessel *vesse
  *   Notes      Not for relief sizing.
  *   Method     perfect gas with gamma at T upstream
  *   Source     Shapiro, The Dynamics and Thermodynamics of Compressible Fluid Flow, vol. 1, ch. 4; NACA Report 1135
- *   Check      tests/core/test_vessel.c
+ *   Check      tests/core/test_nozzle.c
  */
 struct gas_result gas_nozzle_flow(const struct gas *gas, double P, double T, double P_down, double area,
                                   double coefficient);
@@ -108,6 +108,7 @@ struct gas_result gas_nozzle_flow(const struct gas *gas, double P, double T, dou
  *   Notes      The time to come down to P_down itself is finite. Not for relief sizing.
  *   Method     choked: closed form. Below: the rate of fall integrated in the square root of 1 - (P_down/P)^((k-1)/k),
  *              which takes the infinite slope at P_down out of it, by 16-point Gauss-Legendre quadrature.
+ *   Check      tests/core/test_nozzle.c
  */
 struct gas_result gas_vent_time(const struct gas *gas, const struct gas_vessel *vessel, double P_down, double area,
                                 double coefficient);
