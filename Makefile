@@ -118,7 +118,7 @@ $(BUILD)/tests/glue-run: $(call objects,$(GLUE_SRC)) $(BUILD)/tests/glue_suites.
 	$(CC) $^ -o $@ -L$(SDK)/lib -luno_cppu -luno_sal -lcunit -ludunits2 -lm -ldl -pthread \
 	  -Wl,-rpath,$(OFFICE)/program
 
-$(BUILD)/tests/tools/%: $(BUILD)/tests/tools/%.o
+$(BUILD)/tests/tools/%: $(BUILD)/tests/tools/%.o $(BUILD)/tests/tools/csv.o
 	$(CC) $^ -o $@
 
 check: $(BUILD)/tests/run ## build and run the suites that need no office (SUITE=prefix runs a part)
@@ -127,7 +127,7 @@ check: $(BUILD)/tests/run ## build and run the suites that need no office (SUITE
 glue: $(BUILD)/tests/glue-run $(ADDIN) ## build and run the suites of the add-in's glue
 	GASLEAF_ADDIN=$(ADDIN) $(BUILD)/tests/glue-run $(SUITE)
 
-tools: $(BUILD)/tests/tools/make_sheet $(BUILD)/tests/tools/count_sheet
+tools: $(foreach tool,make_sheet count_sheet show_table,$(BUILD)/tests/tools/$(tool))
 
 test: deps ## install what is missing, build, and run every test, those in headless Calc too
 	@echo "Building"
