@@ -20,7 +20,7 @@ double gas_log_ratio(double a, double b)
     return ratio > 0.5 && ratio < 2 ? log1p((b - a) / a) : log(ratio);
 }
 
-/* ---- T^exponent ------------------------------------------------------------------------------------------------ */
+/* ---- T^exponent ------------------------------------------------------------------------------------------ */
 
 /* Integral of T^(m - 1): (T2^m - T1^m)/m, which is the logarithm at m = 0. */
 static double power_integral(double m, const struct step *step)
@@ -30,7 +30,7 @@ static double power_integral(double m, const struct step *step)
     return pow(step->T1, m) * expm1(m * step->log_ratio) / m;
 }
 
-/* ---- (x/sinh x)^2 and (x/cosh x)^2, x = scale/T ------------------------------------------------------------------ */
+/* ---- (x/sinh x)^2 and (x/cosh x)^2, x = scale/T ---------------------------------------------------------- */
 
 /*
  * With side = +1 for sinh and -1 for cosh, G(x) = 1 - side e^(-2x) is 2 e^(-x) sinh x or 2 e^(-x) cosh x: nothing
@@ -74,8 +74,7 @@ static struct integrals hyperbolic_integrals(int side, double scale, const struc
     return (struct integrals){2 * scale * q * E / G1, 2 * q * bracket + side * log1p(side * q * E)};
 }
 
-/* ---- y^k, y = T/(T + scale) ----------------------------------------------------------------------------------------
- */
+/* ---- y^k, y = T/(T + scale) ------------------------------------------------------------------------------ */
 
 static double ratio_cp(double scale, double k, double T)
 {
@@ -135,8 +134,7 @@ static struct integrals ratio_integrals(double scale, double exponent, const str
     return (struct integrals){I, J};
 }
 
-/* ---- the sum of the terms ------------------------------------------------------------------------------------------
- */
+/* ---- the sum of the terms -------------------------------------------------------------------------------- */
 
 static double term_cp(const struct gas_term *term, double T)
 {

@@ -88,7 +88,7 @@ static const struct {
              {2309.7, 2311}, {210, 213.7},  {410.3, 2700}, {5900, 203}};
 enum { SPANS = sizeof spans / sizeof spans[0] };
 
-/* ---- the second method ---------------------------------------------------------------------------------------- */
+/* ---- the second method ----------------------------------------------------------------------------------- */
 
 static long double term_by_hand(const struct gas_term *term, long double T)
 {
@@ -146,7 +146,7 @@ static double quadrature(const struct gas *gas, double T1, double T2, bool over_
     return T1 < T2 ? sum : -sum;
 }
 
-/* ---- rows ------------------------------------------------------------------------------------------------------- */
+/* ---- rows ------------------------------------------------------------------------------------------------ */
 
 static const char *label(const struct row *row, const char *what, double T1, double T2)
 {
