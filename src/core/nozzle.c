@@ -71,6 +71,12 @@ static struct gas_result gamma_of(const struct gas *gas, double T, int argument,
     return k;
 }
 
+/* Figures so far out that the answer has no number. */
+static struct gas_result if_finite(double value)
+{
+    return isfinite(value) ? gas_good(value) : gas_bad(GAS_NOT_FINITE, 0, NAN);
+}
+
 struct gas_result gas_nozzle_flow(const struct gas *gas, double P, double T, double P_down, double area,
                                   double coefficient)
 {
@@ -83,7 +89,7 @@ struct gas_result gas_nozzle_flow(const struct gas *gas, double P, double T, dou
     struct gas_result k = checked.status ? checked : gamma_of(gas, T, 3, 1);
     if (k.status)
         return k;
-    return gas_good(coefficient * area * P / sqrt(gas->molar_mass * gas->R * T) * flow_function(k.value, P_down / P));
+    return if_finite(coefficient * area * P / sqrt(gas->molar_mass * gas->R * T) * flow_function(k.value, P_down / P));
 }
 
 /* ---- the time a vessel takes --------------------------------------------------------------------------------- */
@@ -159,5 +165,5 @@ struct gas_result gas_vent_time(const struct gas *gas, const struct gas_vessel *
     double time = choked_time(k, adiabatic, P1, P1, turn);
     if (turn > P2)
         time += tail_time(k, adiabatic, P1, P_down, turn, P2);
-    return gas_good(time * vessel->V / (coefficient * area * sqrt(gas->R * vessel->T1 / gas->molar_mass)));
+    return if_finite(time * vessel->V / (coefficient * area * sqrt(gas->R * vessel->T1 / gas->molar_mass)));
 }

@@ -37,7 +37,7 @@ struct gas_result wall_follow(const struct wall_course *course, struct wall_end 
     for (int step = 1; step <= STEPS; step++) {
         /* short steps first: the gas leaves its start quickly */
         double to = step == STEPS ? course->s2 : course->s1 + span * step * step / (STEPS * STEPS);
-        double h = to - from, rate[STAGES], at_end = level;
+        double h = to - from, rate[STAGES] = {0}, at_end = level;
         for (int i = 0; i < STAGES; i++) {
             struct stage_equation at = {course, from + node[i] * h, h * G * course->pull, level};
             for (int j = 0; j < i; j++)
