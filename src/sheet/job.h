@@ -109,8 +109,4 @@ double gas_job_from_molar(const struct gas_job *job, enum gas_dimension molar, d
 /* gas_dimension_extent - VOLUME, AMOUNT, MASS, ENERGY, ENTROPY: TOTAL; their flows: FLOW; else NONE. */
 enum gas_extent gas_dimension_extent(enum gas_dimension dimension);
 
-enum { GAS_NAME_TEXT = 40 };
-/* gas_quantity_name - "P1", "T", "P line": symbol and state as a sentence names them. Returns buffer. */
-const char *gas_quantity_name(char buffer[GAS_NAME_TEXT], enum gas_symbol symbol, int state);
-
 #endif
