@@ -1,0 +1,275 @@
+#include "sheet/job.h"
+
+#include <math.h>
+#include <string.h>
+
+/* -- totals and flows ---------------------------------------------------------------------------------------------- */
+
+/* clang-format off */
+static const struct {
+    enum gas_dimension total, flow, molar; /* molar: per mole of the same thing */
+} extents[] = {
+    {GAS_DIM_VOLUME,  GAS_DIM_VOLUME_FLOW,  GAS_DIM_MOLAR_VOLUME},
+    {GAS_DIM_AMOUNT,  GAS_DIM_AMOUNT_FLOW,  GAS_DIM_NUMBER},
+    {GAS_DIM_MASS,    GAS_DIM_MASS_FLOW,    GAS_DIM_MOLAR_MASS},
+    {GAS_DIM_ENERGY,  GAS_DIM_POWER,        GAS_DIM_MOLAR_ENERGY},
+    {GAS_DIM_ENTROPY, GAS_DIM_ENTROPY_FLOW, GAS_DIM_MOLAR_ENTROPY},
+};
+static const struct {
+    enum gas_dimension molar, specific;
+} specifics[] = {
+    {GAS_DIM_MOLAR_VOLUME,  GAS_DIM_SPECIFIC_VOLUME},
+    {GAS_DIM_MOLAR_ENERGY,  GAS_DIM_SPECIFIC_ENERGY},
+    {GAS_DIM_MOLAR_ENTROPY, GAS_DIM_SPECIFIC_ENTROPY},
+};
+/* clang-format on */
+enum { EXTENTS = sizeof extents / sizeof *extents, SPECIFICS = sizeof specifics / sizeof *specifics };
+
+enum gas_extent gas_dimension_extent(enum gas_dimension dimension)
+{
+    for (size_t i = 0; i < EXTENTS; i++) {
+        if (extents[i].total == dimension)
+            return GAS_EXTENT_TOTAL;
+        if (extents[i].flow == dimension)
+            return GAS_EXTENT_FLOW;
+    }
+    return GAS_EXTENT_NONE;
+}
+
+double gas_job_from_molar(const struct gas_job *job, enum gas_dimension molar, double figure, double n,
+                          enum gas_dimension dimension)
+{
+    if (dimension == molar)
+        return figure;
+    for (size_t i = 0; i < SPECIFICS; i++)
+        if (specifics[i].molar == molar && specifics[i].specific == dimension)
+            return figure / job->gas.molar_mass;
+    for (size_t i = 0; i < EXTENTS; i++)
+        if (extents[i].total == dimension || extents[i].flow == dimension) {
+            if (extents[i].molar == molar)
+                return figure * n;
+            return molar == GAS_DIM_NUMBER && extents[i].molar == GAS_DIM_MOLAR_MASS ? figure * n * job->gas.molar_mass
+                                                                                     : NAN;
+        }
+    return NAN;
+}
+
+/* A conductance is in W/K too, but no flow of anything. */
+static enum gas_extent heading_extent(const struct gas_heading *heading)
+{
+    return heading->symbol == GAS_SYM_UA ? GAS_EXTENT_NONE : gas_dimension_extent(heading->unit.dimension);
+}
+
+static bool refuse_mixed(struct gas_refusal *refusal, const struct gas_heading *first, const struct gas_heading *second,
+                         enum gas_extent second_extent)
+{
+    char a[80], b[80];
+    gas_quoted(a, sizeof a, first->text, strlen(first->text));
+    gas_quoted(b, sizeof b, second->text, strlen(second->text));
+    bool flow = second_extent == GAS_EXTENT_FLOW;
+    return gas_refuse(refusal, "given", "%s is %s but %s is not; give both per time or both as totals.", flow ? b : a,
+                      gas_dimension_words((flow ? second : first)->unit.dimension), flow ? a : b);
+}
+
+static bool extent_of_givens(struct gas_job *job, struct gas_refusal *refusal)
+{
+    const struct gas_heading *first = NULL;
+    job->extent = GAS_EXTENT_NONE;
+    for (size_t i = 0; i < job->table.columns; i++) {
+        const struct gas_heading *heading = &job->table.heading[i];
+        enum gas_extent extent = heading_extent(heading);
+        if (extent == GAS_EXTENT_NONE)
+            continue;
+        if (first && extent != job->extent && !job->task->mixed_extents)
+            return refuse_mixed(refusal, first, heading, extent);
+        if (!first)
+            job->extent = extent;
+        first = first ? first : heading;
+    }
+    return true;
+}
+
+static bool extent_of_wanted(const struct gas_job *job, struct gas_refusal *refusal)
+{
+    char shown[80];
+    for (size_t i = 0; i < job->wanted.columns && job->extent != GAS_EXTENT_NONE && !job->task->mixed_extents; i++) {
+        const struct gas_heading *heading = &job->wanted.heading[i];
+        enum gas_extent extent = heading_extent(heading);
+        gas_quoted(shown, sizeof shown, heading->text, strlen(heading->text));
+        if (extent == GAS_EXTENT_TOTAL && job->extent == GAS_EXTENT_FLOW)
+            return gas_refuse(refusal, "wanted", "%s is %s, but flows are given; ask for it per time, such as kg/h.",
+                              shown, gas_dimension_words(heading->unit.dimension));
+        if (extent == GAS_EXTENT_FLOW && job->extent == GAS_EXTENT_TOTAL)
+            return gas_refuse(refusal, "wanted",
+                              "%s is %s, but no flow is given; ask for the total, such as kg, or give a flow.", shown,
+                              gas_dimension_words(heading->unit.dimension));
+    }
+    return true;
+}
+
+/* -- a call -------------------------------------------------------------------------------------------------------- */
+
+bool gas_job_read(struct gas_job *job, const struct gas_job_arguments *arguments, struct gas_refusal *refusal)
+{
+    job->choice = NULL;
+    job->own = NULL;
+    job->extent = GAS_EXTENT_NONE;
+    if (!gas_options_read(arguments->options, &job->options, refusal))
+        return false;
+    job->choice = gas_choose(arguments->gas, refusal);
+    if (!job->choice)
+        return false;
+    job->gas = job->choice->gas;
+    return gas_table_read(arguments->given, arguments->headings, &job->options, &job->table, refusal) &&
+           gas_wanted_read(arguments->wanted, &job->options, &job->wanted, refusal);
+}
+
+bool gas_job_prepare(struct gas_job *job, struct gas_arena *arena, struct gas_refusal *refusal)
+{
+    return extent_of_givens(job, refusal) && extent_of_wanted(job, refusal) && job->task->prepare(job, arena, refusal);
+}
+
+bool gas_job_open(struct gas_job *job, const struct gas_job_arguments *arguments, struct gas_arena *arena,
+                  struct gas_refusal *refusal)
+{
+    return gas_job_read(job, arguments, refusal) && gas_job_prepare(job, arena, refusal);
+}
+
+void gas_job_close(struct gas_job *job)
+{
+    if (job->choice)
+        gas_choice_release(job->choice);
+    job->choice = NULL;
+}
+
+int gas_job_column(const struct gas_job *job, enum gas_symbol symbol, int state)
+{
+    for (size_t i = 0; i < job->table.columns; i++) {
+        const struct gas_heading *heading = &job->table.heading[i];
+        if (heading->symbol == symbol && heading->state == state && !heading->tolerance)
+            return (int)i;
+    }
+    return -1;
+}
+
+int gas_job_tolerance_column(const struct gas_job *job, enum gas_symbol symbol, int state)
+{
+    for (size_t i = 0; i < job->table.columns; i++) {
+        const struct gas_heading *heading = &job->table.heading[i];
+        if (heading->symbol == symbol && heading->state == state && heading->tolerance)
+            return (int)i;
+    }
+    return -1;
+}
+
+/* -- one case ------------------------------------------------------------------------------------------------------ */
+
+/* Work is into the gas inside; a heading or an option may count it out of the gas. */
+static double sign_of(const struct gas_job *job, const struct gas_heading *heading)
+{
+    if (heading->symbol != GAS_SYM_W && heading->symbol != GAS_SYM_W_NET)
+        return 1;
+    return heading->by_gas || (job->options.work_by_gas && !heading->on_gas) ? -1 : 1;
+}
+
+static double to_si(const struct gas_job *job, const struct gas_heading *heading, double figure)
+{
+    if (heading->tolerance)
+        return gas_unit_difference_to_si(&heading->unit, figure);
+    return sign_of(job, heading) * gas_unit_to_si(&heading->unit, figure, job->options.barometer);
+}
+
+bool gas_job_case(const struct gas_job *job, const struct gas_row *row, struct gas_case *figures,
+                  struct gas_refusal *refusal)
+{
+    char name[GAS_NAME_TEXT];
+    figures->row = row;
+    for (size_t i = 0; i < job->table.columns; i++) {
+        const struct gas_heading *heading = &job->table.heading[i];
+        figures->si[i] = NAN;
+        if (!(row->given >> i & 1))
+            continue;
+        double si = figures->si[i] = to_si(job, heading, row->figure[i]);
+        if (si > 0 && si <= 1e300) /* nothing to complain about: the usual case, without making any text */
+            continue;
+        gas_quantity_name(name, heading->symbol, heading->state);
+        if (heading->tolerance && !(si == 0))
+            return gas_refuse(refusal, name, "a plus-minus figure must be a number and not below zero.");
+        if (!heading->tolerance &&
+            !gas_accept_level(refusal, name, row->figure[i], &heading->unit, job->options.barometer))
+            return false;
+    }
+    return true;
+}
+
+double gas_job_shown(const struct gas_job *job, const struct gas_heading *heading, double si)
+{
+    if (heading->tolerance)
+        return gas_unit_difference_from_si(&heading->unit, si);
+    return gas_unit_from_si(&heading->unit, sign_of(job, heading) * si, job->options.barometer);
+}
+
+bool gas_job_run(const struct gas_job *job, const struct gas_row *row, double *answers, struct gas_refusal *refusal)
+{
+    struct gas_case figures;
+    if (!gas_job_case(job, row, &figures, refusal) || !job->task->run(job, &figures, answers, refusal))
+        return false;
+    for (size_t i = 0; i < job->wanted.columns; i++)
+        answers[i] = gas_job_shown(job, &job->wanted.heading[i], answers[i]);
+    return true;
+}
+
+/* -- every case ---------------------------------------------------------------------------------------------------- */
+
+static struct gas_cell *answer_cell(struct gas_call *call, bool across, size_t row, size_t column)
+{
+    return &call->answer.cell[across ? column * call->answer.columns + row : row * call->answer.columns + column];
+}
+
+/* One sentence, shared by the cells of the case. */
+static struct gas_cell failed_cell(const struct gas_job *job, struct gas_call *call, const struct gas_refusal *refusal)
+{
+    static const char no_memory[] = "Check the range: it is too large for the memory at hand; give fewer rows.";
+    if (job->options.hard_errors)
+        return (struct gas_cell){.kind = GAS_CELL_NOT_AVAILABLE};
+    size_t length = strlen(refusal->text);
+    const char *text = gas_arena_copy(call->arena, refusal->text, length);
+    return text ? (struct gas_cell){GAS_CELL_TEXT, 0, text, length}
+                : (struct gas_cell){GAS_CELL_TEXT, 0, no_memory, sizeof no_memory - 1};
+}
+
+static void answer_case(const struct gas_job *job, struct gas_call *call, bool across, size_t index)
+{
+    struct gas_row row;
+    struct gas_refusal refusal;
+    double answers[GAS_COLUMNS];
+    refusal.made = false;
+    bool read = gas_table_row(&job->table, index, &row, &refusal);
+    bool blank = read && row.given == 0;
+    bool good = read && !blank && gas_job_run(job, &row, answers, &refusal);
+    struct gas_cell other = {0};
+    if (blank)
+        other = (struct gas_cell){GAS_CELL_TEXT, 0, "", 0};
+    else if (!good)
+        other = failed_cell(job, call, &refusal);
+    for (size_t i = 0; i < job->wanted.columns; i++)
+        *answer_cell(call, across, index, i) = good ? gas_cell_number(answers[i]) : other;
+}
+
+void gas_job_answer(const struct gas_job *job, struct gas_call *call)
+{
+    size_t cases = job->table.rows, columns = job->wanted.columns;
+    bool across = job->table.across || (cases == 1 && job->wanted.down);
+    if (!gas_answer_block(call, across ? columns : cases, across ? cases : columns))
+        return;
+    for (size_t i = 0; i < cases; i++)
+        answer_case(job, call, across, i);
+}
+
+void gas_job_refused(struct gas_call *call, const struct gas_options *options, const struct gas_refusal *refusal)
+{
+    if (options && options->hard_errors && gas_answer_block(call, 1, 1))
+        gas_put_not_available(call, 0, 0);
+    else
+        gas_answer_text(call, refusal->text);
+}
