@@ -39,8 +39,8 @@ enum { CARD_KINDS = sizeof card_rows / sizeof *card_rows, CARD_ROWS = (GAS_STATE
 struct card {
     struct gas_job *job;
     struct gas_plan plan;
-    bool heat;              /* a heat capacity is known */
-    const char *time;       /* what stands below the line in a flow: "h" */
+    bool heat;        /* a heat capacity is known */
+    const char *time; /* what stands below the line in a flow: "h" */
     size_t rows;
     struct gas_heading row[CARD_ROWS];
 };

@@ -10,9 +10,9 @@ enum answer_kind { VARIABLE, UNCERTAINTY, CP, CV, GAMMA, MOLAR_MASS, CHANGE_U, C
 
 struct answer {
     enum answer_kind kind;
-    int state;                         /* of cp, cv, gamma; the last one of a change */
-    size_t need, T1, T2, P1, P2, n;    /* indices of needs; those that the kind uses */
-    bool total;                        /* of a change: multiplied by n */
+    int state;                      /* of cp, cv, gamma; the last one of a change */
+    size_t need, T1, T2, P1, P2, n; /* indices of needs; those that the kind uses */
+    bool total;                     /* of a change: multiplied by n */
 };
 
 struct solve {
@@ -56,10 +56,14 @@ static bool accept_givens(const struct gas_job *job, struct gas_refusal *refusal
                               "%s belongs to a process, not to a state; use PATH or WORK with a leg \"with %s = ...\".",
                               shown, gas_symbol_text(heading->symbol));
         if (heading->symbol == GAS_SYM_NONE)
-            return gas_refuse(refusal, "given", "%s does not say which quantity it is; write its symbol, such as \"H = "
-                                                "12 kJ\".", shown);
-        return gas_refuse(refusal, "given", "%s is not a quantity of a state; SOLVE takes P, T, V, n, m, v, rho, h, u, s, "
-                                            "H, U and S.", shown);
+            return gas_refuse(refusal, "given",
+                              "%s does not say which quantity it is; write its symbol, such as \"H = "
+                              "12 kJ\".",
+                              shown);
+        return gas_refuse(refusal, "given",
+                          "%s is not a quantity of a state; SOLVE takes P, T, V, n, m, v, rho, h, u, s, "
+                          "H, U and S.",
+                          shown);
     }
     return true;
 }
@@ -89,8 +93,10 @@ static bool want_change(struct solve *solve, const struct gas_job *job, struct a
     answer->kind = heading->symbol == GAS_SYM_DU ? CHANGE_U : heading->symbol == GAS_SYM_DH ? CHANGE_H : CHANGE_S;
     answer->state = last_state(job);
     if (answer->state < 2)
-        return gas_refuse(refusal, "wanted", "%s is a change from one state to another; number the givens, such as T1 "
-                                             "and T2.", gas_symbol_text(heading->symbol));
+        return gas_refuse(refusal, "wanted",
+                          "%s is a change from one state to another; number the givens, such as T1 "
+                          "and T2.",
+                          gas_symbol_text(heading->symbol));
     answer->T1 = need(solve, GAS_VAR_T, 1);
     answer->T2 = need(solve, GAS_VAR_T, answer->state);
     if (answer->kind == CHANGE_S) {
@@ -109,8 +115,10 @@ static bool refuse_wanted(const struct gas_heading *heading, struct gas_refusal 
     gas_quoted(shown, sizeof shown, heading->text, strlen(heading->text));
     switch (heading->symbol) {
     case GAS_SYM_NONE:
-        return gas_refuse(refusal, "wanted", "%s is the unit of several quantities; write which, such as \"H, kJ\" or "
-                                             "\"dU, kJ\".", shown);
+        return gas_refuse(refusal, "wanted",
+                          "%s is the unit of several quantities; write which, such as \"H, kJ\" or "
+                          "\"dU, kJ\".",
+                          shown);
     case GAS_SYM_W:
     case GAS_SYM_Q:
         return gas_refuse(refusal, "wanted", "%s depends on the process; use %s with legs.", shown,
@@ -118,8 +126,10 @@ static bool refuse_wanted(const struct gas_heading *heading, struct gas_refusal 
     case GAS_SYM_Z:
         return gas_refuse(refusal, "wanted", "SOLVE takes the gas as ideal; use GAS.Z for the compressibility factor.");
     default:
-        return gas_refuse(refusal, "wanted", "%s is not found by SOLVE; it finds P, T, V, n, m, v, rho, h, u, s, H, U, "
-                                             "S, cp, cv, gamma, M, dU, dH and dS.", shown);
+        return gas_refuse(refusal, "wanted",
+                          "%s is not found by SOLVE; it finds P, T, V, n, m, v, rho, h, u, s, H, U, "
+                          "S, cp, cv, gamma, M, dU, dH and dS.",
+                          shown);
     }
 }
 
@@ -133,7 +143,8 @@ static bool want(struct solve *solve, const struct gas_job *job, struct answer *
         return true;
     }
     if (heading->tolerance)
-        return gas_refuse(refusal, "wanted", "an uncertainty is found for P, T, V, n, m, v, rho, h, u, s, H, U and S only.");
+        return gas_refuse(refusal, "wanted",
+                          "an uncertainty is found for P, T, V, n, m, v, rho, h, u, s, H, U and S only.");
     switch (heading->symbol) {
     case GAS_SYM_CP:
     case GAS_SYM_CV:
@@ -193,9 +204,9 @@ static bool change(const struct gas_job *job, const struct answer *answer, const
                    const double *value, double *found, struct gas_refusal *refusal)
 {
     double T1 = value[answer->T1], T2 = value[answer->T2];
-    struct gas_result result =
-        answer->kind == CHANGE_U   ? gas_du(&job->gas, T1, T2)
-        : answer->kind == CHANGE_H ? gas_dh(&job->gas, T1, T2)
+    struct gas_result result = answer->kind == CHANGE_U ? gas_du(&job->gas, T1, T2)
+                               : answer->kind == CHANGE_H
+                                   ? gas_dh(&job->gas, T1, T2)
                                    : gas_ds(&job->gas, T1, value[answer->P1], T2, value[answer->P2]);
     if (result.status != GAS_OK) {
         struct gas_range range = gas_range_of(&job->gas);
@@ -203,13 +214,12 @@ static bool change(const struct gas_job *job, const struct answer *answer, const
         return refuse_heat(job, result, first ? 1 : answer->state, refusal);
     }
     enum gas_dimension molar = answer->kind == CHANGE_S ? GAS_DIM_MOLAR_ENTROPY : GAS_DIM_MOLAR_ENERGY;
-    *found = gas_job_from_molar(job, molar, result.value, answer->total ? value[answer->n] : NAN,
-                                heading->unit.dimension);
+    *found =
+        gas_job_from_molar(job, molar, result.value, answer->total ? value[answer->n] : NAN, heading->unit.dimension);
     return true;
 }
 
-static bool run(const struct gas_job *job, const struct gas_case *figures, double *answers,
-                struct gas_refusal *refusal)
+static bool run(const struct gas_job *job, const struct gas_case *figures, double *answers, struct gas_refusal *refusal)
 {
     const struct solve *solve = job->own;
     double value[GAS_NEEDS];
