@@ -16,6 +16,8 @@ TEST_PACKAGES  := libcunit1-dev libgsl-dev units unzip
 DEMO_PACKAGES  := poppler-utils fonts-dejavu-core
 LINT_PACKAGES  := clang-format clang-tidy cppcheck valgrind
 
+JOBS ?= $(shell nproc)
+
 WARN     := -std=c11 -Wall -Wextra -Wconversion -Wshadow -pedantic -Werror
 CPPFLAGS += -D_GNU_SOURCE -Iinclude -Isrc -DGASLEAF_VERSION='"$(VERSION)"'
 COMPILE   = $(CC) $(WARN) $(CPPFLAGS) $(CFLAGS) -fPIC -fvisibility=hidden -MMD -MP
@@ -145,8 +147,8 @@ C_FILES = $(shell git ls-files '*.c' '*.h')
 lint: ## layout, clang-tidy, cppcheck: silent when all is well
 	@tools/deps.sh $(LINT_PACKAGES)
 	@clang-format --dry-run -Werror $(C_FILES)
-	@clang-tidy --quiet $(filter %.c,$(C_FILES)) -- -std=c11 $(CPPFLAGS) -Itests/support -Itests -isystem $(SDK)/include \
-	  2>&1 | grep -vE '^[0-9]+ warnings? (generated|treated)|^Suppressed|^Use -' || true
+	@printf '%s\n' $(filter %.c,$(C_FILES)) | xargs -P $(JOBS) -I{} clang-tidy --quiet {} -- \
+	  -std=c11 $(CPPFLAGS) -Itests/support -Itests -isystem $(SDK)/include 2>/dev/null
 	@cppcheck --quiet --error-exitcode=1 --std=c11 --inline-suppr --enable=warning,performance,portability \
 	  -Iinclude -Isrc -Itests/support -DGASLEAF_VERSION='""' -DUNX -DLINUX $(filter %.c,$(C_FILES))
 

@@ -116,6 +116,11 @@ static struct gas_block single(struct gas_arena *arena, struct gas_cell cell)
     return (struct gas_block){1, 1, copy, false};
 }
 
+void addin_read_message(const char *text, struct gas_arena *arena, struct gas_block *block)
+{
+    *block = single(arena, addin_message(text));
+}
+
 static void read_row(struct reader *reader, const uno_Sequence *row, typelib_TypeClass kind, struct gas_cell *cell)
 {
     const char *element = row->elements;
@@ -134,6 +139,7 @@ static void read_row(struct reader *reader, const uno_Sequence *row, typelib_Typ
 struct rows {
     size_t count, columns;
     const uno_Sequence *sequence;
+    bool plain;
     typelib_TypeClass kind;     /* of the outer elements */
     typelib_TypeClass row_kind; /* of a row's elements when the outer ones are sequences */
 };
@@ -150,22 +156,21 @@ static const uno_Sequence *row_at(const struct rows *rows, size_t i, typelib_Typ
     return *(uno_Sequence *const *)any->pData;
 }
 
-static bool measure(struct rows *rows)
+/* One row that is none, and all are plain values of a single row. */
+static void measure(struct rows *rows)
 {
     typelib_TypeClass kind;
     rows->count = (size_t)rows->sequence->nElements;
-    rows->columns = 0;
     for (size_t i = 0; i < rows->count; i++) {
         const uno_Sequence *row = row_at(rows, i, &kind);
-        if (!row) { /* plain values: one row */
+        if (!row) {
+            rows->plain = true;
             rows->columns = rows->count;
             rows->count = 1;
-            return false;
-        }
-        if ((size_t)row->nElements > rows->columns)
+        } else if ((size_t)row->nElements > rows->columns) {
             rows->columns = (size_t)row->nElements;
+        }
     }
-    return true;
 }
 
 static bool usable(typelib_TypeClass kind)
@@ -173,31 +178,45 @@ static bool usable(typelib_TypeClass kind)
     return element_size(kind) > 0 && kind != typelib_TypeClass_SEQUENCE;
 }
 
-static void read_rows(struct reader *reader, uno_Type *type, const uno_Sequence *sequence, struct gas_block *block)
+static struct gas_cell *take_cells(const struct rows *rows, struct gas_arena *arena)
 {
+    if (rows->columns && rows->count > SIZE_MAX / sizeof(struct gas_cell) / rows->columns)
+        return NULL;
+    return gas_arena_take(arena, rows->count * rows->columns, sizeof(struct gas_cell));
+}
+
+static void fill_row(struct reader *reader, const struct rows *rows, size_t i, struct gas_cell *cell)
+{
+    typelib_TypeClass kind;
+    const uno_Sequence *row = rows->plain ? rows->sequence : row_at(rows, i, &kind);
+    if (rows->plain)
+        kind = rows->kind;
+    bool good = usable(kind);
+    size_t length = good ? (size_t)row->nElements : 0;
+    if (length)
+        read_row(reader, row, kind, cell);
+    const struct gas_cell blank = {0}, filler = good ? blank : addin_message(BAD_VALUE);
+    for (; length < rows->columns; length++)
+        cell[length] = filler;
+}
+
+void addin_read_rows(uno_Type *type, const uno_Sequence *sequence, struct gas_arena *arena, struct gas_block *block)
+{
+    struct reader reader = {.arena = arena};
     struct rows rows = {.sequence = sequence, .kind = element_kind(type)};
     if (rows.kind == typelib_TypeClass_SEQUENCE) {
         uno_Type *row = row_type(type);
         rows.row_kind = row ? element_kind(row) : typelib_TypeClass_UNKNOWN;
     }
-    bool nested = measure(&rows);
-    size_t count = rows.count * rows.columns;
-    struct gas_cell *cells = NULL;
-    if (count == 0 || (rows.columns <= SIZE_MAX / sizeof *cells / rows.count &&
-                       (cells = gas_arena_take(reader->arena, count, sizeof *cells)) != NULL))
-        *block = (struct gas_block){rows.columns ? rows.count : 0, rows.columns, cells, true};
-    else
-        *block = single(reader->arena, addin_message(NO_MEMORY));
-    for (size_t i = 0; cells && i < rows.count; i++) {
-        typelib_TypeClass kind = rows.kind;
-        const uno_Sequence *row = nested ? row_at(&rows, i, &kind) : sequence;
-        size_t length = usable(kind) ? (size_t)row->nElements : 0;
-        struct gas_cell *cell = cells + i * rows.columns;
-        if (length)
-            read_row(reader, row, kind, cell);
-        for (; length < rows.columns; length++)
-            cell[length] = usable(kind) ? (struct gas_cell){0} : addin_message(BAD_VALUE);
+    measure(&rows);
+    struct gas_cell *cells = take_cells(&rows, arena);
+    if (!cells) {
+        *block = single(arena, addin_message(NO_MEMORY));
+        return;
     }
+    *block = (struct gas_block){rows.columns ? rows.count : 0, rows.columns, cells, true};
+    for (size_t i = 0; i < rows.count && rows.columns; i++)
+        fill_row(&reader, &rows, i, cells + i * rows.columns);
 }
 
 void addin_read(const uno_Any *value, struct gas_arena *arena, struct gas_block *block)
@@ -207,60 +226,9 @@ void addin_read(const uno_Any *value, struct gas_arena *arena, struct gas_block 
     if (kind == typelib_TypeClass_VOID)
         *block = (struct gas_block){0};
     else if (kind == typelib_TypeClass_SEQUENCE)
-        read_rows(&reader, value->pType, *(uno_Sequence *const *)value->pData, block);
+        addin_read_rows(value->pType, *(uno_Sequence *const *)value->pData, arena, block);
     else if (kind == typelib_TypeClass_INTERFACE)
         addin_read_live(*(uno_Interface *const *)value->pData, arena, block);
     else
         *block = single(arena, read_value(&reader, kind, value->pData));
-}
-
-/* One call out. True when it answered without an exception; result is constructed then. */
-static bool call_out(uno_Interface *object, const char *member, void *result, void **arguments)
-{
-    rtl_uString *name = NULL;
-    typelib_TypeDescription *description = NULL;
-    uno_Any exception, *raised = &exception;
-    rtl_uString_newFromAscii(&name, member);
-    typelib_typedescription_getByName(&description, name);
-    rtl_uString_release(name);
-    if (!description)
-        return false;
-    object->pDispatcher(object, description, result, arguments, &raised);
-    if (raised)
-        uno_any_destruct(raised, NULL);
-    typelib_typedescription_release(description);
-    return !raised;
-}
-
-static bool live_cells(uno_Interface *range, uno_Sequence **cells)
-{
-    uno_Any answer;
-    uno_Type *wanted = addin_type.cell_range_data;
-    if (!range || !call_out(range, "com.sun.star.uno.XInterface::queryInterface", &answer, (void *[]){&wanted}))
-        return false;
-    bool known =
-        answer.pType->eTypeClass == typelib_TypeClass_INTERFACE &&
-        call_out(*(uno_Interface **)answer.pData, "com.sun.star.sheet.XCellRangeData::getDataArray", cells, NULL);
-    uno_any_destruct(&answer, NULL);
-    return known;
-}
-
-static void mark_host_errors(struct gas_block *block)
-{
-    for (size_t i = 0; i < block->rows * block->columns; i++)
-        if (block->cell[i].kind == GAS_CELL_EMPTY)
-            block->cell[i].kind = GAS_CELL_HOST_ERROR;
-}
-
-void addin_read_live(uno_Interface *range, struct gas_arena *arena, struct gas_block *block)
-{
-    uno_Sequence *cells = NULL;
-    if (!live_cells(range, &cells)) {
-        *block = single(arena, addin_message("Check range: its cells cannot be read; give a range of cells."));
-        return;
-    }
-    struct reader reader = {.arena = arena};
-    read_rows(&reader, addin_type.any_rows, cells, block);
-    mark_host_errors(block);
-    uno_type_destructData(&cells, addin_type.any_rows, NULL);
 }

@@ -1,7 +1,6 @@
 #include "office.h"
 
 #include <dlfcn.h>
-#include <stdint.h>
 #include <stdio.h>
 #include <stdlib.h>
 #include <string.h>
@@ -122,8 +121,8 @@ void office_rows(uno_Any *to, sal_Int32 rows, sal_Int32 columns)
 uno_Any *office_at(const uno_Any *rows, sal_Int32 row, sal_Int32 column)
 {
     const uno_Sequence *outer = *(uno_Sequence **)rows->pData;
-    const uno_Sequence *inner = ((uno_Sequence *const *)(const void *)outer->elements)[row];
-    return (uno_Any *)(uintptr_t)inner->elements + column;
+    uno_Sequence *inner = ((uno_Sequence *const *)(const void *)outer->elements)[row];
+    return (uno_Any *)(void *)inner->elements + column;
 }
 
 void office_put_real(uno_Any *at, double number)
