@@ -71,13 +71,15 @@ static size_t count_arguments(const struct gas_function *function, void **argume
     return count;
 }
 
-static void read_arguments(const struct gas_function *function, void **arguments, struct gas_arena *arena,
-                           struct gas_block *to)
+/* The argument that cannot be read, as a sentence; NULL when all were read. */
+static const struct gas_block *read_arguments(const struct gas_function *function, void **arguments,
+                                              struct gas_arena *arena, struct gas_block *to)
 {
     for (size_t i = 0; i < gas_parameter_count(function); i++)
         switch (function->parameter[i].kind) {
         case GAS_PARAMETER_LIVE:
-            addin_read_live(*(uno_Interface **)arguments[i], arena, &to[i]);
+            if (!addin_read_live(*(uno_Interface **)arguments[i], arena, &to[i]))
+                return &to[i];
             break;
         case GAS_PARAMETER_REST:
             read_rest(*(uno_Sequence **)arguments[i], arena, &to[i]);
@@ -85,19 +87,21 @@ static void read_arguments(const struct gas_function *function, void **arguments
         default:
             addin_read(arguments[i], arena, &to[i]);
         }
+    return NULL;
 }
 
 static void call(const struct gas_function *function, struct gas_arena *arena, uno_Any *result, void **arguments)
 {
     struct gas_cell sorry = addin_message("Check the arguments: they are too many for the memory at hand; give fewer.");
-    struct gas_call call = {.count = count_arguments(function, arguments), .arena = arena};
+    struct gas_call call = {
+        .count = count_arguments(function, arguments), .arena = arena, .answer = {1, 1, &sorry, false}};
     struct gas_block *blocks = gas_arena_take(arena, call.count + 1, sizeof *blocks);
-    if (blocks) {
-        read_arguments(function, arguments, arena, blocks);
+    const struct gas_block *unread = blocks ? read_arguments(function, arguments, arena, blocks) : NULL;
+    if (unread) {
+        call.answer = *unread;
+    } else if (blocks) {
         call.argument = blocks;
         gas_function_call(function, &call);
-    } else {
-        call.answer = (struct gas_block){1, 1, &sorry, false};
     }
     addin_write(&call.answer, result);
 }

@@ -39,14 +39,15 @@ static void mark_host_errors(struct gas_block *block)
             block->cell[i].kind = GAS_CELL_HOST_ERROR;
 }
 
-void addin_read_live(uno_Interface *range, struct gas_arena *arena, struct gas_block *block)
+bool addin_read_live(uno_Interface *range, struct gas_arena *arena, struct gas_block *block)
 {
     uno_Sequence *cells = NULL;
     if (!live_cells(range, &cells)) {
         addin_read_message("Check range: its cells cannot be read; give a range of cells.", arena, block);
-        return;
+        return false;
     }
     addin_read_rows(addin_type.any_rows, cells, arena, block);
     mark_host_errors(block);
     uno_type_destructData(&cells, addin_type.any_rows, NULL);
+    return true;
 }

@@ -13,8 +13,9 @@
 /* addin_read - a value of any type; void is an omitted argument. */
 void addin_read(const uno_Any *value, struct gas_arena *arena, struct gas_block *block);
 
-/* addin_read_live - the cells of a live range: an error of the office is GAS_CELL_HOST_ERROR, an empty cell "". */
-void addin_read_live(uno_Interface *range, struct gas_arena *arena, struct gas_block *block);
+/* addin_read_live - the cells of a live range: an error of the office is GAS_CELL_HOST_ERROR, an empty cell "". False
+ * and a block of one sentence when the cells cannot be had. */
+bool addin_read_live(uno_Interface *range, struct gas_arena *arena, struct gas_block *block);
 
 /* addin_read_rows - a sequence of a type: of sequences, of anys that hold sequences, or of plain values (one row). */
 void addin_read_rows(uno_Type *type, const uno_Sequence *sequence, struct gas_arena *arena, struct gas_block *block);

@@ -19,9 +19,10 @@ static void write_escaped(FILE *out, const char *text)
         }
 }
 
-static void write_property(FILE *out, int indent, const char *name, const char *text)
+static void write_property(FILE *out, int indent, const char *name, const char *start, const char *text)
 {
     fprintf(out, "%*s<prop oor:name=\"%s\"><value xml:lang=\"en\">", indent, "", name);
+    fputs(start, out);
     write_escaped(out, text);
     fputs("</value></prop>\n", out);
 }
@@ -31,17 +32,21 @@ static void write_parameter(FILE *out, const struct gas_parameter *parameter)
     fputs("      <node oor:name=\"", out);
     gas_idl_name(out, parameter->name);
     fputs("\" oor:op=\"replace\">\n", out);
-    write_property(out, 7, "DisplayName", parameter->name);
-    write_property(out, 7, "Description", parameter->help);
+    write_property(out, 7, "DisplayName", "", parameter->name);
+    /* The office calls every argument of any type optional: the text says which ones are not. */
+    if (!parameter->optional && parameter->kind == GAS_PARAMETER_ANY)
+        write_property(out, 7, "Description", "Required. ", parameter->help);
+    else
+        write_property(out, 7, "Description", "", parameter->help);
     fputs("      </node>\n", out);
 }
 
 static void write_function(FILE *out, const struct gas_function *function)
 {
     fprintf(out, "    <node oor:name=\"%s\" oor:op=\"replace\">\n", function->method);
-    write_property(out, 5, "DisplayName", function->sheet_name);
-    write_property(out, 5, "CompatibilityName", function->sheet_name);
-    write_property(out, 5, "Description", function->help);
+    write_property(out, 5, "DisplayName", "", function->sheet_name);
+    write_property(out, 5, "CompatibilityName", "", function->sheet_name);
+    write_property(out, 5, "Description", "", function->help);
     fputs("     <prop oor:name=\"Category\"><value>Add-In</value></prop>\n     <node oor:name=\"Parameters\">\n", out);
     for (size_t i = 0; i < gas_parameter_count(function); i++)
         write_parameter(out, &function->parameter[i]);

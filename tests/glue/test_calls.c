@@ -223,6 +223,34 @@ static void borrowed(void)
     office_clear(&number);
 }
 
+/* Sequences as other clients send them: of rows of numbers, of anys that hold rows, of plain values. */
+static void other_sequences(void)
+{
+    uno_Type *reals = NULL, *real_rows = NULL;
+    typelib_static_sequence_type_init(&reals, office_type.real);
+    typelib_static_sequence_type_init(&real_rows, reals);
+    const double figures[] = {4.25, 8};
+    uno_Sequence *row = NULL, *rows = NULL, *outer = NULL;
+    uno_Any any[3], text, answer;
+    office_text(&text, "label");
+    uno_type_sequence_construct(&row, reals, (void *)figures, 1, NULL);
+    uno_type_sequence_construct(&rows, real_rows, &row, 1, NULL);
+    uno_type_any_construct(&any[0], &rows, real_rows, NULL);
+    uno_type_any_construct(&any[1], &row, reals, NULL);
+    uno_type_sequence_construct(&outer, office_type.anys, &any[1], 1, NULL);
+    uno_type_any_construct(&any[2], &outer, office_type.anys, NULL);
+    for (int i = 0; i < 3; i++) {
+        given(&answer, &text, &any[i], NULL, 0);
+        check_close("one figure in rows, in a row, in an any in a row", real_at(&answer, 0, 1), 4.25, 0, 0);
+        office_clear(&answer);
+        office_clear(&any[i]);
+    }
+    uno_type_destructData(&row, reals, NULL);
+    uno_type_destructData(&rows, real_rows, NULL);
+    uno_type_destructData(&outer, office_type.anys, NULL);
+    office_clear(&text);
+}
+
 static void no_arguments(void)
 {
     uno_Interface *functions = office_open();
@@ -243,5 +271,6 @@ const struct test_suite suite_calls = {"calls", (const struct test_case[]){{"pai
                                                                            {"ranges", ranges},
                                                                            {"many arguments", many_arguments},
                                                                            {"borrowed", borrowed},
+                                                                           {"other sequences", other_sequences},
                                                                            {"no arguments", no_arguments},
                                                                            {0}}};
