@@ -109,6 +109,11 @@ struct gas_heading_fault {
  *
  *   Returned   true and *heading, or false and *fault
  *   Notes      V and v, n and N, m and M are told apart by unit first, by case second. Cached, bounded.
+ *              An energy or a power alone ("kJ", "kW") has symbol NONE: it may be work, heat or more; so has "%".
+ *              "V, Nm3" is an amount: symbol N. "n [-]" is the exponent, a bare "n" the amount. "m3" and "MW" are
+ *              units; "m2" is the mass at state 2. "T in K" names the unit, "T in, K" the inlet. A basis in words
+ *              ("Gauge pressure, bar") becomes the basis of the unit, whose text then shows it: "bar(g)".
+ *   Check      tests/units/test_heading.c
  */
 bool gas_heading_parse(const char *text, size_t length, const struct gas_references *references,
                        struct gas_heading *heading, struct gas_heading_fault *fault);
@@ -117,6 +122,8 @@ bool gas_heading_parse(const char *text, size_t length, const struct gas_referen
  * gas_given_parse - one item of a typed text: "P1 = 1 bar", "7 bar(g)", "V = 2 m3", "T1: 25 degC".
  *   Returned   true, *heading and *figure (in heading->unit)
  *   Notes      Also accepts a heading with its unit on the left: "P1, bar = 3". A bare figure with a symbol is SI.
+ *              heading->text is that of a column for the figure: "P1, bar" for "P1 = 1 bar", "bar(g)" for "7 bar(g)".
+ *   Check      tests/units/test_given.c
  */
 bool gas_given_parse(const char *text, size_t length, const struct gas_references *references,
                      struct gas_heading *heading, double *figure, struct gas_heading_fault *fault);

@@ -100,7 +100,10 @@ struct gas_unit_fault {
  *              references     meaning of Nm3, Sm3, scf; NULL: the defaults
  *   Returned   true and *unit, or false and *fault
  *   Notes      Everything after the first slash is below the line; cal is thermochemical, Btu is IT. Thread-safe;
- *              results are cached, bounded.
+ *              results are cached, bounded. A temperature alone is a level, in a compound a difference. "kg/cm2" and
+ *              "lb/in2" are forces on areas. An energy per Nm3 is an energy per mole, kg/Nm3 a molar mass.
+ *   Source     factors: NIST Special Publication 811, 2008 edition, Appendix B; see src/units/trade_units.c
+ *   Check      tests/units/test_unit.c: every row against GNU units
  */
 bool gas_unit_parse(const char *text, size_t length, const struct gas_references *references, struct gas_unit *unit,
                     struct gas_unit_fault *fault);

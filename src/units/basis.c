@@ -48,7 +48,7 @@ static size_t stem_length(const char *plain, size_t length, const struct mark *m
 static bool parse_plain(const char *plain, const struct gas_references *references, struct gas_unit *unit,
                         struct gas_unit_fault *fault)
 {
-    struct unit_product product;
+    struct unit_product product = {.number = 1.0};
     return gas_product_parse(plain, &product, fault) && gas_engine_resolve(&product, references, unit, fault);
 }
 

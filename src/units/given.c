@@ -104,6 +104,8 @@ bool gas_given_parse(const char *text, size_t length, const struct gas_reference
     size_t used;
     struct gas_unit unit;
     struct gas_unit_fault unit_fault;
+    struct gas_heading_fault ignored = {.status = GAS_HEADING_OK};
+    fault = fault ? fault : &ignored;
     while (length > 0 && gas_is_space(text[0]))
         text++, length--;
     while (length > 0 && gas_is_space(text[length - 1]))

@@ -365,7 +365,7 @@ bool gas_heading_parse(const char *text, size_t length, const struct gas_referen
                        struct gas_heading *heading, struct gas_heading_fault *fault)
 {
     struct outcome out;
-    struct gas_heading_fault ignored;
+    struct gas_heading_fault ignored = {.status = GAS_HEADING_OK};
     const struct gas_references *used = references ? references : &gas_references_default;
     struct piece piece = piece_of(text, length);
     fault = fault ? fault : &ignored;

@@ -1,4 +1,5 @@
 /* A word or a phrase -> a row of the table of trade units, with its prefix. */
+#include <pthread.h>
 #include <stdio.h>
 #include <string.h>
 
@@ -14,33 +15,44 @@ struct hits {
     int count;
 };
 
-struct name_cursor {
-    const char *next;
-    char text[NAME_TEXT];
+struct listed { /* one name of the table; the texts stay where they are */
+    const struct trade_unit *unit;
+    const char *text;
     size_t length;
     bool word; /* after the semicolon */
 };
 
-static struct name_cursor names_of(const struct trade_unit *unit)
+enum { LISTED_MOST = 1024 };
+
+static struct {
+    pthread_once_t once;
+    size_t count;
+    struct listed name[LISTED_MOST];
+} list = {.once = PTHREAD_ONCE_INIT};
+
+static void list_row(const struct trade_unit *unit)
 {
-    struct name_cursor cursor = {.next = unit->names};
-    return cursor;
+    bool word = false;
+    for (const char *p = unit->names; *p && list.count < LISTED_MOST;) {
+        size_t length = strcspn(p, ",;");
+        if (length > 0 && length < NAME_TEXT)
+            list.name[list.count++] = (struct listed){unit, p, length, word};
+        p += length;
+        word |= *p == ';';
+        p += *p != '\0';
+    }
 }
 
-static bool next_name(struct name_cursor *cursor)
+static void make_list(void)
 {
-    while (*cursor->next == ';' || *cursor->next == ',') {
-        cursor->word |= *cursor->next == ';';
-        cursor->next++;
-    }
-    size_t length = strcspn(cursor->next, ",;");
-    if (length == 0 || length >= NAME_TEXT)
-        return false;
-    memcpy(cursor->text, cursor->next, length);
-    cursor->text[length] = '\0';
-    cursor->length = length;
-    cursor->next += length;
-    return true;
+    for (size_t i = 0; i < gas_trade_unit_count; i++)
+        list_row(&gas_trade_units[i]);
+}
+
+static size_t listed_names(void)
+{
+    pthread_once(&list.once, make_list);
+    return list.count;
 }
 
 static void add_hit(struct hits *hits, const struct trade_unit *unit, const struct unit_prefix *prefix)
@@ -72,61 +84,57 @@ static bool prefix_fits(const struct unit_prefix *prefix, const char *word, enum
     return gas_lower(word[0]) == gas_lower(sign) && (gas_lower(sign) != 'm' || one_case(word));
 }
 
-static bool symbol_fits(const struct name_cursor *name, const char *word, enum pass pass)
+static bool symbol_fits(const struct listed *name, const char *word, enum pass pass)
 {
-    if (strlen(word) != name->length)
-        return false;
     return pass == PASS_SYMBOL ? memcmp(word, name->text, name->length) == 0
                                : gas_same_folded(word, name->text, name->length);
 }
 
-static void try_symbol(struct hits *hits, const struct trade_unit *unit, const struct name_cursor *name,
-                       const char *word, enum pass pass)
+static void try_symbol(struct hits *hits, const struct listed *name, const char *word, size_t length, enum pass pass)
 {
-    if (symbol_fits(name, word, pass))
-        add_hit(hits, unit, NULL);
-    for (size_t i = 0; i < gas_unit_prefix_count && word[0]; i++) {
+    if (length == name->length && symbol_fits(name, word, pass))
+        add_hit(hits, name->unit, NULL);
+    if (length != name->length + 1 || !name->unit->prefixes[0] || !symbol_fits(name, word + 1, pass))
+        return;
+    for (size_t i = 0; i < gas_unit_prefix_count; i++) {
         const struct unit_prefix *prefix = &gas_unit_prefixes[i];
-        if (strchr(unit->prefixes, prefix->symbol[0]) && prefix_fits(prefix, word, pass) &&
-            symbol_fits(name, word + 1, pass))
-            add_hit(hits, unit, prefix);
+        if (strchr(name->unit->prefixes, prefix->symbol[0]) && prefix_fits(prefix, word, pass))
+            add_hit(hits, name->unit, prefix);
     }
 }
 
-static bool word_fits(const struct name_cursor *name, const char *word)
+static bool word_fits(const struct listed *name, const char *word, size_t length)
 {
-    size_t length = strlen(word);
     if (length == name->length + 1 && gas_lower(word[length - 1]) == 's' && name->length > 1)
         length--;
     return length == name->length && gas_same_folded(word, name->text, length);
 }
 
-static void try_word(struct hits *hits, const struct trade_unit *unit, const struct name_cursor *name, const char *word)
+static void try_word(struct hits *hits, const struct listed *name, const char *word, size_t length)
 {
-    if (word_fits(name, word))
-        add_hit(hits, unit, NULL);
-    for (size_t i = 0; i < gas_unit_prefix_count; i++) {
+    if (word_fits(name, word, length))
+        add_hit(hits, name->unit, NULL);
+    for (size_t i = 0; name->unit->prefixes[0] && i < gas_unit_prefix_count; i++) {
         const struct unit_prefix *prefix = &gas_unit_prefixes[i];
-        size_t length = strlen(prefix->word);
-        if (strchr(unit->prefixes, prefix->symbol[0]) && strlen(word) > length &&
-            gas_same_folded(word, prefix->word, length) && word_fits(name, word + length))
-            add_hit(hits, unit, prefix);
+        size_t skip = strlen(prefix->word);
+        if (strchr(name->unit->prefixes, prefix->symbol[0]) && length > skip &&
+            gas_same_folded(word, prefix->word, skip) && word_fits(name, word + skip, length - skip))
+            add_hit(hits, name->unit, prefix);
     }
 }
 
 static void collect(struct hits *hits, const char *word, enum pass pass, bool alone)
 {
+    size_t length = strlen(word), count = listed_names();
     hits->count = 0;
-    if (pass == PASS_FOLDED && alone && !word[1])
+    if (pass == PASS_FOLDED && alone && length == 1)
         return; /* a single letter alone says too little to forgive its case */
-    for (size_t i = 0; i < gas_trade_unit_count; i++) {
-        const struct trade_unit *unit = &gas_trade_units[i];
-        for (struct name_cursor name = names_of(unit); next_name(&name);) {
-            if (name.word && pass == PASS_WORD)
-                try_word(hits, unit, &name, word);
-            else if (!name.word && pass != PASS_WORD)
-                try_symbol(hits, unit, &name, word, pass);
-        }
+    for (size_t i = 0; i < count; i++) {
+        const struct listed *name = &list.name[i];
+        if (name->word && pass == PASS_WORD)
+            try_word(hits, name, word, length);
+        else if (!name->word && pass != PASS_WORD)
+            try_symbol(hits, name, word, length, pass);
     }
 }
 
@@ -165,9 +173,8 @@ enum name_found gas_unit_name_find(const char *word, bool alone, struct unit_nam
 
 static void written(const struct unit_name *name, char *text, size_t size)
 {
-    struct name_cursor first = names_of(name->unit);
-    next_name(&first);
-    snprintf(text, size, "%s%s", name->prefix ? name->prefix->symbol : "", first.text);
+    const char *first = name->unit->names;
+    snprintf(text, size, "%s%.*s", name->prefix ? name->prefix->symbol : "", (int)strcspn(first, ",;"), first);
 }
 
 /* What an ambiguous word may mean. */
@@ -195,8 +202,14 @@ struct nearest {
     int count;
 };
 
-static void consider(struct nearest *nearest, const char *word, const char *text)
+static void consider(struct nearest *nearest, const char *word, size_t length, const char *prefix,
+                     const struct listed *name)
 {
+    char text[NAME_TEXT];
+    size_t whole = strlen(prefix) + name->length;
+    if (whole >= NAME_TEXT || (whole > length ? whole - length : length - whole) > (size_t)nearest->distance)
+        return;
+    snprintf(text, sizeof text, "%s%.*s", prefix, (int)name->length, name->text);
     int distance = gas_edit_distance(word, text, nearest->distance);
     if (distance > nearest->distance)
         return;
@@ -209,20 +222,17 @@ static void consider(struct nearest *nearest, const char *word, const char *text
 
 void gas_unit_name_nearest(const char *word, char *hint, size_t size)
 {
-    size_t length = strlen(word);
+    size_t length = strlen(word), count = length < NAME_TEXT ? listed_names() : 0;
     struct nearest nearest = {.distance = length < 2 ? 0 : length < 6 ? 1 : 2};
-    for (size_t i = 0; i < gas_trade_unit_count && length < NAME_TEXT; i++) {
-        const struct trade_unit *unit = &gas_trade_units[i];
-        for (struct name_cursor name = names_of(unit); unit->kind != UNIT_AMBIGUOUS && next_name(&name);) {
-            consider(&nearest, word, name.text);
-            for (size_t k = 0; k < gas_unit_prefix_count; k++) {
-                char whole[NAME_TEXT + 8];
-                const struct unit_prefix *prefix = &gas_unit_prefixes[k];
-                snprintf(whole, sizeof whole, "%s%s", name.word ? prefix->word : prefix->symbol, name.text);
-                if (strchr(unit->prefixes, prefix->symbol[0]) && strlen(whole) < NAME_TEXT)
-                    consider(&nearest, word, whole);
-            }
-        }
+    for (size_t i = 0; i < count; i++) {
+        const struct listed *name = &list.name[i];
+        if (name->unit->kind == UNIT_AMBIGUOUS)
+            continue;
+        consider(&nearest, word, length, "", name);
+        for (size_t k = 0; name->unit->prefixes[0] && k < gas_unit_prefix_count; k++)
+            if (strchr(name->unit->prefixes, gas_unit_prefixes[k].symbol[0]))
+                consider(&nearest, word, length, name->word ? gas_unit_prefixes[k].word : gas_unit_prefixes[k].symbol,
+                         name);
     }
     if (nearest.count == 1)
         snprintf(hint, size, "did you mean %s?", nearest.text[0]);

@@ -91,7 +91,7 @@ static bool sensible(const struct gas_unit *unit)
 static bool read_base(const char *plain, const char *at, struct gas_unit *unit, struct gas_unit_fault *fault)
 {
     char base[PLAIN_TEXT];
-    struct unit_product product;
+    struct unit_product product = {.number = 1.0};
     copy_trimmed(base, plain, at);
     if (!gas_product_parse(base, &product, fault) ||
         !gas_engine_resolve(&product, &gas_references_default, unit, fault))
