@@ -36,6 +36,36 @@ static const char *list(char buffer[LIST_TEXT], const struct gas_known *known, s
 
 /* -- what is missing ----------------------------------------------------------------------------------------------- */
 
+/* The same figure in another dress: who lacks one lacks the other. */
+static bool same_thing(struct gas_known a, struct gas_known b)
+{
+    static const unsigned dresses[] = {
+        1u << GAS_VAR_N | 1u << GAS_VAR_MASS,
+        1u << GAS_VAR_V_MOLAR | 1u << GAS_VAR_V_MASS | 1u << GAS_VAR_RHO | 1u << GAS_VAR_C,
+        1u << GAS_VAR_H_MOLAR | 1u << GAS_VAR_H_MASS,
+        1u << GAS_VAR_U_MOLAR | 1u << GAS_VAR_U_MASS,
+        1u << GAS_VAR_S_MOLAR | 1u << GAS_VAR_S_MASS,
+    };
+    unsigned both = 1u << a.variable | 1u << b.variable;
+    bool same = a.variable == b.variable;
+    for (size_t i = 0; i < sizeof dresses / sizeof *dresses; i++)
+        same = same || (both & ~dresses[i]) == 0;
+    return same && a.state == b.state;
+}
+
+/* Single further figures that would do: those of everyday first, the others only when asked. */
+static size_t missing_one(const struct gas_plan *plan, struct gas_known wanted, bool everyday, struct gas_known *more,
+                          size_t room)
+{
+    struct gas_known candidate[4 * GAS_VARIABLES];
+    size_t count = gas_plan_missing(plan, wanted, candidate, sizeof candidate / sizeof *candidate), kept = 0;
+    for (size_t i = 0; i < count && kept < room; i++)
+        if (!same_thing(candidate[i], wanted) && !(everyday && candidate[i].variable > GAS_VAR_MASS) &&
+            !(kept && same_thing(candidate[i], more[kept - 1])))
+            more[kept++] = candidate[i];
+    return kept;
+}
+
 /* Two further figures of the wanted state that would do together. */
 static size_t missing_pair(const struct solver_entry *entry, struct gas_known wanted, struct gas_known pair[2])
 {
@@ -45,11 +75,11 @@ static size_t missing_pair(const struct solver_entry *entry, struct gas_known wa
     memcpy(known, entry->known, entry->count * sizeof *known);
     for (size_t i = 0; i < sizeof first / sizeof *first; i++) {
         known[entry->count] = (struct gas_known){first[i], wanted.state};
-        if ((first[i] == wanted.variable) || gas_plan_finds(&entry->plan, first[i], wanted.state) ||
+        if (same_thing(known[entry->count], wanted) || gas_plan_finds(&entry->plan, first[i], wanted.state) ||
             gas_plan_make(&trial, known, entry->count + 1, entry->plan.states).status != GAS_OK)
             continue;
         pair[0] = known[entry->count];
-        if (gas_plan_missing(&trial, wanted, &pair[1], 1))
+        if (missing_one(&trial, wanted, true, &pair[1], 1))
             return 2;
     }
     return 0;
@@ -79,11 +109,13 @@ bool solver_refuse_missing(const struct solver_entry *entry, struct gas_known wa
         return false;
     bool leg = wanted.state > 1; /* a process from state 1 would lead there as well */
     const char *last = leg ? ", " : " or ";
-    size_t count = gas_plan_missing(&entry->plan, wanted, more, SHOWN);
+    size_t count = missing_one(&entry->plan, wanted, true, more, SHOWN);
     if (count == 0) {
         count = missing_pair(entry, wanted, more);
-        last = leg ? ", " : " and ";
+        last = leg ? ", " : count ? " and " : " or ";
     }
+    if (count == 0)
+        count = missing_one(&entry->plan, wanted, false, more, SHOWN);
     list(what, more, count, last);
     if (count == 0)
         snprintf(what, sizeof what, "more figures, such as P, T and V");
@@ -208,7 +240,7 @@ static bool same_temperature(double a, double b)
 bool gas_refuse_outside(struct gas_refusal *refusal, const struct gas_job *job, int state, double T)
 {
     static const enum gas_symbol symbol = GAS_SYM_T;
-    char name[GAS_NAME_TEXT], from[40], to[40];
+    char name[GAS_NAME_TEXT], shown[80], from[40], to[80];
     struct gas_range range = gas_range_of(&job->gas);
     const struct gas_heading *heading = NULL;
     for (size_t i = 0; i < job->table.columns; i++) {
@@ -226,9 +258,15 @@ bool gas_refuse_outside(struct gas_refusal *refusal, const struct gas_job *job, 
                           "move it with an option such as \"datum 100 °C\".",
                           T, job->choice->label, from, to);
     }
+    /* 25 may be degrees Celsius only where no unit was written */
     int shown_state = heading && heading->state == state ? state : heading && heading->state == 0 ? 0 : state;
-    return gas_refuse_temperature(refusal, gas_quantity_name(name, symbol, shown_state), T, &unit, job->choice->label,
-                                  range.T_from, range.T_to);
+    gas_quantity_name(name, symbol, shown_state);
+    if (!heading || !heading->has_unit)
+        return gas_refuse_temperature(refusal, name, T, &unit, job->choice->label, range.T_from, range.T_to);
+    gas_figure(shown, sizeof shown, gas_unit_from_si(&unit, T, 0), &unit);
+    gas_number_format(from, sizeof from, gas_unit_from_si(&unit, range.T_from, 0), 6);
+    gas_figure(to, sizeof to, gas_unit_from_si(&unit, range.T_to, 0), &unit);
+    return gas_refuse(refusal, name, "%s is outside the data for %s (%s to %s).", shown, job->choice->label, from, to);
 }
 
 /* The temperature that should have come out of h, u or s. */

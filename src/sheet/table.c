@@ -47,10 +47,24 @@ static bool add(struct opening *opening, const struct gas_heading *heading, doub
     return true;
 }
 
+/* "7 kg" is a figure; as a unit it would mean seven of them. */
+static bool refuse_figure(const char *what, const char *text, size_t length, struct gas_refusal *refusal)
+{
+    char shown[80];
+    double figure;
+    size_t used;
+    if (!gas_number_parse(text, length, &figure, &used))
+        return true;
+    return gas_refuse(refusal, what, "%s is a figure where a heading such as \"m, kg\" is due.",
+                      gas_quoted(shown, sizeof shown, text, length));
+}
+
 static bool add_heading(struct opening *opening, const char *text, size_t length)
 {
     struct gas_heading heading;
     struct gas_heading_fault fault;
+    if (!refuse_figure(opening->what, text, length, opening->refusal))
+        return false;
     if (!gas_heading_parse(text, length, &opening->table->references, &heading, &fault))
         return gas_refuse_heading(opening->refusal, opening->what, text, length, &fault);
     return add(opening, &heading, NAN);
@@ -307,6 +321,8 @@ static bool want(struct gas_wanted *wanted, struct gas_piece item, const struct 
     if (wanted->columns == GAS_COLUMNS)
         return gas_refuse(refusal, "wanted", "more than %d quantities are wanted; ask for some of them elsewhere.",
                           GAS_COLUMNS);
+    if (!refuse_figure("wanted", item.at, item.length, refusal))
+        return false;
     if (!gas_heading_parse(item.at, item.length, &options->references, &wanted->heading[wanted->columns], &fault))
         return gas_refuse_heading(refusal, "wanted", item.at, item.length, &fault);
     wanted->columns++;
