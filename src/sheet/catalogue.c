@@ -4,6 +4,15 @@
 
 /* clang-format off */
 static const struct gas_function rows[] = {
+    {"GAS.SOLVE", "solve", gas_fn_solve,
+     "States of an ideal gas, changes of a closed amount and flows: whatever follows from the figures given",
+     {{"gas", "Name, formula or CAS number, a mixture, a card; a heat-capacity rule may follow after |", false, GAS_PARAMETER_ANY},
+      {"given", "A text such as 7 bar(g); 35 °C; 12 m3, a block of headings and values, or a table of cases", false, GAS_PARAMETER_ANY},
+      {"wanted", "A text such as m, kg or a range of headings; left out: a card of everything that follows", true, GAS_PARAMETER_ANY},
+      {"headings", "Headings of the table's columns or rows, quantity and unit such as P1, bar(g)", true, GAS_PARAMETER_ANY},
+      {"options", "A text such as barometer 0.98 bar; datum 0 °C; agree 0.5 %; hard errors", true, GAS_PARAMETER_ANY}},
+     "GAS.SOLVE(\"N2\";\"7 bar(g); 35 °C; 12 m3\";\"kg\")", "105.14"},
+
     {"GAS.GIVEN", "given", gas_fn_given,
      "A block of givens from scattered cells: heading, value, heading, value and so on",
      {{"heading", "Quantity and unit of the value that follows, such as P1, bar(g)", false, GAS_PARAMETER_ANY},

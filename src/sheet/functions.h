@@ -8,6 +8,7 @@
 
 gas_entry gas_fn_faults;  /* fn_desk.c */
 gas_entry gas_fn_given;   /* fn_desk.c */
+gas_entry gas_fn_solve;   /* fn_solve.c */
 gas_entry gas_fn_version; /* fn_desk.c */
 
 #endif
