@@ -3,6 +3,14 @@
 #include "sheet/functions.h"
 
 /* clang-format off */
+#define THE_GAS           {"gas", "Name, formula or CAS number; a mixture such as N2 79 + O2 21; a card or mixture range; a rule after |", false, GAS_PARAMETER_ANY}
+#define TEMPERATURE       {"temperature", "Temperature in K, or in the temperature unit; a text may carry its own unit", false, GAS_PARAMETER_ANY}
+#define TEMPERATURE_FROM  {"from", "Temperature at the start, in K or in the temperature unit", false, GAS_PARAMETER_ANY}
+#define TEMPERATURE_TO    {"to", "Temperature at the end, in K or in the temperature unit", false, GAS_PARAMETER_ANY}
+#define TEMPERATURE_UNIT  {"temperature unit", "Unit of temperatures that are bare numbers, such as °C; left out: K", true, GAS_PARAMETER_ANY}
+#define WANTED_CAPACITY   {"wanted", "Unit of the answer, such as kJ/kg-K; left out: J/(mol K)", true, GAS_PARAMETER_ANY}
+#define WANTED_ENERGY     {"wanted", "Unit of the answer, such as kJ/kg; left out: J/mol", true, GAS_PARAMETER_ANY}
+
 static const struct gas_function rows[] = {
     {"GAS.SOLVE", "solve", gas_fn_solve,
      "States of an ideal gas, changes of a closed amount and flows: whatever follows from the figures given",
@@ -12,6 +20,62 @@ static const struct gas_function rows[] = {
       {"headings", "Headings of the table's columns or rows, quantity and unit such as P1, bar(g)", true, GAS_PARAMETER_ANY},
       {"options", "A text such as barometer 0.98 bar; datum 0 °C; agree 0.5 %; hard errors", true, GAS_PARAMETER_ANY}},
      "GAS.SOLVE(\"N2\";\"7 bar(g); 35 °C; 12 m3\";\"kg\")", "105.14"},
+
+    {"GAS.CP", "cp", gas_fn_cp,
+     "Heat capacity at constant pressure of the ideal gas at a temperature",
+     {THE_GAS, TEMPERATURE, WANTED_CAPACITY, TEMPERATURE_UNIT},
+     "GAS.CP(\"N2\";500)", "29.58"},
+
+    {"GAS.CV", "cv", gas_fn_cv,
+     "Heat capacity at constant volume of the ideal gas at a temperature, cp less R",
+     {THE_GAS, TEMPERATURE, WANTED_CAPACITY, TEMPERATURE_UNIT},
+     "GAS.CV(\"Ar\";25;\"J/mol-K\";\"°C\")", "12.47"},
+
+    {"GAS.GAMMA", "gamma", gas_fn_gamma,
+     "Heat-capacity ratio cp/cv of the ideal gas at a temperature",
+     {THE_GAS, TEMPERATURE, {"wanted", "Nothing, or the heading gamma: the ratio has no unit", true, GAS_PARAMETER_ANY}, TEMPERATURE_UNIT},
+     "GAS.GAMMA(\"Ar\";300)", "1.6667"},
+
+    {"GAS.CPMEAN", "cpmean", gas_fn_cp_mean,
+     "Mean heat capacity at constant pressure between two temperatures: the enthalpy change over the rise",
+     {THE_GAS, TEMPERATURE_FROM, TEMPERATURE_TO, WANTED_CAPACITY, TEMPERATURE_UNIT},
+     "GAS.CPMEAN(\"He\";20;300;\"J/mol-K\";\"°C\")", "20.786"},
+
+    {"GAS.DH", "dh", gas_fn_dh,
+     "Enthalpy change between two temperatures: the integral of cp",
+     {THE_GAS, TEMPERATURE_FROM, TEMPERATURE_TO, WANTED_ENERGY, TEMPERATURE_UNIT},
+     "GAS.DH(\"N2\";298.15;1500;\"kJ/mol\")", "38.405"},
+
+    {"GAS.DU", "du", gas_fn_du,
+     "Internal-energy change between two temperatures: the integral of cv",
+     {THE_GAS, TEMPERATURE_FROM, TEMPERATURE_TO, WANTED_ENERGY, TEMPERATURE_UNIT},
+     "GAS.DU(\"Ar\";300;400;\"J/mol\")", "1247.2"},
+
+    {"GAS.DS", "ds", gas_fn_ds,
+     "Entropy change between two temperatures and two pressures, or at constant pressure",
+     {THE_GAS, TEMPERATURE_FROM, TEMPERATURE_TO,
+      {"pressure from", "Pressure at the start, in Pa absolute or in the pressure unit; left out: constant pressure", true, GAS_PARAMETER_ANY},
+      {"pressure to", "Pressure at the end, in Pa absolute or in the pressure unit", true, GAS_PARAMETER_ANY},
+      WANTED_CAPACITY, TEMPERATURE_UNIT,
+      {"pressure unit", "Unit of pressures that are bare numbers, such as bar(g); left out: Pa", true, GAS_PARAMETER_ANY}},
+     "GAS.DS(\"O2\";298.15;1500)", "52.921"},
+
+    {"GAS.TEMP", "temp", gas_fn_temp,
+     "Temperature at the end of a given change of enthalpy, internal energy or entropy",
+     {THE_GAS, TEMPERATURE_FROM,
+      {"change", "Change from the start, in J/mol or J/(mol K), or in the change unit", false, GAS_PARAMETER_ANY},
+      {"kind", "What changes: dh (left out), du, or ds at constant pressure", true, GAS_PARAMETER_ANY},
+      {"change unit", "Unit of changes that are bare numbers, such as kJ/kg", true, GAS_PARAMETER_ANY},
+      TEMPERATURE_UNIT},
+     "GAS.TEMP(\"Ar\";300;2078.6;\"dh\")", "400.0"},
+
+    {"GAS.UNIT", "unit", gas_fn_unit,
+     "Unit conversion that knows gauge pressures, temperature differences (Δ°C) and reference volumes",
+     {{"value", "Figure or figures to convert", false, GAS_PARAMETER_ANY},
+      {"from", "Unit they are in, such as psig or Nm3/h; a difference is marked, such as Δ°C", false, GAS_PARAMETER_ANY},
+      {"to", "Unit they shall be in", false, GAS_PARAMETER_ANY},
+      {"barometer", "Outside pressure for gauge and vacuum units, in Pa or with its unit; left out: 101325 Pa", true, GAS_PARAMETER_ANY}},
+     "GAS.UNIT(100;\"psig\";\"bar\")", "7.9080"},
 
     {"GAS.GIVEN", "given", gas_fn_given,
      "A block of givens from scattered cells: heading, value, heading, value and so on",

@@ -6,6 +6,15 @@
 
 #include "sheet/catalogue.h"
 
+gas_entry gas_fn_cp;      /* fn_heat.c */
+gas_entry gas_fn_cv;      /* fn_heat.c */
+gas_entry gas_fn_gamma;   /* fn_heat.c */
+gas_entry gas_fn_cp_mean; /* fn_heat.c */
+gas_entry gas_fn_dh;      /* fn_heat.c */
+gas_entry gas_fn_du;      /* fn_heat.c */
+gas_entry gas_fn_ds;      /* fn_heat.c */
+gas_entry gas_fn_temp;    /* fn_heat.c */
+gas_entry gas_fn_unit;    /* fn_unit.c */
 gas_entry gas_fn_faults;  /* fn_desk.c */
 gas_entry gas_fn_given;   /* fn_desk.c */
 gas_entry gas_fn_solve;   /* fn_solve.c */
