@@ -8,7 +8,7 @@
 #include "sheet/functions.h"
 #include "sheet/gas_choice.h"
 
-enum { TEMPERATURES = 2, INPUTS = 4 };
+enum { INPUTS = 4 };
 
 /* What one function asks of the core: its figures in SI, in the order of its inputs. */
 struct heat_question {
@@ -53,7 +53,11 @@ static struct gas_result ask_ds_isobaric(const struct gas *gas, const double *x)
 
 static struct gas_result ask_ds(const struct gas *gas, const double *x)
 {
-    return gas_ds(gas, x[0], x[2], x[1], x[3]);
+    /* The core takes state by state, the sheet temperatures first: tell the arguments in the sheet's order. */
+    static const int sheet_order[] = {0, 1, 2, 4, 3, 5};
+    struct gas_result result = gas_ds(gas, x[0], x[2], x[1], x[3]);
+    result.argument = sheet_order[result.argument];
+    return result;
 }
 
 static struct gas_result ask_T_after_dh(const struct gas *gas, const double *x)
@@ -126,20 +130,24 @@ static void refuse_result(struct heat_call *heat, const struct gas_result *resul
 {
     const struct gas_choice *choice = heat->choice;
     struct gas_range range = gas_range_of(&choice->gas);
-    size_t index = result->argument > 0 && result->argument <= TEMPERATURES ? (size_t)result->argument - 1 : 0;
+    size_t index = result->argument > 1 ? (size_t)result->argument - 2 : heat->inputs - 1;
+    const char *name = heat->input[index].name;
+    char shown[80];
+    gas_figure(shown, sizeof shown, gas_unit_from_si(&reading[index].unit, reading[index].si, GAS_ATMOSPHERE),
+               &reading[index].unit);
     if (result->status == GAS_NO_HEAT_CAPACITY)
         gas_refuse(&heat->refusal, "gas", "%s has no heat capacity; give one after '|', such as | cp = 1.04 kJ/kg-K.",
                    choice->label);
-    else if (result->status == GAS_OUTSIDE_DATA && result->argument > 0)
-        gas_refuse_temperature(&heat->refusal, heat->input[index].name, result->figure, &reading[index].unit,
-                               choice->label, range.T_from, range.T_to);
+    else if (result->status == GAS_OUTSIDE_DATA && result->argument > 1)
+        gas_refuse_temperature(&heat->refusal, name, result->figure, &reading[index].unit, choice->label, range.T_from,
+                               range.T_to);
     else if (result->status == GAS_OUTSIDE_DATA)
-        gas_refuse(&heat->refusal, "change",
-                   "it would take the temperature outside the data for %s (%g to %g K); "
-                   "give a smaller change.",
-                   choice->label, range.T_from, range.T_to);
+        gas_refuse(&heat->refusal, name,
+                   "%s would take the temperature outside the data for %s (%g to %g K); give a "
+                   "smaller change.",
+                   shown, choice->label, range.T_from, range.T_to);
     else
-        gas_refuse(&heat->refusal, heat->input[index].name, "the figure %s.", gas_status_words(result->status));
+        gas_refuse(&heat->refusal, name, "%s %s; check figure and unit.", shown, gas_status_words(result->status));
 }
 
 static void answer_cell(struct heat_call *heat, struct gas_call *call, size_t row, size_t column)
