@@ -1,6 +1,7 @@
 /* UNIT: conversion that knows gauge, differences and reference volumes. */
 #include <math.h>
 #include <string.h>
+#include <strings.h>
 
 #include "sheet/elementwise.h"
 #include "sheet/functions.h"
@@ -50,7 +51,7 @@ static bool sides_match(const struct side *from, const struct side *to, struct g
     char one[80], other[80];
     gas_quoted(one, sizeof one, from->unit.text, strlen(from->unit.text));
     gas_quoted(other, sizeof other, to->unit.text, strlen(to->unit.text));
-    if (from->unit.dimension != to->unit.dimension)
+    if (!gas_unit_compatible(&from->unit, &to->unit))
         return gas_refuse(refusal, "to", "%s is %s and %s is %s; %s.", one, gas_dimension_words(from->unit.dimension),
                           other, gas_dimension_words(to->unit.dimension),
                           way_out(from->unit.dimension, to->unit.dimension));
@@ -67,7 +68,6 @@ static bool read_barometer(const struct gas_block *argument, double *barometer, 
     static const struct gas_block no_unit = {0};
     struct gas_input input = {.name = "barometer", .dimension = GAS_DIM_PRESSURE, .other = GAS_DIM_PRESSURE};
     struct gas_reading reading;
-    *barometer = GAS_ATMOSPHERE;
     if (gas_omitted(argument))
         return true;
     if (!gas_single(argument))
@@ -108,7 +108,7 @@ void gas_fn_unit(struct gas_call *call)
 {
     struct gas_refusal refusal = {0};
     struct side from, to;
-    double barometer;
+    double barometer = GAS_ATMOSPHERE;
     const struct gas_block *value = gas_argument(call, 0);
     if (gas_omitted(value))
         gas_refuse(&refusal, "value", "it is left out; give a figure, a cell or a range.");
@@ -122,7 +122,7 @@ void gas_fn_unit(struct gas_call *call)
     if (!gas_answer_block(call, value->rows, value->columns))
         return;
     for (size_t i = 0; i < value->rows * value->columns; i++) {
-        double converted;
+        double converted = NAN;
         refusal.made = false;
         if (convert(&value->cell[i], &from, &to, barometer, &converted, &refusal))
             gas_put_number(call, i / value->columns, i % value->columns, converted);
