@@ -58,7 +58,7 @@ static const struct gas_function rows[] = {
       {"pressure to", "Pressure at the end, in Pa absolute or in the pressure unit", true, GAS_PARAMETER_ANY},
       WANTED_CAPACITY, TEMPERATURE_UNIT,
       {"pressure unit", "Unit of pressures that are bare numbers, such as bar(g); left out: Pa", true, GAS_PARAMETER_ANY}},
-     "GAS.DS(\"Ar\";298.15;1500)", "33.582"},
+     "GAS.DS(\"Ar\";298.15;1500)", "33.583"},
 
     {"GAS.TEMP", "temp", gas_fn_temp,
      "Temperature at the end of a given change of enthalpy, internal energy or entropy",
