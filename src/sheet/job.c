@@ -114,6 +114,7 @@ bool gas_job_read(struct gas_job *job, const struct gas_job_arguments *arguments
     job->choice = NULL;
     job->own = NULL;
     job->extent = GAS_EXTENT_NONE;
+    job->barometer_column = -1;
     if (!gas_options_read(arguments->options, &job->options, refusal))
         return false;
     job->choice = gas_choose(arguments->gas, refusal);
@@ -126,6 +127,7 @@ bool gas_job_read(struct gas_job *job, const struct gas_job_arguments *arguments
 
 bool gas_job_prepare(struct gas_job *job, struct gas_arena *arena, struct gas_refusal *refusal)
 {
+    job->barometer_column = gas_job_column(job, GAS_SYM_BAROMETER, 0);
     return extent_of_givens(job, refusal) && extent_of_wanted(job, refusal) && job->task->prepare(job, arena, refusal);
 }
 
@@ -172,41 +174,67 @@ static double sign_of(const struct gas_job *job, const struct gas_heading *headi
     return heading->by_gas || (job->options.work_by_gas && !heading->on_gas) ? -1 : 1;
 }
 
-static double to_si(const struct gas_job *job, const struct gas_heading *heading, double figure)
+static double to_si(const struct gas_job *job, const struct gas_case *figures, const struct gas_heading *heading,
+                    double figure)
 {
     if (heading->tolerance)
         return gas_unit_difference_to_si(&heading->unit, figure);
-    return sign_of(job, heading) * gas_unit_to_si(&heading->unit, figure, job->options.barometer);
+    return sign_of(job, heading) * gas_unit_to_si(&heading->unit, figure, figures->barometer);
+}
+
+/* The barometer read with this case, where the table has a column for it. */
+static bool read_barometer(const struct gas_job *job, const struct gas_row *row, struct gas_case *figures,
+                           struct gas_refusal *refusal)
+{
+    char shown[80];
+    int column = job->barometer_column;
+    figures->barometer = job->options.barometer;
+    if (column < 0 || !(row->given >> column & 1))
+        return true;
+    const struct gas_unit *unit = &job->table.heading[column].unit;
+    double P = gas_unit_to_si(unit, row->figure[column], job->options.barometer);
+    if (!(P >= GAS_BAROMETER_LEAST && P <= GAS_BAROMETER_MOST) || unit->basis != GAS_ABSOLUTE)
+        return gas_refuse(refusal, "barometer", "%s is no air pressure; it lies between 0.01 and 10 bar, absolute.",
+                          gas_figure(shown, sizeof shown, row->figure[column], unit));
+    figures->barometer = P;
+    return true;
+}
+
+static bool refuse_level(const struct gas_heading *heading, double figure, double si, double barometer,
+                         struct gas_refusal *refusal)
+{
+    char name[GAS_NAME_TEXT];
+    gas_quantity_name(name, heading->symbol, heading->state);
+    if (!heading->tolerance)
+        return gas_accept_level(refusal, name, figure, &heading->unit, barometer);
+    return si == 0 || gas_refuse(refusal, name, "a plus-minus figure must be a number and not below zero.");
 }
 
 bool gas_job_case(const struct gas_job *job, const struct gas_row *row, struct gas_case *figures,
                   struct gas_refusal *refusal)
 {
-    char name[GAS_NAME_TEXT];
     figures->row = row;
+    if (!read_barometer(job, row, figures, refusal))
+        return false;
     for (size_t i = 0; i < job->table.columns; i++) {
         const struct gas_heading *heading = &job->table.heading[i];
         figures->si[i] = NAN;
         if (!(row->given >> i & 1))
             continue;
-        double si = figures->si[i] = to_si(job, heading, row->figure[i]);
-        if (si > 0 && si <= 1e300) /* nothing to complain about: the usual case, without making any text */
-            continue;
-        gas_quantity_name(name, heading->symbol, heading->state);
-        if (heading->tolerance && !(si == 0))
-            return gas_refuse(refusal, name, "a plus-minus figure must be a number and not below zero.");
-        if (!heading->tolerance &&
-            !gas_accept_level(refusal, name, row->figure[i], &heading->unit, job->options.barometer))
+        double si = figures->si[i] = to_si(job, figures, heading, row->figure[i]);
+        bool usual = si > 0 && si <= 1e300; /* nothing to complain about: no text is made */
+        if (!usual && !refuse_level(heading, row->figure[i], si, figures->barometer, refusal))
             return false;
     }
     return true;
 }
 
-double gas_job_shown(const struct gas_job *job, const struct gas_heading *heading, double si)
+double gas_job_shown(const struct gas_job *job, const struct gas_case *figures, const struct gas_heading *heading,
+                     double si)
 {
     if (heading->tolerance)
         return gas_unit_difference_from_si(&heading->unit, si);
-    return gas_unit_from_si(&heading->unit, sign_of(job, heading) * si, job->options.barometer);
+    return gas_unit_from_si(&heading->unit, sign_of(job, heading) * si, figures->barometer);
 }
 
 bool gas_job_run(const struct gas_job *job, const struct gas_row *row, double *answers, struct gas_refusal *refusal)
@@ -215,7 +243,7 @@ bool gas_job_run(const struct gas_job *job, const struct gas_row *row, double *a
     if (!gas_job_case(job, row, &figures, refusal) || !job->task->run(job, &figures, answers, refusal))
         return false;
     for (size_t i = 0; i < job->wanted.columns; i++)
-        answers[i] = gas_job_shown(job, &job->wanted.heading[i], answers[i]);
+        answers[i] = gas_job_shown(job, &figures, &job->wanted.heading[i], answers[i]);
     return true;
 }
 

@@ -30,6 +30,7 @@ enum gas_extent { GAS_EXTENT_NONE, GAS_EXTENT_TOTAL, GAS_EXTENT_FLOW };
  * differences; NAN where not given. */
 struct gas_case {
     const struct gas_row *row; /* as the user gave it: for sentences */
+    double barometer;          /* Pa: of the options, or of the case's own barometer column */
     double si[GAS_COLUMNS];
 };
 
@@ -55,6 +56,7 @@ struct gas_job {
     struct gas_table table;
     struct gas_wanted wanted; /* columns may be 0: the function decides what that means */
     enum gas_extent extent;   /* of the givens */
+    int barometer_column;     /* of `given`, -1: none */
     const void *legs;         /* what else the function was given, set by it before gas_job_open; NULL for SOLVE */
     void *own;                /* the task's own */
 };
@@ -81,8 +83,9 @@ bool gas_job_case(const struct gas_job *job, const struct gas_row *row, struct g
                   struct gas_refusal *refusal);
 /* gas_job_run - one case; answers[i] in the unit and sign of wanted.heading[i]. */
 bool gas_job_run(const struct gas_job *job, const struct gas_row *row, double *answers, struct gas_refusal *refusal);
-/* gas_job_shown - an SI answer as a heading shows it: unit, barometer, sign of work. */
-double gas_job_shown(const struct gas_job *job, const struct gas_heading *heading, double si);
+/* gas_job_shown - an SI answer as a heading shows it in a case: unit, barometer, sign of work. */
+double gas_job_shown(const struct gas_job *job, const struct gas_case *figures, const struct gas_heading *heading,
+                     double si);
 
 /*
  * gas_job_answer - every case of the table into call->answer, one column per wanted heading (across: one row). A case

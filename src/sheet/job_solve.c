@@ -49,7 +49,7 @@ static bool accept_givens(const struct gas_job *job, struct gas_refusal *refusal
         if (heading->tolerance && gas_job_column(job, heading->symbol, heading->state) < 0)
             return gas_refuse(refusal, "given", "%s is the plus-minus of a figure that is not given; give that too.",
                               shown);
-        if (heading->tolerance || gas_variable_of(heading, &variable))
+        if (heading->tolerance || gas_variable_of(heading, &variable) || (int)i == job->barometer_column)
             continue;
         if (heading->symbol == GAS_SYM_W || heading->symbol == GAS_SYM_Q)
             return gas_refuse(refusal, "given",
@@ -87,6 +87,16 @@ static bool want_heat_capacity(struct solve *solve, struct answer *answer, const
     return true;
 }
 
+static bool amount_is_numbered(const struct gas_job *job)
+{
+    enum gas_variable variable;
+    for (size_t i = 0; i < job->table.columns; i++)
+        if (job->table.heading[i].state > 0 && gas_variable_of(&job->table.heading[i], &variable) &&
+            (variable == GAS_VAR_N || variable == GAS_VAR_MASS))
+            return true;
+    return false;
+}
+
 static bool want_change(struct solve *solve, const struct gas_job *job, struct answer *answer,
                         const struct gas_heading *heading, struct gas_refusal *refusal)
 {
@@ -104,6 +114,11 @@ static bool want_change(struct solve *solve, const struct gas_job *job, struct a
         answer->P2 = need(solve, GAS_VAR_P, answer->state);
     }
     answer->total = gas_dimension_extent(heading->unit.dimension) != GAS_EXTENT_NONE;
+    if (answer->total && amount_is_numbered(job))
+        return gas_refuse(refusal, "wanted",
+                          "%s is for one amount of gas, but amounts of single states are given; ask "
+                          "for it per mass or mole, such as %s, kJ/kg.",
+                          gas_symbol_text(heading->symbol), gas_symbol_text(heading->symbol));
     if (answer->total)
         answer->n = need(solve, GAS_VAR_N, 0);
     return true;

@@ -86,7 +86,7 @@ static bool read_barometer(struct reader *reader)
     double P;
     if (!read_figure(reader, reader->rest, GAS_DIM_PRESSURE, &P))
         return false;
-    if (!(P >= 1e3 && P <= 1e6))
+    if (!(P >= GAS_BAROMETER_LEAST && P <= GAS_BAROMETER_MOST))
         return gas_refuse(reader->refusal, "options",
                           "%s is no air pressure; a barometer lies between 0.01 and 10 bar, so check its unit.",
                           reader->shown);

@@ -11,6 +11,9 @@
 #include "sheet/cell.h"
 #include "sheet/sentence.h"
 
+#define GAS_BAROMETER_LEAST 1e3 /* Pa: what is outside these two is no air pressure */
+#define GAS_BAROMETER_MOST  1e6
+
 struct gas_options {
     double barometer;                 /* Pa */
     enum gas_system system;           /* GAS_CLOSED, or GAS_FLOW after `flow` */

@@ -165,11 +165,11 @@ static const struct gas_heading *heading_for(const struct gas_solver *solver, co
 }
 
 static const char *figure_of(char buffer[80], const struct gas_solver *solver, const struct gas_job *job,
-                             struct gas_known known, double si)
+                             const struct gas_case *figures, struct gas_known known, double si)
 {
     const struct gas_heading *heading = heading_for(solver, job, known);
     if (heading)
-        return gas_figure(buffer, 80, gas_job_shown(job, heading, si), &heading->unit);
+        return gas_figure(buffer, 80, gas_job_shown(job, figures, heading, si), &heading->unit);
     gas_number_format(buffer, 60, si, 6);
     size_t used = strlen(buffer);
     snprintf(buffer + used, 80 - used, " %s%s", gas_variable_unit(known.variable),
@@ -215,8 +215,8 @@ static bool refuse_contradiction(const struct gas_solver *solver, const struct g
                           "apart where %s %% is allowed; correct one or leave one out.",
                           balance, given, other, apart, allowed);
     }
-    figure_of(given, solver, job, doubted, si);
-    figure_of(other, solver, job, doubted, values->balanced);
+    figure_of(given, solver, job, figures, doubted, si);
+    figure_of(other, solver, job, figures, doubted, values->balanced);
     variable_name(name, doubted);
     if (!(si > 0 && values->balanced > 0))
         return gas_refuse(refusal, "given",
@@ -282,7 +282,8 @@ static bool refuse_unreached(const struct gas_job *job, int state, struct gas_re
 }
 
 static bool refuse_answer(const struct gas_solver *solver, const struct gas_job *job, const struct solver_entry *entry,
-                          struct gas_result result, const struct gas_values *values, struct gas_refusal *refusal)
+                          const struct gas_case *figures, struct gas_result result, const struct gas_values *values,
+                          struct gas_refusal *refusal)
 {
     const struct gas_step *step = values->failed_step >= 0 ? &entry->plan.step[values->failed_step] : NULL;
     struct gas_known known =
@@ -299,7 +300,7 @@ static bool refuse_answer(const struct gas_solver *solver, const struct gas_job 
                                            : gas_refuse_outside(refusal, job, step ? step->state_a : 0, result.figure);
     case GAS_NOT_POSITIVE:
         return gas_refuse(refusal, "given", "%s comes out as %s, which cannot be; check the figures.", name,
-                          figure_of(shown, solver, job, known, result.figure));
+                          figure_of(shown, solver, job, figures, known, result.figure));
     case GAS_UNDETERMINED:
         return gas_refuse(refusal, "given", "%s does not follow where figures are zero; give another figure.", name);
     default:
@@ -315,5 +316,5 @@ bool solver_refuse_run(const struct gas_solver *solver, const struct gas_job *jo
         return refuse_figure(job, entry, figures, result, refusal);
     if (result.status == GAS_CONTRADICTION && values->failed_check >= 0)
         return refuse_contradiction(solver, job, entry, figures, values, refusal);
-    return refuse_answer(solver, job, entry, result, values, refusal);
+    return refuse_answer(solver, job, entry, figures, result, values, refusal);
 }

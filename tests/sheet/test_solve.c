@@ -74,6 +74,9 @@ static const struct figure_row figures[] = {
     /* US Standard Atmosphere 1976, eq. (33a): 101325 (1 - 0.0065 h/288.15)^(g M/(R* 0.0065)), R* = 8.31432 J/(mol K),
      * h = r z/(r + z), r = 6356766 m, z = 2400 m; by bc */
     {"barometer at a height", "GAS.SOLVE(\"N2\";\"0 bar(g); 35 °C\";\"P, Pa\";;\"barometer at 2400 m\")", 0, 0, 75634.26, 1e-5},
+    {"a barometer for each row", "GAS.SOLVE(\"N2\";{7;35;12;980|6;30;11;1020};\"mol\";{\"P, bar(g)\";\"T, °C\";\"V, m3\";\"barometer, mbar\"})", 1, 0, 7.02 * BAR * 11 / (R * C(30)), 1e-12},
+    {"a barometer in some rows", "GAS.SOLVE(\"N2\";{7;35;12;980|6;30;11;\"\"};\"mol\";{\"P, bar(g)\";\"T, °C\";\"V, m3\";\"barometer, mbar\"})", 1, 0, (6 * BAR + ATM) * 11 / (R * C(30)), 1e-12},
+    {"a barometer, gauge wanted", "GAS.SOLVE(\"N2\";{8;980};\"P, bar(g)\";{\"P, bar\";\"barometer, mbar\"})", 0, 0, 8 - 0.98, 1e-12},
     /* two states */
     {"rigid vessel", "GAS.SOLVE(\"N2\";\"V = 2 m3; P1 = 7 bar(g); T1 = 80 °C; T2 = 15 °C\";\"P2, bar(g)\")", 0, 0, ((7 * BAR + ATM) * C(15) / C(80) - ATM) / BAR, 1e-12},
     {"rigid without its size", "GAS.SOLVE(\"N2\";\"P1 = 7 bar; T1 = 80 °C; T2 = 15 °C; V1 = 3 m3; V2 = 3 m3\";\"P2, bar\")", 0, 0, 7 * C(15) / C(80), 1e-12},
@@ -187,7 +190,8 @@ static const struct sentence_row sentences[] = {
     {"nothing given", "GAS.SOLVE(\"N2\";;\"kg\")", 0, 0, "...nothing is given"},
     {"blank given", "GAS.SOLVE(\"N2\";\" \";\"kg\")", 0, 0, "Check given: "},
     {"contradiction", "GAS.SOLVE(\"N2\";\"4 bar; 300 K; 2 m3; n = 350 mol\";\"kg\")", 0, 0, "...% apart where 0.1 % is allowed"},
-    {"contradiction, both sides", "GAS.SOLVE(\"N2\";\"4 bar; 300 K; 2 m3; n = 350 mol\";\"kg\")", 0, 0, "...Check given: "},
+    /* 4e5 x 2/(8.31446261815324 x 300) = 320.726 mol */
+    {"contradiction, both sides", "GAS.SOLVE(\"N2\";\"4 bar; 300 K; 2 m3; n = 350 mol\";\"kg\")", 0, 0, "...n is given as 350 mol, but the other figures make it 320.726 mol"},
     {"a text in a table", "GAS.SOLVE(\"N2\";{7;35;12|\"n/a\";30;11};\"mol\";{\"P, bar(g)\";\"T, °C\";\"V, m3\"})", 1, 0,
      "Check P: \"n/a\" is not a number; write a figure, or leave the cell blank."},
     {"another kind of unit in a cell", "GAS.SOLVE(\"N2\";{7;35;12|\"6 kg\";30;11};\"mol\";{\"P, bar(g)\";\"T, °C\";\"V, m3\"})", 1, 0,
@@ -200,6 +204,16 @@ static const struct sentence_row sentences[] = {
      "Check T: -300 °C is below absolute zero (-273.15 °C)."},
     {"a row without volume", "GAS.SOLVE(\"N2\";{7;35;12|7;30;\"\"};\"mol\";{\"P, bar(g)\";\"T, °C\";\"V, m3\"})", 1, 0, "...n cannot be found from P and T; give V"},
     {"a blank row stays blank", "GAS.SOLVE(\"N2\";{7;35;12|\"\";\"\";\"\"};\"mol\";{\"P, bar(g)\";\"T, °C\";\"V, m3\"})", 1, 0, ""},
+    {"below a vacuum, the row's barometer", "GAS.SOLVE(\"N2\";{-1;300;980};\"kg/m3\";{\"P, bar(g)\";\"T, K\";\"barometer, mbar\"})", 0, 0,
+     "Check P: -1 bar(g) is below a perfect vacuum at a barometer of 0.98 bar."},
+    {"a barometer that is none", "GAS.SOLVE(\"N2\";{1;300;0.98};\"kg/m3\";{\"P, bar(g)\";\"T, K\";\"barometer, mbar\"})", 0, 0, "...0.98 mbar is no air pressure"},
+    {"a total change of unlike amounts", "GAS.SOLVE(\"N2\";\"m1 = 3 kg; m2 = 5 kg; T1 = 20 °C; T2 = 90 °C\";\"dH, kJ\")", 0, 0, "...dH is for one amount of gas"},
+    {"explicit kelvin is no slip", "GAS.SOLVE(\"N2\";\"T = 25 K\";\"cp\")", 0, 0, "Check T: 25 K is outside the data for nitrogen (200 to 20000 K)."},
+    {"the datum is outside the data", "GAS.SOLVE(\"SF6 | cp = 0.66 kJ/kg-K, 300 to 500 K\";\"40 °C; 3 bar\";\"h, kJ/kg\")", 0, 0, "...move it with an option such as \"datum 100 °C\""},
+    {"h beyond the data", "GAS.SOLVE(\"N2\";\"h = 30 MJ/mol; 3 bar\";\"T, K\")", 0, 0, "...it would be outside the data for nitrogen"},
+    {"rigid vessel, contradiction", "GAS.SOLVE(\"N2\";\"V = 2 m3; P1 = 2 bar; T1 = 300 K; P2 = 3 bar; T2 = 500 K\";\"m, kg\")", 0, 0,
+     /* 300 K x 3/2 = 450 K; 500/450 = 1.1111 */
+     "Check given: T2 is given as 500 K, but the other figures make it 450 K (P1 / T1 = P2 / T2): 11.1 % apart where 0.1 % is allowed; correct one or leave one out."},
     {"work is wanted", "GAS.SOLVE(\"N2\";\"P1 = 1 bar; T1 = 300 K; P2 = 8 bar\";\"W, kJ\")", 0, 0, "...depends on the process; use GAS.WORK with legs"},
     {"an energy without a symbol", "GAS.SOLVE(\"N2\";\"3 kg; 1 bar; 300 K\";\"kJ\")", 0, 0, "Check wanted: "},
     {"a change in one state", "GAS.SOLVE(\"N2\";\"3 kg; 1 bar; 300 K\";\"dH, kJ\")", 0, 0, "...is a change from one state to another"},
