@@ -3,6 +3,10 @@
 #include "sheet/functions.h"
 
 /* clang-format off */
+#define START             {"given", "Start of the path: a text such as 2 kg; 25 °C; 1 bar, a block of headings and values, or a table with headings", false, GAS_PARAMETER_ANY}
+#define LEGS              {"legs", "Processes and where they end, such as isothermal to 8 bar; adiabatic to 2 bar, or a range of them", false, GAS_PARAMETER_ANY}
+#define HEADINGS          {"headings", "Headings of the columns of given, such as P1, bar(g), when they do not stand in it", true, GAS_PARAMETER_ANY}
+#define OPTIONS           {"options", "Text of options, such as flow; work by gas; barometer 0.98 bar", true, GAS_PARAMETER_ANY}
 #define THE_GAS           {"gas", "Name, formula or CAS number; a mixture such as N2 79 + O2 21; a card or mixture range; a rule after |", false, GAS_PARAMETER_ANY}
 #define TEMPERATURE       {"temperature", "Temperature in K, or in the temperature unit; a text may carry its own unit", false, GAS_PARAMETER_ANY}
 #define TEMPERATURE_FROM  {"from", "Temperature at the start, in K or in the temperature unit", false, GAS_PARAMETER_ANY}
@@ -76,6 +80,49 @@ static const struct gas_function rows[] = {
       {"to", "Unit they shall be in", false, GAS_PARAMETER_ANY},
       {"barometer", "Outside pressure for gauge and vacuum units, in Pa or with its unit; left out: 101325 Pa", true, GAS_PARAMETER_ANY}},
      "GAS.UNIT(100;\"psig\";\"bar\")", "7.9080"},
+
+    {"GAS.WORK", "work", gas_fn_work,
+     "Total work along a path, positive into the gas unless an option or heading says otherwise; one value per row",
+     {THE_GAS, START, LEGS,
+      {"wanted", "Unit of the answer, such as kJ or kJ/kg, or a heading such as W by gas, kJ; left out: J, in flow W", true, GAS_PARAMETER_ANY},
+      HEADINGS, OPTIONS},
+     "GAS.WORK(\"N2\";\"2 kg; 25 °C; 1 bar\";\"isothermal to 8 bar\";\"kJ\")", "368.02"},
+
+    {"GAS.HEAT", "heat", gas_fn_heat,
+     "Total heat along a path, positive into the gas; one value per row",
+     {THE_GAS, START, LEGS,
+      {"wanted", "Unit of the answer, such as kJ or kJ/kg; left out: J, in flow W", true, GAS_PARAMETER_ANY},
+      HEADINGS, OPTIONS},
+     "GAS.HEAT(\"N2\";\"2 kg; 25 °C; 1 bar\";\"isothermal to 8 bar\";\"kJ\")", "-368.02"},
+
+    {"GAS.END", "end", gas_fn_end,
+     "Quantities at the end of a path, or after a leg by state number; one column per wanted heading",
+     {THE_GAS, START, LEGS,
+      {"wanted", "Headings of what is asked, such as T, °C; P, bar(g); the end of the first leg is state 2", false, GAS_PARAMETER_ANY},
+      HEADINGS, OPTIONS},
+     "GAS.END(\"Ar\";\"300 K; 1 bar\";\"isochoric to 600 K\";\"P, bar\")", "2.0000"},
+
+    {"GAS.PATH", "path", gas_fn_path,
+     "One labelled row per leg of a path and a total: end state, work, heat, changes of U, H and S",
+     {THE_GAS, START, LEGS,
+      {"wanted", "Headings of the columns; left out: P, T, V, W, Q, dU, dH, dS", true, GAS_PARAMETER_ANY},
+      HEADINGS, OPTIONS},
+     "GAS.PATH(\"N2\";\"2 kg; 25 °C; 1 bar\";\"isothermal to 8 bar; isobaric to 200 °C\")", "leg"},
+
+    {"GAS.TRACE", "trace", gas_fn_trace,
+     "Points along a path for charts, corners hit exactly, under a heading row",
+     {THE_GAS, START, LEGS,
+      {"wanted", "Headings of the columns, such as V, m3; P, bar; left out: P, T, V, s", true, GAS_PARAMETER_ANY},
+      {"points", "Number of steps along each leg; left out: 20", true, GAS_PARAMETER_ANY},
+      OPTIONS},
+     "GAS.TRACE(\"N2\";\"2 kg; 25 °C; 1 bar\";\"isothermal to 8 bar\";\"V, m3; P, bar\")", "V, m3"},
+
+    {"GAS.CYCLE", "cycle", gas_fn_cycle,
+     "Figures of a path that closes: net work, heat in and out, efficiency or COP, mean effective pressure",
+     {THE_GAS, START, LEGS,
+      {"wanted", "Headings of what is asked: W net, Q in, Q out, efficiency, COP heating, COP cooling, mep; left out: a card", true, GAS_PARAMETER_ANY},
+      OPTIONS},
+     "GAS.CYCLE(\"air | k = 1.4\";\"300 K; 1 bar\";\"adiabatic to V x 0.125; isochoric to 1800 K; adiabatic to V x 8; isochoric to start\";\"efficiency, %\")", "56.47"},
 
     {"GAS.GIVEN", "given", gas_fn_given,
      "A block of givens from scattered cells: heading, value, heading, value and so on",

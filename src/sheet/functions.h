@@ -15,6 +15,12 @@ gas_entry gas_fn_du;      /* fn_heat.c */
 gas_entry gas_fn_ds;      /* fn_heat.c */
 gas_entry gas_fn_temp;    /* fn_heat.c */
 gas_entry gas_fn_unit;    /* fn_unit.c */
+gas_entry gas_fn_work;    /* fn_path.c */
+gas_entry gas_fn_heat;    /* fn_path.c */
+gas_entry gas_fn_end;     /* fn_path.c */
+gas_entry gas_fn_path;    /* fn_path.c */
+gas_entry gas_fn_trace;   /* fn_path.c */
+gas_entry gas_fn_cycle;   /* fn_path.c */
 gas_entry gas_fn_faults;  /* fn_desk.c */
 gas_entry gas_fn_given;   /* fn_desk.c */
 gas_entry gas_fn_solve;   /* fn_solve.c */
