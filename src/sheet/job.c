@@ -71,7 +71,7 @@ static bool refuse_mixed(struct gas_refusal *refusal, const struct gas_heading *
                       gas_dimension_words((flow ? second : first)->unit.dimension), flow ? a : b);
 }
 
-static bool extent_of_givens(struct gas_job *job, struct gas_refusal *refusal)
+bool gas_job_tell_extent(struct gas_job *job, struct gas_refusal *refusal)
 {
     const struct gas_heading *first = NULL;
     job->extent = GAS_EXTENT_NONE;
@@ -89,9 +89,22 @@ static bool extent_of_givens(struct gas_job *job, struct gas_refusal *refusal)
     return true;
 }
 
-static bool extent_of_wanted(const struct gas_job *job, struct gas_refusal *refusal)
+/* A wanted heading without a unit follows the givens: m is kg/s, W is in W, where flows are given. */
+static void follow_flows(struct gas_job *job)
+{
+    for (size_t i = 0; i < job->wanted.columns; i++) {
+        struct gas_unit *unit = &job->wanted.heading[i].unit;
+        for (size_t k = 0; k < EXTENTS && !job->wanted.heading[i].has_unit; k++)
+            if (unit->dimension == extents[k].total)
+                *unit = gas_unit_si(extents[k].flow);
+    }
+}
+
+static bool extent_of_wanted(struct gas_job *job, struct gas_refusal *refusal)
 {
     char shown[80];
+    if (job->extent == GAS_EXTENT_FLOW)
+        follow_flows(job);
     for (size_t i = 0; i < job->wanted.columns && job->extent != GAS_EXTENT_NONE && !job->task->mixed_extents; i++) {
         const struct gas_heading *heading = &job->wanted.heading[i];
         enum gas_extent extent = heading_extent(heading);
@@ -128,7 +141,8 @@ bool gas_job_read(struct gas_job *job, const struct gas_job_arguments *arguments
 bool gas_job_prepare(struct gas_job *job, struct gas_arena *arena, struct gas_refusal *refusal)
 {
     job->barometer_column = gas_job_column(job, GAS_SYM_BAROMETER, 0);
-    return extent_of_givens(job, refusal) && extent_of_wanted(job, refusal) && job->task->prepare(job, arena, refusal);
+    return gas_job_tell_extent(job, refusal) && extent_of_wanted(job, refusal) &&
+           job->task->prepare(job, arena, refusal);
 }
 
 bool gas_job_open(struct gas_job *job, const struct gas_job_arguments *arguments, struct gas_arena *arena,

@@ -74,6 +74,8 @@ bool gas_job_open(struct gas_job *job, const struct gas_job_arguments *arguments
                   struct gas_refusal *refusal);
 /* gas_job_read - the same without preparing, for functions that complete job->wanted first. */
 bool gas_job_read(struct gas_job *job, const struct gas_job_arguments *arguments, struct gas_refusal *refusal);
+/* gas_job_tell_extent - job->extent from the givens; prepare does it too. */
+bool gas_job_tell_extent(struct gas_job *job, struct gas_refusal *refusal);
 /* gas_job_prepare - totals and flows told apart, then the task's prepare. */
 bool gas_job_prepare(struct gas_job *job, struct gas_arena *arena, struct gas_refusal *refusal);
 void gas_job_close(struct gas_job *job);

@@ -21,25 +21,25 @@ struct gas_unit gas_job_unit(const struct gas_job *job, enum gas_dimension dimen
     return gas_unit_parse(otherwise, strlen(otherwise), NULL, &unit, &fault) ? unit : gas_unit_si(dimension);
 }
 
-static const char *pressure(const struct gas_job *job, char buffer[FIGURE], double P)
+static const char *pressure(const struct gas_job *job, const struct gas_path_case *path, char buffer[FIGURE], double P)
 {
     struct gas_unit unit = gas_job_unit(job, GAS_DIM_PRESSURE, "bar");
-    return gas_figure(buffer, FIGURE, gas_unit_from_si(&unit, P, job->options.barometer), &unit);
+    return gas_figure(buffer, FIGURE, gas_unit_from_si(&unit, P, path->figures->barometer), &unit);
 }
 
 static const char *temperature(const struct gas_job *job, char buffer[FIGURE], double T)
 {
     struct gas_unit unit = gas_job_unit(job, GAS_DIM_TEMPERATURE, "°C");
-    return gas_figure(buffer, FIGURE, gas_unit_from_si(&unit, T, job->options.barometer), &unit);
+    return gas_figure(buffer, FIGURE, gas_unit_from_si(&unit, T, GAS_ATMOSPHERE), &unit);
 }
 
 /* What cannot be met, as a phrase: from where this leg starts. */
 static bool refuse_ending(struct gas_refusal *refusal, const char *what, const char *text, const struct gas_job *job,
-                          const struct gas_point *start, const char *words)
+                          const struct gas_path_case *path, const struct gas_point *start)
 {
     char P[FIGURE], T[FIGURE];
-    return gas_refuse(refusal, what, "\"%s\" %s from %s and %s; choose another process or ending.", text, words,
-                      pressure(job, P, start->P), temperature(job, T, start->T));
+    return gas_refuse(refusal, what, "\"%s\" cannot be reached from %s and %s; choose another process or ending.", text,
+                      pressure(job, path, P, start->P), temperature(job, T, start->T));
 }
 
 bool gas_refuse_leg(struct gas_refusal *refusal, const struct gas_job *job, const struct gas_path_case *path,
@@ -72,19 +72,19 @@ bool gas_refuse_leg(struct gas_refusal *refusal, const struct gas_job *job, cons
         return gas_refuse(refusal, what,
                           "\"%s\": the outside pressure %s is on the wrong side of the gas pressure %s for "
                           "this ending.",
-                          text, pressure(job, one, leg->P_outside), pressure(job, other, start->P));
+                          text, pressure(job, path, one, leg->P_outside), pressure(job, path, other, start->P));
     if (fault->argument == ARG_OUTSIDE)
         return gas_refuse(refusal, what, "\"%s\": the outside pressure %s %s.", text,
-                          pressure(job, one, leg->P_outside), gas_status_words(fault->status));
+                          pressure(job, path, one, leg->P_outside), gas_status_words(fault->status));
     if (fault->argument == ARG_POINTS)
         return gas_refuse(refusal, what,
                           "\"%s\": give at least two points with P and V above zero, starting where the gas "
                           "is (%s), with V moving.",
-                          text, pressure(job, one, start->P));
+                          text, pressure(job, path, one, start->P));
     if (fault->status == GAS_NOT_APPLICABLE)
         return gas_refuse(refusal, what, "\"%s\": this ending does not apply to this process%s; choose another.", text,
                           job->options.system == GAS_FLOW ? " in flow" : "");
     if (fault->status == GAS_NOT_POSITIVE || fault->status == GAS_NOT_FINITE)
         return gas_refuse(refusal, what, "\"%s\": the figure of its ending %s.", text, gas_status_words(fault->status));
-    return refuse_ending(refusal, what, text, job, start, "cannot be reached");
+    return refuse_ending(refusal, what, text, job, path, start);
 }

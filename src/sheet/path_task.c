@@ -44,7 +44,7 @@ bool gas_path_open(struct gas_job *job, struct gas_typed_legs *legs, const struc
     if (!gas_job_read(job, arguments, refusal) || !gas_legs_read(legs_argument, &job->options, legs, refusal))
         return false;
     tell_exponent(job, legs);
-    return true;
+    return gas_job_tell_extent(job, refusal);
 }
 
 static bool column_is_there(const struct gas_job *job, const struct gas_typed_leg *leg, size_t number,
@@ -120,7 +120,7 @@ static double figure_si(const struct gas_job *job, const struct gas_case *figure
         return NAN;
     if (figure->kind == GAS_FIGURE_FIXED) {
         *dimension = figure->unit.dimension;
-        return gas_unit_to_si(&figure->unit, figure->figure, job->options.barometer);
+        return gas_unit_to_si(&figure->unit, figure->figure, figures->barometer);
     }
     int column = gas_job_column(job, figure->symbol, figure->state);
     *dimension = job->table.heading[column].unit.dimension;
@@ -188,6 +188,7 @@ bool gas_path_solve(const struct gas_job *job, const struct gas_case *figures, s
     double start[NEEDS];
     if (!gas_solver_run(own->solver, job, figures, start, refusal))
         return false;
+    path->figures = figures;
     path->start = (struct gas_point){start[NEED_P], start[NEED_T], job->gas.R * start[NEED_T] / start[NEED_P]};
     path->n = start[NEED_N];
     path->count = legs->count;

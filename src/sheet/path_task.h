@@ -16,6 +16,7 @@ extern const struct gas_task gas_path_task;
 
 /* One case of a path, worked out. Energies per mole, into the gas. */
 struct gas_path_case {
+    const struct gas_case *figures;
     struct gas_point start;
     double n; /* mol, or mol/s in flow; NAN when the givens do not tell it */
     size_t count;

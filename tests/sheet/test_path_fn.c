@@ -1,18 +1,20 @@
 /*
- * The path functions on cells. Expected figures are arithmetic written out beside the row, for gases whose heat capacity
- * is constant; R and atomic weights as published (SI 2019; IUPAC 2021: N 14.007, Ar 39.95).
+ * The path functions on cells. Expected figures are arithmetic written out beside the row, for gases whose heat
+ * capacity is constant; R and atomic weights as published (SI 2019; IUPAC 2021: N 14.007, Ar 39.95).
  */
 #include <math.h>
 
 #include "check.h"
 #include "formula.h"
 
-#define R     8.31446261815324
-#define M_N2  28.014e-3 /* kg/mol */
-#define M_AR  39.95e-3
-#define K     1.4
-#define BAR   1e5
-#define ARGON_CV (1.5 * R)
+#define R        8.31446261815324
+#define M_N2     28.014e-3 /* kg/mol */
+#define M_AR     39.95e-3
+#define K        1.4
+#define BAR      1e5
+#define R_FIT    8.314510 /* J/(mol K), of the NASA fits: cp of a monatomic gas is 2.5 times this */
+#define ARGON_CP (2.5 * R_FIT)
+#define ARGON_CV (ARGON_CP - R)
 
 struct row {
     const char *id, *formula;
@@ -52,36 +54,64 @@ static void works_and_heats(void)
     const struct row rows[] = {
         {"isothermal-W", "GAS.WORK(\"N2\";\"2 kg; 25 °C; 1 bar\";\"isothermal to 8 bar\";\"kJ\")", isothermal, NULL},
         {"isothermal-Q", "GAS.HEAT(\"N2\";\"2 kg; 25 °C; 1 bar\";\"isothermal to 8 bar\";\"kJ\")", -isothermal, NULL},
-        {"by-gas-option", "GAS.WORK(\"N2\";\"2 kg; 25 °C; 1 bar\";\"isothermal to 8 bar\";\"kJ\";;\"work by gas\")", -isothermal, NULL},
-        {"by-gas-heading", "GAS.WORK(\"N2\";\"2 kg; 25 °C; 1 bar\";\"isothermal to 8 bar\";\"W by gas, kJ\")", -isothermal, NULL},
+        {"by-gas-option", "GAS.WORK(\"N2\";\"2 kg; 25 °C; 1 bar\";\"isothermal to 8 bar\";\"kJ\";;\"work by gas\")",
+         -isothermal, NULL},
+        {"by-gas-heading", "GAS.WORK(\"N2\";\"2 kg; 25 °C; 1 bar\";\"isothermal to 8 bar\";\"W by gas, kJ\")",
+         -isothermal, NULL},
         {"bare-is-J", "GAS.WORK(\"N2\";\"2 kg; 25 °C; 1 bar\";\"isothermal to 8 bar\")", 1000 * isothermal, NULL},
         {"per-kg", "GAS.WORK(\"N2\";\"25 °C; 1 bar\";\"isothermal to 8 bar\";\"kJ/kg\")", isothermal / 2, NULL},
         {"per-mol", "GAS.WORK(\"N2\";\"25 °C; 1 bar\";\"isothermal to 8 bar\";\"J/mol\")", R * 298.15 * log(8), NULL},
-        {"adiabatic-closed", "GAS.WORK(\"N2 | k = 1.4\";\"300 K; 1 bar\";\"adiabatic to 8 bar\";\"J/mol\")", cv * (T2 - 300), NULL},
-        {"adiabatic-flow", "GAS.WORK(\"N2 | k = 1.4\";\"300 K; 1 bar\";\"adiabatic to 8 bar\";\"J/mol\";;\"flow\")", cp * (T2 - 300), NULL},
-        {"adiabatic-78-flow", "GAS.WORK(\"N2 | k = 1.4\";\"300 K; 1 bar\";\"adiabatic 78 % to 8 bar\";\"J/mol\";;\"flow\")", cp * (T2 - 300) / 0.78, NULL},
-        {"power", "GAS.WORK(\"N2 | k = 1.4\";\"0.5 kg/s; 300 K; 1 bar\";\"adiabatic to 8 bar\";\"kW\";;\"flow\")", 0.5 / M_N2 * cp * (T2 - 300) / 1000, NULL},
-        {"polytropic", "GAS.WORK(\"N2\";\"300 K; 1 bar\";\"polytropic n=1.3 to 5 bar\";\"J/mol\")", R * (n13 - 300) / 0.3, NULL},
-        {"polytropic-comma", "GAS.WORK(\"N2\";\"300 K; 1 bar\";\"polytropic n=1,3 to 5 bar\";\"J/mol\")", R * (n13 - 300) / 0.3, NULL},
-        {"isobaric-Q", "GAS.HEAT(\"Ar\";\"1 mol; 300 K; 2 bar\";\"isobaric to 400 K\";\"J\")", 250 * R, NULL},
+        {"adiabatic-closed", "GAS.WORK(\"N2 | k = 1.4\";\"300 K; 1 bar\";\"adiabatic to 8 bar\";\"J/mol\")",
+         cv * (T2 - 300), NULL},
+        {"adiabatic-flow", "GAS.WORK(\"N2 | k = 1.4\";\"300 K; 1 bar\";\"adiabatic to 8 bar\";\"J/mol\";;\"flow\")",
+         cp * (T2 - 300), NULL},
+        {"adiabatic-78-flow",
+         "GAS.WORK(\"N2 | k = 1.4\";\"300 K; 1 bar\";\"adiabatic 78 % to 8 bar\";\"J/mol\";;\"flow\")",
+         cp * (T2 - 300) / 0.78, NULL},
+        {"power", "GAS.WORK(\"N2 | k = 1.4\";\"0.5 kg/s; 300 K; 1 bar\";\"adiabatic to 8 bar\";\"kW\";;\"flow\")",
+         0.5 / M_N2 * cp * (T2 - 300) / 1000, NULL},
+        {"polytropic", "GAS.WORK(\"N2\";\"300 K; 1 bar\";\"polytropic n=1.3 to 5 bar\";\"J/mol\")",
+         R * (n13 - 300) / 0.3, NULL},
+        {"polytropic-comma", "GAS.WORK(\"N2\";\"300 K; 1 bar\";\"polytropic n=1,3 to 5 bar\";\"J/mol\")",
+         R * (n13 - 300) / 0.3, NULL},
+        {"isobaric-Q", "GAS.HEAT(\"Ar\";\"1 mol; 300 K; 2 bar\";\"isobaric to 400 K\";\"J\")", 100 * ARGON_CP, NULL},
         {"isobaric-W", "GAS.WORK(\"Ar\";\"1 mol; 300 K; 2 bar\";\"isobaric to 400 K\";\"J\")", -100 * R, NULL},
-        {"isochoric-flow-W", "GAS.WORK(\"Ar\";\"1 mol/s; 300 K; 2 bar\";\"isochoric to 600 K\";\"W\";;\"flow\")", 300 * R, NULL},
-        {"two-legs", "GAS.WORK(\"Ar\";\"1 mol; 300 K; 1 bar\";\"isobaric to 600 K; isothermal to 2 bar\";\"J\")", -300 * R + 600 * R * log(2), NULL},
-        {"legs-in-cells", "GAS.WORK(\"Ar\";\"1 mol; 300 K; 1 bar\";{\"isobaric to 600 K\"|\"isothermal to 2 bar\"};\"J\")", -300 * R + 600 * R * log(2), NULL},
+        {"isochoric-flow-W", "GAS.WORK(\"Ar\";\"1 mol/s; 300 K; 2 bar\";\"isochoric to 600 K\";\"W\";;\"flow\")",
+         300 * R, NULL},
+        {"two-legs", "GAS.WORK(\"Ar\";\"1 mol; 300 K; 1 bar\";\"isobaric to 600 K; isothermal to 2 bar\";\"J\")",
+         -300 * R + 600 * R * log(2), NULL},
+        {"legs-in-cells",
+         "GAS.WORK(\"Ar\";\"1 mol; 300 K; 1 bar\";{\"isobaric to 600 K\"|\"isothermal to 2 bar\"};\"J\")",
+         -300 * R + 600 * R * log(2), NULL},
         {"free-expansion", "GAS.WORK(\"Ar\";\"1 mol; 300 K; 1 bar\";\"free expansion to V x 2\";\"J\")", 0, NULL},
-        {"throttle-dS", "GAS.END(\"Ar\";\"1 mol; 300 K; 4 bar\";\"free expansion to 1 bar\";\"dS, J/K\")", R * log(4), NULL},
-        {"with-Q", "GAS.END(\"Ar\";\"1 mol; 300 K; 1 bar\";\"isochoric with Q = 1 kJ\";\"T, K\")", 300 + 1000 / ARGON_CV, NULL},
-        {"with-W", "GAS.END(\"Ar\";\"1 mol; 300 K; 1 bar\";\"adiabatic with W = 1 kJ\";\"T, K\")", 300 + 1000 / ARGON_CV, NULL},
-        {"with-W-by-gas", "GAS.END(\"Ar\";\"1 mol; 300 K; 1 bar\";\"adiabatic with W = -1 kJ\";\"T, K\";;\"work by gas\")", 300 + 1000 / ARGON_CV, NULL},
-        {"against", "GAS.WORK(\"Ar\";\"1 mol; 300 K; 4 bar\";\"isothermal against 1 bar to V x 2\";\"J\")", -BAR * R * 300 / (4 * BAR), NULL},
-        {"straight", "GAS.WORK(\"Ar\";\"0.2 m3; 300 K; 1 bar\";\"straight to 3 bar and 0.5 m3\";\"kJ\")", -(1 + 3) * BAR / 2 * 0.3 / 1000, NULL},
-        {"points", "GAS.WORK(\"Ar\";\"0.1 m3; 300 K; 1 bar\";{\"P, bar\";\"V, m3\"|1;0.1|2;0.15|1.5;0.3};\"kJ\")", -(1.5 * 0.05 + 1.75 * 0.15) * 100, NULL},
+        {"throttle-dS", "GAS.END(\"Ar\";\"1 mol; 300 K; 4 bar\";\"free expansion to 1 bar\";\"dS, J/K\")", R * log(4),
+         NULL},
+        {"with-Q", "GAS.END(\"Ar\";\"1 mol; 300 K; 1 bar\";\"isochoric with Q = 1 kJ\";\"T, K\")",
+         300 + 1000 / ARGON_CV, NULL},
+        {"with-W", "GAS.END(\"Ar\";\"1 mol; 300 K; 1 bar\";\"adiabatic with W = 1 kJ\";\"T, K\")",
+         300 + 1000 / ARGON_CV, NULL},
+        {"with-W-by-gas",
+         "GAS.END(\"Ar\";\"1 mol; 300 K; 1 bar\";\"adiabatic with W = -1 kJ\";\"T, K\";;\"work by gas\")",
+         300 + 1000 / ARGON_CV, NULL},
+        {"against", "GAS.WORK(\"Ar\";\"1 mol; 300 K; 4 bar\";\"isothermal against 1 bar to V x 2\";\"J\")",
+         -BAR * R * 300 / (4 * BAR), NULL},
+        {"straight", "GAS.WORK(\"Ar\";\"0.2 m3; 300 K; 1 bar\";\"straight to 3 bar and 0.5 m3\";\"kJ\")",
+         -(1 + 3) * BAR / 2 * 0.3 / 1000, NULL},
+        {"points", "GAS.WORK(\"Ar\";\"0.1 m3; 300 K; 1 bar\";{\"P, bar\";\"V, m3\"|1;0.1|2;0.15|1.5;0.3};\"kJ\")",
+         -(1.5 * 0.05 + 1.75 * 0.15) * 100, NULL},
         {"ratio", "GAS.END(\"Ar\";\"1 mol; 300 K; 1 bar\";\"isothermal to V x 0.25\";\"P, bar(a)\")", 4, NULL},
-        {"gauge-leg", "GAS.WORK(\"N2\";\"25 °C; 0 bar(g)\";\"isothermal to 7 bar(g)\";\"J/mol\")", R * 298.15 * log(8.01325 / 1.01325), NULL},
-        {"barometer", "GAS.WORK(\"N2\";\"25 °C; 0 bar(g)\";\"isothermal to 7 bar(g)\";\"J/mol\";;\"barometer 0.95 bar\")", R * 298.15 * log(7.95 / 0.95), NULL},
-        {"state-2", "GAS.END(\"Ar\";\"1 mol; 300 K; 1 bar\";\"isobaric to 600 K; isochoric to 300 K\";\"T2, K\")", 600, NULL},
+        {"gauge-leg", "GAS.WORK(\"N2\";\"25 °C; 0 bar(g)\";\"isothermal to 7 bar(g)\";\"J/mol\")",
+         R * 298.15 * log(8.01325 / 1.01325), NULL},
+        {"barometer",
+         "GAS.WORK(\"N2\";\"25 °C; 0 bar(g)\";\"isothermal to 7 bar(g)\";\"J/mol\";;\"barometer 0.95 bar\")",
+         R * 298.15 * log(7.95 / 0.95), NULL},
+        {"state-2", "GAS.END(\"Ar\";\"1 mol; 300 K; 1 bar\";\"isobaric to 600 K; isochoric to 300 K\";\"T2, K\")", 600,
+         NULL},
         {"end-m", "GAS.END(\"Ar\";\"2 mol; 300 K; 1 bar\";\"isobaric to 600 K\";\"m, kg\")", 2 * M_AR, NULL},
-        {"cycle-otto", "GAS.CYCLE(\"air | k = 1.4\";\"300 K; 1 bar\";\"adiabatic to V x 0.125; isochoric to 1800 K; adiabatic to V x 8; isochoric to start\";\"efficiency\")", 1 - pow(8, -0.4), NULL},
+        {"cycle-otto",
+         "GAS.CYCLE(\"air | k = 1.4\";\"300 K; 1 bar\";\"adiabatic to V x 0.125; isochoric to 1800 K; adiabatic to V x "
+         "8; isochoric to start\";\"efficiency\")",
+         1 - pow(8, -0.4), NULL},
     };
     CHECK_ROWS(rows, 1e-9);
 }
@@ -89,9 +119,17 @@ static void works_and_heats(void)
 static void tables(void)
 {
     const struct row rows[] = {
-        {"column-P2", "GAS.WORK(\"Ar\";{1;300;4|1;300;8};\"isothermal to P2\";\"J/mol\";{\"P1, bar\";\"T1, K\";\"P2, bar\"})", R * 300 * log(4), NULL},
-        {"column-n", "GAS.END(\"Ar\";{1;300;4;1.2|1;300;8;1.3};\"polytropic n to P2\";\"T, K\";{\"P1, bar\";\"T1, K\";\"P2, bar\";\"n\"})", 300 * pow(4, 0.2 / 1.2), NULL},
-        {"column-efficiency", "GAS.WORK(\"Ar\";{1;300;4;80};\"adiabatic efficiency to P2\";\"J/mol\";{\"P1, bar\";\"T1, K\";\"P2, bar\";\"efficiency, %\"};\"flow\")", 2.5 * R * 300 * (pow(4, 0.4) - 1) / 0.8, NULL},
+        {"column-P2",
+         "GAS.WORK(\"Ar\";{1;300;4|1;300;8};\"isothermal to P2\";\"J/mol\";{\"P1, bar\";\"T1, K\";\"P2, bar\"})",
+         R * 300 * log(4), NULL},
+        {"column-n",
+         "GAS.END(\"Ar\";{1;300;4;1.2|1;300;8;1.3};\"polytropic n to P2\";\"T, K\";{\"P1, bar\";\"T1, K\";\"P2, "
+         "bar\";\"n\"})",
+         300 * pow(4, 0.2 / 1.2), NULL},
+        {"column-efficiency",
+         "GAS.WORK(\"Ar\";{1;300;4;80};\"adiabatic efficiency to P2\";\"J/mol\";{\"P1, bar\";\"T1, K\";\"P2, "
+         "bar\";\"efficiency, %\"};\"flow\")",
+         ARGON_CP * 300 * (pow(4, R / ARGON_CP) - 1) / 0.8, NULL},
     };
     CHECK_ROWS(rows, 1e-9);
 }
@@ -99,26 +137,36 @@ static void tables(void)
 static void refusals(void)
 {
     const struct row rows[] = {
-        {"no-process", "GAS.WORK(\"N2\";\"1 kg; 25 °C; 1 bar\";\"squeeze to 8 bar\";\"kJ\")", 0, "Check leg 1: \"squeeze to 8 bar\": it does not start with a process"},
+        {"no-process", "GAS.WORK(\"N2\";\"1 kg; 25 °C; 1 bar\";\"squeeze to 8 bar\";\"kJ\")", 0,
+         "Check leg 1: \"squeeze to 8 bar\": it does not start with a process"},
         {"no-ending", "GAS.WORK(\"N2\";\"1 kg; 25 °C; 1 bar\";\"isothermal\";\"kJ\")", 0, "it has no ending"},
         {"empty", "GAS.WORK(\"N2\";\"1 kg; 25 °C; 1 bar\";\"\";\"kJ\")", 0, "Check legs: there is none"},
         {"left-out", "GAS.WORK(\"N2\";\"1 kg; 25 °C; 1 bar\";;\"kJ\")", 0, "Check legs: there is none"},
-        {"other-T", "GAS.WORK(\"N2\";\"1 kg; 25 °C; 1 bar\";\"isothermal to 60 °C\";\"kJ\")", 0, "Check leg 1: \"isothermal to 60 °C\""},
+        {"other-T", "GAS.WORK(\"N2\";\"1 kg; 25 °C; 1 bar\";\"isothermal to 60 °C\";\"kJ\")", 0,
+         "Check leg 1: \"isothermal to 60 °C\""},
         {"zero-ratio", "GAS.WORK(\"N2\";\"1 kg; 25 °C; 1 bar\";\"isothermal to V x 0\";\"kJ\")", 0, "Check leg 1"},
-        {"efficiency-0", "GAS.WORK(\"N2\";\"25 °C; 1 bar\";\"adiabatic 0 % to 3 bar\";\"kJ/kg\";;\"flow\")", 0, "efficiency of 0"},
-        {"efficiency-120", "GAS.WORK(\"N2\";\"25 °C; 1 bar\";\"adiabatic 120 % to 3 bar\";\"kJ/kg\";;\"flow\")", 0, "efficiency of 1.2"},
+        {"efficiency-0", "GAS.WORK(\"N2\";\"25 °C; 1 bar\";\"adiabatic 0 % to 3 bar\";\"kJ/kg\";;\"flow\")", 0,
+         "efficiency of 0"},
+        {"efficiency-120", "GAS.WORK(\"N2\";\"25 °C; 1 bar\";\"adiabatic 120 % to 3 bar\";\"kJ/kg\";;\"flow\")", 0,
+         "efficiency of 1.2"},
         {"wrong-side", "GAS.WORK(\"N2\";\"1 kg; 25 °C; 1 bar\";\"against 3 bar to V x 2\";\"kJ\")", 0, "Check leg 1"},
-        {"one-point", "GAS.WORK(\"Ar\";\"0.1 m3; 300 K; 1 bar\";{\"P, bar\";\"V, m3\"|1;0.1};\"kJ\")", 0, "Check leg 1"},
-        {"too-much-heat", "GAS.WORK(\"N2\";\"1 kg; 25 °C; 1 bar\";\"isochoric with Q = -500 kJ\";\"kJ\")", 0, "Check leg 1"},
-        {"no-amount", "GAS.WORK(\"N2\";\"25 °C; 1 bar\";\"isothermal to 8 bar\";\"kJ\")", 0, "the amount of gas does not follow"},
+        {"one-point", "GAS.WORK(\"Ar\";\"0.1 m3; 300 K; 1 bar\";{\"P, bar\";\"V, m3\"|1;0.1};\"kJ\")", 0,
+         "Check leg 1"},
+        {"too-much-heat", "GAS.WORK(\"N2\";\"1 kg; 25 °C; 1 bar\";\"isochoric with Q = -500 kJ\";\"kJ\")", 0,
+         "Check leg 1"},
+        {"no-amount", "GAS.WORK(\"N2\";\"25 °C; 1 bar\";\"isothermal to 8 bar\";\"kJ\")", 0,
+         "the amount of gas does not follow"},
         {"no-start", "GAS.WORK(\"N2\";\"1 kg; 25 °C\";\"isothermal to 8 bar\";\"kJ\")", 0, "Check given"},
-        {"no-column", "GAS.WORK(\"N2\";\"25 °C; 1 bar\";\"isothermal to P2\";\"kJ/kg\")", 0, "takes P2 from the givens"},
+        {"no-column", "GAS.WORK(\"N2\";\"25 °C; 1 bar\";\"isothermal to P2\";\"kJ/kg\")", 0,
+         "takes P2 from the givens"},
         {"wrong-wanted", "GAS.WORK(\"N2\";\"1 kg; 25 °C; 1 bar\";\"isothermal to 8 bar\";\"T, K\")", 0, "Check wanted"},
-        {"open-cycle", "GAS.CYCLE(\"N2\";\"1 kg; 25 °C; 1 bar\";\"isothermal to 8 bar\";\"W net, kJ\")", 0, "does not close"},
+        {"open-cycle", "GAS.CYCLE(\"N2\";\"1 kg; 25 °C; 1 bar\";\"isothermal to 8 bar\";\"W net, kJ\")", 0,
+         "does not close"},
         {"bad-unit", "GAS.WORK(\"N2\";\"1 kg; 25 °C; 1 bar\";\"isothermal to 8 baar\";\"kJ\")", 0, "Check leg 1"},
         {"mass-ending", "GAS.WORK(\"N2\";\"1 kg; 25 °C; 1 bar\";\"isothermal to 8 kg\";\"kJ\")", 0, "Check leg 1"},
         {"points-0", "GAS.TRACE(\"N2\";\"1 kg; 25 °C; 1 bar\";\"isothermal to 8 bar\";;0)", 0, "Check points"},
-        {"passed-on", "GAS.WORK(\"N2\";\"1 kg; 25 °C; 1 bar\";\"Check P1: from elsewhere.\";\"kJ\")", 0, "Check P1: from elsewhere."},
+        {"passed-on", "GAS.WORK(\"N2\";\"1 kg; 25 °C; 1 bar\";\"Check P1: from elsewhere.\";\"kJ\")", 0,
+         "Check P1: from elsewhere."},
     };
     CHECK_ROWS(rows, 0);
 }
@@ -159,10 +207,9 @@ static void trace_points(void)
     gas_arena_free(&arena);
 }
 
-const struct test_suite suite_path_fn = {"path_fn",
-                                         (const struct test_case[]){{"work and heat", works_and_heats},
-                                                                    {"tables", tables},
-                                                                    {"refusals", refusals},
-                                                                    {"path table", path_table},
-                                                                    {"trace", trace_points},
-                                                                    {0}}};
+const struct test_suite suite_path_fn = {"path_fn", (const struct test_case[]){{"work and heat", works_and_heats},
+                                                                               {"tables", tables},
+                                                                               {"refusals", refusals},
+                                                                               {"path table", path_table},
+                                                                               {"trace", trace_points},
+                                                                               {0}}};
