@@ -39,7 +39,7 @@ TEST_SRC    := $(wildcard tests/support/*.c) $(foreach layer,$(UNIT_LAYERS),$(wi
 GLUE_SRC    := $(wildcard tests/support/*.c) $(wildcard tests/glue/*.c) $(filter-out %/main.c,$(call sources,generate))
 suites = $(patsubst test_%.c,suite_%,$(filter test_%,$(notdir $(1))))
 
-.PHONY: all check test demo deps generate install lint valgrind clean help glue tools sdk
+.PHONY: bench all check test demo deps generate install lint valgrind clean help glue tools sdk
 all: $(OXT) ## build the extension, build/gasleaf.oxt
 
 help: ## print the targets
@@ -128,6 +128,13 @@ check: $(BUILD)/tests/run ## build and run the suites that need no office (SUITE
 
 glue: $(BUILD)/tests/glue-run $(ADDIN) ## build and run the suites of the add-in's glue
 	GASLEAF_ADDIN=$(ADDIN) $(BUILD)/tests/glue-run $(SUITE)
+
+BENCHES := $(patsubst %.c,$(BUILD)/%,$(wildcard tests/bench/bench_*.c))
+$(BENCHES): %: %.o $(SHEETLIB) $(LIB)
+	$(CC) $^ -o $@ -ludunits2 -lm -pthread
+
+bench: $(BENCHES) ## time per row of large tables
+	@for b in $(BENCHES); do $$b || exit 1; done
 
 tools: $(foreach tool,make_sheet count_sheet show_table,$(BUILD)/tests/tools/$(tool))
 

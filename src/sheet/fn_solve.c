@@ -9,29 +9,30 @@
 /* -- the card ------------------------------------------------------------------------------------------------------ */
 
 /* clang-format off */
-/* What a card shows of each state, and its unit when no given figure sets one. total: the unit of a flow is its own. */
+/* What a card shows of each state, and its unit when no given figure sets one. */
 static const struct card_row {
+    const char *unit;
+    bool extensive; /* per time in a flow */
     enum gas_symbol symbol;
-    const char *unit, *flow;
     bool per_gas; /* once, not in each state */
 } card_rows[] = {
-    {GAS_SYM_P,          "bar",       NULL,   false},
-    {GAS_SYM_T,          "°C",        NULL,   false},
-    {GAS_SYM_V,          "m3",        "m3",   false},
-    {GAS_SYM_N,          "mol",       "mol",  false},
-    {GAS_SYM_M,          "kg",        "kg",   false},
-    {GAS_SYM_RHO,        "kg/m3",     NULL,   false},
-    {GAS_SYM_V_SPECIFIC, "m3/kg",     NULL,   false},
-    {GAS_SYM_H_SPECIFIC, "J/mol",     NULL,   false},
-    {GAS_SYM_U_SPECIFIC, "J/mol",     NULL,   false},
-    {GAS_SYM_S_SPECIFIC, "J/(mol·K)", NULL,   false},
-    {GAS_SYM_CP,         "J/(mol·K)", NULL,   false},
-    {GAS_SYM_CV,         "J/(mol·K)", NULL,   false},
-    {GAS_SYM_GAMMA,      "",          NULL,   false},
-    {GAS_SYM_DU,         "J/mol",     NULL,   true},
-    {GAS_SYM_DH,         "J/mol",     NULL,   true},
-    {GAS_SYM_DS,         "J/(mol·K)", NULL,   true},
-    {GAS_SYM_M_MOLAR,    "kg/kmol",   NULL,   true},
+    {"bar",        false, GAS_SYM_P,           false},
+    {"°C",         false, GAS_SYM_T,           false},
+    {"m3",         true,   GAS_SYM_V,           false},
+    {"mol",        true,  GAS_SYM_N,           false},
+    {"kg",         true,   GAS_SYM_M,           false},
+    {"kg/m3",      false, GAS_SYM_RHO,         false},
+    {"m3/kg",      false, GAS_SYM_V_SPECIFIC,  false},
+    {"J/mol",      false, GAS_SYM_H_SPECIFIC,  false},
+    {"J/mol",      false, GAS_SYM_U_SPECIFIC,  false},
+    {"J/(mol·K)",  false, GAS_SYM_S_SPECIFIC,  false},
+    {"J/(mol·K)",  false, GAS_SYM_CP,          false},
+    {"J/(mol·K)",  false, GAS_SYM_CV,          false},
+    {"",           false, GAS_SYM_GAMMA,       false},
+    {"J/mol",      false, GAS_SYM_DU,          true},
+    {"J/mol",      false, GAS_SYM_DH,          true},
+    {"J/(mol·K)",  false, GAS_SYM_DS,          true},
+    {"kg/kmol",    false, GAS_SYM_M_MOLAR,     true},
 };
 /* clang-format on */
 enum { CARD_KINDS = sizeof card_rows / sizeof *card_rows, CARD_ROWS = (GAS_STATES + 1) * CARD_KINDS };
@@ -66,7 +67,7 @@ static bool default_unit(const struct card *card, const struct card_row *row, st
         unit->text[0] = '\0';
         return true;
     }
-    bool flow = row->flow && card->job->extent == GAS_EXTENT_FLOW;
+    bool flow = row->extensive && card->job->extent == GAS_EXTENT_FLOW;
     snprintf(text, sizeof text, "%s%s%s", row->unit, flow ? "/" : "", flow ? card->time : "");
     if (gas_unit_parse(text, strlen(text), NULL, unit, &fault))
         return true;

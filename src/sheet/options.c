@@ -83,7 +83,7 @@ static bool read_conditions(struct reader *reader, double *T, double *P)
 
 static bool read_barometer(struct reader *reader)
 {
-    double P;
+    double P = NAN;
     if (!read_figure(reader, reader->rest, GAS_DIM_PRESSURE, &P))
         return false;
     if (!(P >= GAS_BAROMETER_LEAST && P <= GAS_BAROMETER_MOST))
@@ -96,7 +96,7 @@ static bool read_barometer(struct reader *reader)
 
 static bool read_altitude(struct reader *reader)
 {
-    double altitude;
+    double altitude = NAN;
     if (!read_figure(reader, reader->rest, GAS_DIM_LENGTH, &altitude))
         return false;
     struct gas_result P = gas_standard_atmosphere_pressure(altitude);

@@ -143,7 +143,10 @@ static struct solver_entry *entry_for(struct gas_solver *solver, const struct ga
             solver->last = i;
             return &solver->entry[i];
         }
-    solver->last = solver->entries < solver->room ? solver->entries++ : (solver->last + 1) % solver->room;
+    if (solver->entries < solver->room)
+        solver->last = solver->entries++;
+    else
+        solver->last = solver->last + 1 < solver->room ? solver->last + 1 : 0;
     make_entry(solver, job, mask, &solver->entry[solver->last]);
     return &solver->entry[solver->last];
 }

@@ -149,17 +149,16 @@ bool solver_refuse_knowns(const struct gas_job *job, const struct solver_entry *
 
 /* -- figures that cannot be ---------------------------------------------------------------------------------------- */
 
-/* The heading whose unit the user would read a variable in; NULL: none is given. */
-static const struct gas_heading *heading_for(const struct gas_solver *solver, const struct gas_job *job,
-                                             struct gas_known known)
+/* The column in whose unit the user would read a variable; -1: none is given. */
+static int column_for(const struct gas_solver *solver, struct gas_known known)
 {
-    const struct gas_heading *other = NULL;
+    int other = -1;
     for (size_t i = 0; i < solver->columns; i++) {
         if (!solver->column[i].used || solver->column[i].known.variable != known.variable)
             continue;
         if (solver->column[i].known.state == known.state)
-            return &job->table.heading[i];
-        other = &job->table.heading[i];
+            return (int)i;
+        other = (int)i;
     }
     return other;
 }
@@ -167,8 +166,9 @@ static const struct gas_heading *heading_for(const struct gas_solver *solver, co
 static const char *figure_of(char buffer[80], const struct gas_solver *solver, const struct gas_job *job,
                              const struct gas_case *figures, struct gas_known known, double si)
 {
-    const struct gas_heading *heading = heading_for(solver, job, known);
-    if (heading)
+    int column = column_for(solver, known);
+    const struct gas_heading *heading = &job->table.heading[column < 0 ? 0 : column];
+    if (column >= 0)
         return gas_figure(buffer, 80, gas_job_shown(job, figures, heading, si), &heading->unit);
     gas_number_format(buffer, 60, si, 6);
     size_t used = strlen(buffer);
@@ -192,6 +192,31 @@ static bool refuse_figure(const struct gas_job *job, const struct solver_entry *
     return gas_refuse(refusal, name, "%s %s.", shown, gas_status_words(result.status));
 }
 
+/* The figure given for a variable, NAN when none is. */
+static double given_figure(const struct solver_entry *entry, const struct gas_case *figures, struct gas_known known)
+{
+    double si = NAN;
+    for (size_t i = 0; i < entry->count; i++)
+        if (entry->known[i].variable == known.variable &&
+            (entry->known[i].state == known.state || entry->known[i].state == 0 || known.state == 0))
+            si = figures->si[entry->column[i]];
+    return si;
+}
+
+/* Both sides in SI, where no single figure can be named. */
+static bool refuse_sides(const struct gas_values *values, const char *balance, const char *allowed,
+                         struct gas_refusal *refusal)
+{
+    char left[40], right[40], apart[40];
+    gas_number_format(left, sizeof left, values->left, 6);
+    gas_number_format(right, sizeof right, values->right, 6);
+    gas_number_format(apart, sizeof apart, fabs(values->left / values->right - 1) * 100, 3);
+    return gas_refuse(refusal, "given",
+                      "the figures disagree in %s: %s on the left, %s on the right (SI), %s %% apart where %s %% is "
+                      "allowed; correct one or leave one out.",
+                      balance, left, right, apart, allowed);
+}
+
 static bool refuse_contradiction(const struct gas_solver *solver, const struct gas_job *job,
                                  const struct solver_entry *entry, const struct gas_case *figures,
                                  const struct gas_values *values, struct gas_refusal *refusal)
@@ -199,34 +224,22 @@ static bool refuse_contradiction(const struct gas_solver *solver, const struct g
     const struct gas_step *check = &entry->plan.check[values->failed_check];
     struct gas_known doubted = {(enum gas_variable)check->target, check->target_state};
     char name[GAS_NAME_TEXT], given[80], other[80], apart[40], allowed[40], balance[GAS_STEP_TEXT];
-    double si = NAN;
-    for (size_t i = 0; i < entry->count; i++)
-        if (entry->known[i].variable == doubted.variable &&
-            (entry->known[i].state == doubted.state || entry->known[i].state == 0 || doubted.state == 0))
-            si = figures->si[entry->column[i]];
+    double si = given_figure(entry, figures, doubted);
     gas_step_balance_text(&entry->plan, check, balance, sizeof balance);
     gas_number_format(allowed, sizeof allowed, job->options.agree * 100, 3);
-    if (isnan(si) || isnan(values->balanced)) {
-        gas_number_format(given, 40, values->left, 6);
-        gas_number_format(other, 40, values->right, 6);
-        gas_number_format(apart, sizeof apart, fabs(values->left / values->right - 1) * 100, 3);
-        return gas_refuse(refusal, "given",
-                          "the figures disagree in %s: %s on the left, %s on the right (SI), %s %% "
-                          "apart where %s %% is allowed; correct one or leave one out.",
-                          balance, given, other, apart, allowed);
-    }
+    if (isnan(si) || isnan(values->balanced))
+        return refuse_sides(values, balance, allowed, refusal);
     figure_of(given, solver, job, figures, doubted, si);
     figure_of(other, solver, job, figures, doubted, values->balanced);
     variable_name(name, doubted);
     if (!(si > 0 && values->balanced > 0))
         return gas_refuse(refusal, "given",
-                          "%s is given as %s, but the other figures make it %s (%s); correct one or "
-                          "leave one out.",
+                          "%s is given as %s, but the other figures make it %s (%s); correct one or leave one out.",
                           name, given, other, balance);
     gas_number_format(apart, sizeof apart, fabs(si / values->balanced - 1) * 100, 3);
     return gas_refuse(refusal, "given",
-                      "%s is given as %s, but the other figures make it %s (%s): %s %% apart where "
-                      "%s %% is allowed; correct one or leave one out.",
+                      "%s is given as %s, but the other figures make it %s (%s): %s %% apart where %s %% is allowed; "
+                      "correct one or leave one out.",
                       name, given, other, balance, apart, allowed);
 }
 
@@ -237,36 +250,42 @@ static bool same_temperature(double a, double b)
     return fabs(a - b) <= 1e-9 * fabs(b);
 }
 
+/* The given temperature of a state, else of any state; NULL: none is given. */
+static const struct gas_heading *temperature_heading(const struct gas_job *job, int state)
+{
+    int column = gas_job_column(job, GAS_SYM_T, state);
+    for (int other = 0; column < 0 && other <= GAS_STATES; other++)
+        column = gas_job_column(job, GAS_SYM_T, other);
+    return column < 0 ? NULL : &job->table.heading[column];
+}
+
 bool gas_refuse_outside(struct gas_refusal *refusal, const struct gas_job *job, int state, double T)
 {
-    static const enum gas_symbol symbol = GAS_SYM_T;
     char name[GAS_NAME_TEXT], shown[80], from[40], to[80];
     struct gas_range range = gas_range_of(&job->gas);
-    const struct gas_heading *heading = NULL;
-    for (size_t i = 0; i < job->table.columns; i++) {
-        const struct gas_heading *candidate = &job->table.heading[i];
-        bool better = !heading || candidate->state == state;
-        if (candidate->symbol == symbol && !candidate->tolerance && better)
-            heading = candidate;
-    }
-    struct gas_unit unit = heading ? heading->unit : gas_unit_si(GAS_DIM_TEMPERATURE);
-    if (same_temperature(T, job->options.datum.T) && (T < range.T_from || T > range.T_to)) {
-        gas_figure(from, sizeof from, range.T_from, NULL);
-        gas_figure(to, sizeof to, range.T_to, NULL);
-        return gas_refuse(refusal, "options",
-                          "the datum of h and s, %g K, is outside the data for %s (%s to %s K); "
-                          "move it with an option such as \"datum 100 °C\".",
-                          T, job->choice->label, from, to);
-    }
-    /* 25 may be degrees Celsius only where no unit was written */
-    int shown_state = heading && heading->state == state ? state : heading && heading->state == 0 ? 0 : state;
-    gas_quantity_name(name, symbol, shown_state);
-    if (!heading || !heading->has_unit)
+    const struct gas_heading *heading = temperature_heading(job, state);
+    const struct gas_unit unit = heading ? heading->unit : gas_unit_si(GAS_DIM_TEMPERATURE);
+    gas_quantity_name(name, GAS_SYM_T, heading && heading->state == 0 ? 0 : state);
+    if (!heading || !heading->has_unit) /* 25 may be degrees Celsius only where no unit was written */
         return gas_refuse_temperature(refusal, name, T, &unit, job->choice->label, range.T_from, range.T_to);
     gas_figure(shown, sizeof shown, gas_unit_from_si(&unit, T, 0), &unit);
     gas_number_format(from, sizeof from, gas_unit_from_si(&unit, range.T_from, 0), 6);
     gas_figure(to, sizeof to, gas_unit_from_si(&unit, range.T_to, 0), &unit);
     return gas_refuse(refusal, name, "%s is outside the data for %s (%s to %s).", shown, job->choice->label, from, to);
+}
+
+static bool refuse_datum(struct gas_refusal *refusal, const struct gas_job *job)
+{
+    char datum[40], from[40], to[40];
+    struct gas_range range = gas_range_of(&job->gas);
+    gas_number_format(datum, sizeof datum, job->options.datum.T, 6);
+    gas_number_format(from, sizeof from, range.T_from, 6);
+    gas_number_format(to, sizeof to, range.T_to, 6);
+    return gas_refuse(
+        refusal, "options",
+        "the datum of h and s, %s K, is outside the data for %s (%s to %s K); move it with an option such "
+        "as \"datum 100 °C\".",
+        datum, job->choice->label, from, to);
 }
 
 /* The temperature that should have come out of h, u or s. */
@@ -296,6 +315,8 @@ static bool refuse_answer(const struct gas_solver *solver, const struct gas_job 
     case GAS_NO_HEAT_CAPACITY:
         return gas_refuse(refusal, "gas", "%s %s.", job->choice->label, gas_status_words(result.status));
     case GAS_OUTSIDE_DATA:
+        if (same_temperature(result.figure, job->options.datum.T))
+            return refuse_datum(refusal, job);
         return known.variable == GAS_VAR_T ? refuse_unreached(job, known.state, refusal)
                                            : gas_refuse_outside(refusal, job, step ? step->state_a : 0, result.figure);
     case GAS_NOT_POSITIVE:

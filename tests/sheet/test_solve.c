@@ -210,6 +210,7 @@ static const struct sentence_row sentences[] = {
     {"a total change of unlike amounts", "GAS.SOLVE(\"N2\";\"m1 = 3 kg; m2 = 5 kg; T1 = 20 °C; T2 = 90 °C\";\"dH, kJ\")", 0, 0, "...dH is for one amount of gas"},
     {"explicit kelvin is no slip", "GAS.SOLVE(\"N2\";\"T = 25 K\";\"cp\")", 0, 0, "Check T: 25 K is outside the data for nitrogen (200 to 20000 K)."},
     {"the datum is outside the data", "GAS.SOLVE(\"SF6 | cp = 0.66 kJ/kg-K, 300 to 500 K\";\"40 °C; 3 bar\";\"h, kJ/kg\")", 0, 0, "...move it with an option such as \"datum 100 °C\""},
+    {"cp at the datum, outside the data", "GAS.SOLVE(\"SF6 | cp = 0.66 kJ/kg-K, 300 to 500 K\";\"T = 25 °C\";\"cp\")", 0, 0, "Check T: 25 °C is outside the data for sulfur hexafluoride (26.85 to 226.85 °C)."},
     {"h beyond the data", "GAS.SOLVE(\"N2\";\"h = 30 MJ/mol; 3 bar\";\"T, K\")", 0, 0, "...it would be outside the data for nitrogen"},
     {"rigid vessel, contradiction", "GAS.SOLVE(\"N2\";\"V = 2 m3; P1 = 2 bar; T1 = 300 K; P2 = 3 bar; T2 = 500 K\";\"m, kg\")", 0, 0,
      /* 300 K x 3/2 = 450 K; 500/450 = 1.1111 */
