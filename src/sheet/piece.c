@@ -51,7 +51,7 @@ static size_t matched(struct gas_piece piece, const char *words)
         if (*words == ' ')
             while (i < piece.length && piece.at[i] == ' ')
                 i++;
-        else if (i < piece.length && tolower((unsigned char)piece.at[i]) == *words)
+        else if (i < piece.length && tolower((unsigned char)piece.at[i]) == (unsigned char)*words)
             i++;
         if (i == before)
             return 0;
