@@ -5,7 +5,8 @@
 #include <stdlib.h>
 #include <string.h>
 
-const struct gas_T_unit gas_T_kelvin = {1, 0, "K"};
+const struct gas_T_unit gas_T_kelvin = {
+    .scale = 1, .level = {.dimension = GAS_DIM_TEMPERATURE, .scale = 1, .text = "K"}, .text = "K"};
 
 /* "T/1000", "K/1000", "degR/100": what follows the slash, 1 without one. */
 static double divisor(struct gas_piece *text)
@@ -39,7 +40,7 @@ bool gas_T_unit_read(struct gas_piece text, struct gas_T_unit *unit, struct gas_
     gas_quoted(quoted, sizeof quoted, shown.at, shown.length);
     if (parsed.dimension != GAS_DIM_TEMPERATURE)
         return gas_refuse(refusal, "T unit", "%s is not a unit of temperature; write K, °C, °R, °F or T/1000.", quoted);
-    *unit = (struct gas_T_unit){thousands * parsed.scale, parsed.offset / thousands, ""};
+    *unit = (struct gas_T_unit){thousands * parsed.scale, parsed.offset / thousands, parsed, ""};
     snprintf(unit->text, sizeof unit->text, "%.*s", (int)shown.length, shown.at);
     return true;
 }

@@ -14,7 +14,8 @@
 enum { GAS_CP_TERMS = 32 };
 
 struct gas_T_unit {
-    double scale, offset; /* K = scale (x + offset) */
+    double scale, offset;  /* K = scale (x + offset) */
+    struct gas_unit level; /* K, degC, ...: the same without the thousands, for a range */
     char text[24];
 };
 extern const struct gas_T_unit gas_T_kelvin;

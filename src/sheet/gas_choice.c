@@ -148,7 +148,7 @@ static bool read_block(struct gas_draft *draft, const struct gas_block *block)
 {
     if (gas_single(block))
         return read_text(draft, (struct gas_piece){block->cell->text, block->cell->length});
-    return gas_draft_mixture_range(draft, block);
+    return gas_is_card(block) ? gas_draft_card(draft, block) : gas_draft_mixture_range(draft, block);
 }
 
 static bool copy_key(struct kept *made, const struct gas_block *block, const struct key *key)

@@ -24,10 +24,14 @@ const char *gas_draft_copy(struct gas_draft *draft, const char *text)
 /* Characters of typesetters and what they stand for. */
 static const struct {
     const char *printed, *plain;
-} spelling[] = {{"\u00a0", ""},   {"\u2009", ""},   {"\u202f", ""},   {"\u2212", "-"},  {"\u2013", "-"},
-                {"\u00b7", "*"},  {"\u22c5", "*"},  {"\u00d7", "*"},  {"\u00b9", "^1"}, {"\u00b2", "^2"},
-                {"\u00b3", "^3"}, {"\u2070", "^0"}, {"\u2074", "^4"}, {"\u2075", "^5"}, {"\u2076", "^6"},
-                {"\u2077", "^7"}, {"\u2078", "^8"}, {"\u2079", "^9"}, {"\u207b", "^-"}, {"\u221e", "inf"}};
+} spelling[] = {
+    {"\u00a0", ""},      {"\u2009", ""},      {"\u202f", ""},   {"\u2212", "-"},  {"\u2013", "-"},  {"\u00b7", "*"},
+    {"\u22c5", "*"},     {"\u00d7", "*"},     {"\u00b9", "^1"}, {"\u00b2", "^2"}, {"\u00b3", "^3"}, {"\u2070", "^0"},
+    {"\u2074", "^4"},    {"\u2075", "^5"},    {"\u2076", "^6"}, {"\u2077", "^7"}, {"\u2078", "^8"}, {"\u2079", "^9"},
+    {"\u2080", "0"},     {"\u2081", "1"},     {"\u2082", "2"},  {"\u2083", "3"},  {"\u2084", "4"},  {"\u2085", "5"},
+    {"\u2086", "6"},     {"\u2087", "7"},     {"\u2088", "8"},  {"\u2089", "9"},  {"\u207b", "^-"}, {"\u221e", "inf"},
+    {"\u03b8", "theta"}, {"\u0398", "theta"},
+};
 
 static char lower(char c)
 {
@@ -47,22 +51,29 @@ static size_t fold_one(struct gas_piece text, char one[2], const char **plain)
     return *plain = one, 1;
 }
 
+/* A minus that is part of a number: "10^-3", "1e-5". */
+static bool keeps_minus(const char *buffer, size_t used)
+{
+    if (used && buffer[used - 1] == '^')
+        return true;
+    return used > 1 && buffer[used - 1] == 'e' && buffer[used - 2] >= '0' && buffer[used - 2] <= '9';
+}
+
 const char *gas_fold(char *buffer, size_t size, struct gas_piece text)
 {
     size_t used = 0;
-    bool raised = false; /* behind a '^': a further superscript belongs to the same number, a minus is kept */
-    while (text.length && used + 4 < size) {
+    bool raised = false; /* behind a '^': a further superscript belongs to the same number */
+    while (text.length && used + 8 < size) {
         char one[2];
         const char *plain;
         size_t bytes = fold_one(text, one, &plain);
-        if (text.at[0] == '-' && used && buffer[used - 1] == '^')
-            plain = "-";
+        if (text.at[0] == '-' || strcmp(plain, "-") == 0)
+            plain = keeps_minus(buffer, used) ? "-" : "";
         if (plain[0] == '^' && plain[1] && raised)
             plain++;
         raised = plain[0] == '^' || (raised && plain[0] && strchr("-0123456789", plain[0]));
-        if (!(strcmp(plain, "-") == 0 && (used == 0 || buffer[used - 1] != '^')))
-            for (; *plain; plain++)
-                buffer[used++] = *plain;
+        while (*plain)
+            buffer[used++] = *plain++;
         text = (struct gas_piece){text.at + bytes, text.length - bytes};
     }
     buffer[used] = '\0';

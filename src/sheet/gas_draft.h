@@ -2,7 +2,7 @@
  * gas_draft.h - a gas while it is being read; what the readers of names, mixtures, cards and rules share. (internal)
  *
  * The way of a gas: gas_choice.c looks a text or a range up in its cache; when it is new, one of gas_name.c,
- * gas_mixture.c fills a draft, gas_rule.c changes it by what stands after '|', gas_draft.c checks it.
+ * gas_mixture.c, gas_card.c fills a draft, gas_rule.c changes it by what stands after '|', gas_draft.c checks it.
  */
 #ifndef SHEET_GAS_DRAFT_H
 #define SHEET_GAS_DRAFT_H
@@ -36,6 +36,10 @@ const char *gas_species_source_words(const struct gas_species *species);
 /* gas_mixture.c: a name, or a mixture such as "N2 79 + O2 21"; a range component | fraction. */
 bool gas_draft_text(struct gas_draft *draft, struct gas_piece text);
 bool gas_draft_mixture_range(struct gas_draft *draft, const struct gas_block *block);
+
+/* gas_card.c: label | value | unit. */
+bool gas_is_card(const struct gas_block *block);
+bool gas_draft_card(struct gas_draft *draft, const struct gas_block *block);
 
 /* gas_rule.c: what stands after '|'. */
 bool gas_draft_rules(struct gas_draft *draft, struct gas_piece rules);

@@ -37,7 +37,8 @@ bool gas_rules_apply(const struct gas_rules *rules, struct gas_draft *draft);
 
 /* "298 to 2000 K", "from 25 degC to 1000 degC", "298-2000 K". */
 bool gas_rules_range(struct gas_rules *rules, struct gas_piece text);
-bool gas_T_range_read(struct gas_piece text, double *T_from, double *T_to, struct gas_refusal *refusal);
+bool gas_T_range_read(struct gas_piece text, const struct gas_unit *bare, double *T_from, double *T_to,
+                      struct gas_refusal *refusal);
 
 /* A molar mass and a gas constant with their units as typed (unit->text "": none); refuse what cannot be one. */
 bool gas_molar_mass_read(double figure, const struct gas_unit *unit, double *M, struct gas_refusal *refusal);

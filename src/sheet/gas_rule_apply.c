@@ -45,9 +45,10 @@ static bool read_level(struct gas_piece text, const struct gas_unit *other, doub
     return gas_accept_level(refusal, "range", figure, unit, GAS_ATMOSPHERE);
 }
 
-bool gas_T_range_read(struct gas_piece text, double *T_from, double *T_to, struct gas_refusal *refusal)
+bool gas_T_range_read(struct gas_piece text, const struct gas_unit *bare, double *T_from, double *T_to,
+                      struct gas_refusal *refusal)
 {
-    struct gas_unit kelvin = gas_unit_si(GAS_DIM_TEMPERATURE), upper, lower;
+    struct gas_unit upper, lower;
     char shown[80];
     double figure;
     size_t used = 0, bytes, part;
@@ -59,7 +60,7 @@ bool gas_T_range_read(struct gas_piece text, double *T_from, double *T_to, struc
     if (!used || !part)
         return gas_refuse(refusal, "range", "%s is not a range of temperatures; write one such as 298 to 2000 K.",
                           gas_quoted(shown, sizeof shown, text.at, text.length));
-    if (!read_level((struct gas_piece){text.at + part + bytes, text.length - part - bytes}, &kelvin, T_to, &upper,
+    if (!read_level((struct gas_piece){text.at + part + bytes, text.length - part - bytes}, bare, T_to, &upper,
                     refusal) ||
         !read_level((struct gas_piece){text.at, part}, &upper, T_from, &lower, refusal))
         return false;
@@ -74,7 +75,8 @@ bool gas_rules_range(struct gas_rules *rules, struct gas_piece text)
     if (rules->range_said)
         return gas_refuse(rules->refusal, WHAT, "two ranges are given; keep one.");
     rules->range_said = true;
-    return gas_T_range_read(text, &rules->T_from, &rules->T_to, rules->refusal);
+    const struct gas_unit kelvin = gas_unit_si(GAS_DIM_TEMPERATURE);
+    return gas_T_range_read(text, &kelvin, &rules->T_from, &rules->T_to, rules->refusal);
 }
 
 bool gas_constants_apply(struct gas_draft *draft, double M, double universal, double specific)
