@@ -32,7 +32,7 @@ static void write_method(FILE *out, const struct gas_function *function)
 
 void gas_write_interface(FILE *out, const struct gas_function *functions, size_t count)
 {
-    fputs("// Generated from src/sheet/catalogue.c by `make generate`.\n"
+    fputs("// Generated from src/audit/catalogue.c by `make generate`.\n"
           "module gasleaf\n{\n"
           "    /** The worksheet functions. A member's place is its row in the catalogue. */\n"
           "    interface XFunctions\n    {",
@@ -46,7 +46,7 @@ void gas_write_service(FILE *out, const struct gas_function *functions, size_t c
 {
     (void)functions;
     (void)count;
-    fputs("// Generated from src/sheet/catalogue.c by `make generate`.\n"
+    fputs("// Generated from src/audit/catalogue.c by `make generate`.\n"
           "module gasleaf\n{\n"
           "    service Functions : XFunctions;\n"
           "};\n",

@@ -67,7 +67,7 @@ void gas_write_reference(FILE *out, const struct gas_function *functions, size_t
 {
     fputs(
         "# Worksheet functions\n\n"
-        "<!-- Generated from src/sheet/catalogue.c by `make generate`. -->\n\n"
+        "<!-- Generated from src/audit/catalogue.c by `make generate`. -->\n\n"
         "Arguments are separated by `;` here, columns of an inline array by `;`, its rows by `|`; Calc shows and takes "
         "the separators of\nits own settings. Square brackets mark what can be left out. Of an answer that is a table "
         "the example shows the first cell.\n\n",

@@ -56,7 +56,7 @@ static void write_function(FILE *out, const struct gas_function *function)
 void gas_write_wizard(FILE *out, const struct gas_function *functions, size_t count)
 {
     fputs("<?xml version=\"1.0\" encoding=\"UTF-8\"?>\n"
-          "<!-- Generated from src/sheet/catalogue.c by `make generate`. -->\n"
+          "<!-- Generated from src/audit/catalogue.c by `make generate`. -->\n"
           "<oor:component-data xmlns:oor=\"http://openoffice.org/2001/registry\"\n"
           "    xmlns:xs=\"http://www.w3.org/2001/XMLSchema\" oor:name=\"CalcAddIns\" "
           "oor:package=\"org.openoffice.Office\">\n"

@@ -171,6 +171,17 @@ static bool read_agree(struct reader *reader)
     return true;
 }
 
+static bool read_digits(struct reader *reader)
+{
+    double figure;
+    size_t used;
+    if (!gas_number_parse(reader->rest.at, reader->rest.length, &figure, &used) || used != reader->rest.length ||
+        !(figure >= 1 && figure <= 9) || figure != floor(figure))
+        return refuse_form(reader);
+    reader->options->digits = (int)figure;
+    return true;
+}
+
 /* THE table of options: words (lower case, longer ones first), what follows them, the reader. */
 /* clang-format off */
 static const struct option {
@@ -190,6 +201,7 @@ static const struct option {
     {"normal",       true,  "normal 0 °C, 1 bar",      read_normal},
     {"standard",     true,  "standard 20 °C, 1 atm",   read_standard},
     {"scf",          true,  "scf 60 °F, 14.73 psi",    read_scf},
+    {"digits",       true,  "digits 4",                read_digits},
     {"hard errors",  false, "hard errors",             read_hard_errors},
 };
 /* clang-format on */

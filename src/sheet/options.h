@@ -1,5 +1,6 @@
 /*
- * options.h - the options text: "barometer 0.98 bar; work by gas; flow; datum 0 degC; agree 0.5 %; hard errors".
+ * options.h - the options text: "barometer 0.98 bar; work by gas; flow; datum 0 degC; agree 0.5 %; hard errors; digits
+ * 4".
  */
 #ifndef SHEET_OPTIONS_H
 #define SHEET_OPTIONS_H
@@ -21,6 +22,7 @@ struct gas_options {
     bool hard_errors;                 /* #N/A in place of a sentence */
     struct gas_datum datum;           /* h = s = 0 */
     double agree;                     /* relative disagreement allowed among over-determined givens */
+    int digits;                       /* of the figures that are checked; 0: their own */
     struct gas_references references; /* what Nm3, Sm3, scf mean */
 };
 

@@ -1,5 +1,6 @@
 #include "sheet/catalogue.h"
 
+#include "audit/functions.h"
 #include "sheet/functions.h"
 
 /* clang-format off */
@@ -7,6 +8,11 @@
 #define LEGS              {"legs", "Processes and where they end, such as isothermal to 8 bar; adiabatic to 2 bar, or a range of them", false, GAS_PARAMETER_ANY}
 #define HEADINGS          {"headings", "Headings of the columns of given, such as P1, bar(g), when they do not stand in it", true, GAS_PARAMETER_ANY}
 #define OPTIONS           {"options", "Text of options, such as flow; work by gas; barometer 0.98 bar", true, GAS_PARAMETER_ANY}
+#define CHECKED_GAS       {"gas", "Name, formula or CAS number; a mixture; a card; a rule after | holds what the old sheet assumes of cp", false, GAS_PARAMETER_ANY}
+#define CHECKED           {"given", "What is given, as for SOLVE or PATH: a text, a block, or a table with headings", false, GAS_PARAMETER_ANY}
+#define LEGACY            {"legacy", "Old figure or figures, one for each case and wanted heading; a text keeps its digits, such as 0.720", false, GAS_PARAMETER_ANY}
+#define CHECKED_LEGS      {"legs", "Legs of a path, when the figure comes from one, such as isothermal to 8 bar", true, GAS_PARAMETER_ANY}
+#define AUDIT_OPTIONS     {"options", "Text of options, such as digits 4; flow; work by gas; barometer 0.98 bar", true, GAS_PARAMETER_ANY}
 #define THE_GAS           {"gas", "Name, formula or CAS number; a mixture such as N2 79 + O2 21; a card or mixture range; a rule after |", false, GAS_PARAMETER_ANY}
 #define TEMPERATURE       {"temperature", "Temperature in K, or in the temperature unit; a text may carry its own unit", false, GAS_PARAMETER_ANY}
 #define TEMPERATURE_FROM  {"from", "Temperature at the start, in K or in the temperature unit", false, GAS_PARAMETER_ANY}
@@ -123,6 +129,18 @@ static const struct gas_function rows[] = {
       {"wanted", "Headings of what is asked: W net, Q in, Q out, efficiency, COP heating, COP cooling, mep; left out: a card", true, GAS_PARAMETER_ANY},
       OPTIONS},
      "GAS.CYCLE(\"air | k = 1.4\";\"300 K; 1 bar\";\"adiabatic to V x 0.125; isochoric to 1800 K; adiabatic to V x 8; isochoric to start\";\"efficiency, %\")", "56.47"},
+
+    {"GAS.AUDIT", "audit", gas_fn_audit,
+     "Verdict on the figures of an old sheet: agrees, rounded constant, or differs, with the slips that would explain it",
+     {CHECKED_GAS, CHECKED, {"wanted", "Heading of the old figure, such as m, kg, or a range of headings", false, GAS_PARAMETER_ANY},
+      LEGACY, CHECKED_LEGS, HEADINGS, AUDIT_OPTIONS},
+     "GAS.AUDIT(\"N2\";\"7 bar(g); 35 °C; 12 m3\";\"m, kg\";91.85)", "differs by -12.6 %: 91.85 against 105.14 kg. Likely: 7 bar(g) taken as absolute (gives 91.846)"},
+
+    {"GAS.AUDITLIST", "auditlist", gas_fn_audit_list,
+     "The audit as a table: case, quantity, old figure, true figure, deviation, verdict, likeliest slip and what it would give; a last line for all",
+     {CHECKED_GAS, CHECKED, {"wanted", "Heading of the old figure, such as m, kg, or a range of headings", false, GAS_PARAMETER_ANY},
+      LEGACY, CHECKED_LEGS, HEADINGS, AUDIT_OPTIONS},
+     "GAS.AUDITLIST(\"N2\";\"7 bar(g); 35 °C; 12 m3\";\"m, kg\";91.85)", "case"},
 
     {"GAS.GIVEN", "given", gas_fn_given,
      "A block of givens from scattered cells: heading, value, heading, value and so on",

@@ -1,0 +1,22 @@
+/*
+ * models.h - the ways a sum is set up wrongly: constants, heat capacities, formulas. Each changes a replay and returns
+ * false where it does not apply.
+ */
+#ifndef AUDIT_MODELS_H
+#define AUDIT_MODELS_H
+
+#include "audit/replay.h"
+
+typedef bool mismodel(struct replay *replay, double parameter);
+
+/* constants */
+mismodel model_R, model_molar_mass, model_molar_mass_digits, model_specific_R_digits, model_R_for_specific;
+/* heat capacities; parameter: K, or what the name says */
+mismodel model_cp_at_start, model_cp_at_end, model_cp_at, model_cp_of_k, model_cp_mean, model_cp_at_mean,
+    model_cp_celsius, model_cp_for_cv;
+/* the sum itself */
+mismodel model_factor, model_energy_by_molar_mass, model_log10, model_flow_for_closed, model_exchanged,
+    model_ratio_inverted, model_reversible, model_efficiency_turned, model_isothermal, model_adiabatic,
+    model_exponent_of_volume, model_exponent_of_pressure, model_exponent_inverted, model_exponent_k;
+
+#endif
