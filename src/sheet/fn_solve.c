@@ -12,27 +12,27 @@
 /* What a card shows of each state, and its unit when no given figure sets one. */
 static const struct card_row {
     const char *unit;
-    bool extensive; /* per time in a flow */
     enum gas_symbol symbol;
+    bool extensive; /* per time in a flow */
     bool per_gas; /* once, not in each state */
 } card_rows[] = {
-    {"bar",        false, GAS_SYM_P,           false},
-    {"°C",         false, GAS_SYM_T,           false},
-    {"m3",         true,   GAS_SYM_V,           false},
-    {"mol",        true,  GAS_SYM_N,           false},
-    {"kg",         true,   GAS_SYM_M,           false},
-    {"kg/m3",      false, GAS_SYM_RHO,         false},
-    {"m3/kg",      false, GAS_SYM_V_SPECIFIC,  false},
-    {"J/mol",      false, GAS_SYM_H_SPECIFIC,  false},
-    {"J/mol",      false, GAS_SYM_U_SPECIFIC,  false},
-    {"J/(mol·K)",  false, GAS_SYM_S_SPECIFIC,  false},
-    {"J/(mol·K)",  false, GAS_SYM_CP,          false},
-    {"J/(mol·K)",  false, GAS_SYM_CV,          false},
-    {"",           false, GAS_SYM_GAMMA,       false},
-    {"J/mol",      false, GAS_SYM_DU,          true},
-    {"J/mol",      false, GAS_SYM_DH,          true},
-    {"J/(mol·K)",  false, GAS_SYM_DS,          true},
-    {"kg/kmol",    false, GAS_SYM_M_MOLAR,     true},
+    {"bar",         GAS_SYM_P,          false, false},
+    {"°C",          GAS_SYM_T,          false, false},
+    {"m3",          GAS_SYM_V,          true,  false},
+    {"mol",         GAS_SYM_N,          true,  false},
+    {"kg",          GAS_SYM_M,          true,  false},
+    {"kg/m3",       GAS_SYM_RHO,        false, false},
+    {"m3/kg",       GAS_SYM_V_SPECIFIC, false, false},
+    {"J/mol",       GAS_SYM_H_SPECIFIC, false, false},
+    {"J/mol",       GAS_SYM_U_SPECIFIC, false, false},
+    {"J/(mol·K)",   GAS_SYM_S_SPECIFIC, false, false},
+    {"J/(mol·K)",   GAS_SYM_CP,         false, false},
+    {"J/(mol·K)",   GAS_SYM_CV,         false, false},
+    {"",            GAS_SYM_GAMMA,      false, false},
+    {"J/mol",       GAS_SYM_DU,         false, true},
+    {"J/mol",       GAS_SYM_DH,         false, true},
+    {"J/(mol·K)",   GAS_SYM_DS,         false, true},
+    {"kg/kmol",     GAS_SYM_M_MOLAR,    false, true},
 };
 /* clang-format on */
 enum { CARD_KINDS = sizeof card_rows / sizeof *card_rows, CARD_ROWS = (GAS_STATES + 1) * CARD_KINDS };

@@ -35,7 +35,7 @@ static void measure(const char *gas, const char *headings, const char *wanted, c
     struct gas_cell gas_cell = text(gas), wanted_cell = text(wanted), headings_cell = text(headings);
     struct gas_cell *cells = calloc(ROWS * columns, sizeof *cells);
     for (size_t i = 0; cells && i < ROWS * columns; i++)
-        cells[i] = gas_cell_number(start[i % columns] * (1 + (double)(i / columns) * 1e-6));
+        cells[i] = gas_cell_number(start[i % columns] * (1 + (double)i * 1e-6 / (double)columns));
     struct gas_block argument[] = {{1, 1, &gas_cell, false},
                                    {ROWS, columns, cells, true},
                                    {1, 1, &wanted_cell, false},

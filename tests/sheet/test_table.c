@@ -216,7 +216,7 @@ static void wanted_is_read(void)
                      wanted.heading[k].tolerance ? "±" : "",
                      gas_quantity_name(name, wanted.heading[k].symbol, wanted.heading[k].state));
         if (good && wanted.down)
-            strcat(text, " down");
+            snprintf(text + strlen(text), sizeof text - strlen(text), " down");
         if (good)
             check_text(wanted_forms[i].wanted, text, wanted_forms[i].read);
         else
