@@ -116,7 +116,7 @@ static const struct gas_function rows[] = {
      "GAS.PATH(\"N2\";\"2 kg; 25 °C; 1 bar\";\"isothermal to 8 bar; isobaric to 200 °C\")", "leg"},
 
     {"GAS.TRACE", "trace", gas_fn_trace,
-     "Points along a path for charts, corners hit exactly, under a heading row",
+     "Points along a path for charts under a heading row: corners hit exactly, equal volume ratios on curved legs",
      {THE_GAS, START, LEGS,
       {"wanted", "Headings of the columns, such as V, m3; P, bar; left out: P, T, V, s", true, GAS_PARAMETER_ANY},
       {"points", "Number of steps along each leg; left out: 20", true, GAS_PARAMETER_ANY},

@@ -1,4 +1,6 @@
 /* TRACE: points along the path of one case, for charts. */
+#include <math.h>
+
 #include "sheet/functions.h"
 #include "sheet/path_call.h"
 
@@ -29,6 +31,17 @@ static bool put_point(struct gas_path_call *path, struct gas_call *call, size_t 
     return true;
 }
 
+/* How far along a leg its k-th point lies: equal steps where the leg is straight in P-V, equal volume ratios where it
+ * is curved, so that a chart is smooth at small volumes too. */
+static double fraction_at(const struct gas_path_case *solved, size_t leg, double part)
+{
+    const struct gas_point *start = leg ? &solved->change[leg - 1].end : &solved->start;
+    double ratio = solved->change[leg].end.v / start->v;
+    enum gas_process process = solved->leg[leg].process;
+    bool curved = process == GAS_ISOTHERMAL || process == GAS_ADIABATIC || process == GAS_POLYTROPIC;
+    return curved && fabs(ratio - 1) > 1e-6 && part < 1 ? (pow(ratio, part) - 1) / (ratio - 1) : part;
+}
+
 /* The points of one leg behind its start; the last is exactly its end. */
 static bool put_leg_points(struct gas_path_call *path, struct gas_call *call, const struct gas_path_case *solved,
                            size_t leg, size_t points)
@@ -36,8 +49,9 @@ static bool put_leg_points(struct gas_path_call *path, struct gas_call *call, co
     const struct gas_point *start = leg ? &solved->change[leg - 1].end : &solved->start;
     for (size_t k = 1; k <= points; k++) {
         struct gas_point at;
-        struct gas_result result = gas_leg_at(&path->job.gas, path->job.options.system, start, &solved->leg[leg],
-                                              &solved->change[leg], (double)k / (double)points, &at);
+        struct gas_result result =
+            gas_leg_at(&path->job.gas, path->job.options.system, start, &solved->leg[leg], &solved->change[leg],
+                       fraction_at(solved, leg, (double)k / (double)points), &at);
         if (result.status != GAS_OK)
             return gas_refuse_leg(&path->refusal, &path->job, solved, leg + 1, &result);
         if (!put_point(path, call, 1 + leg * points + k, solved, &at))
