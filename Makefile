@@ -94,7 +94,7 @@ install: $(OXT) ## install the extension for the current user
 	unopkg add --suppress-license --force $(OXT)
 
 deps: ## install the Debian packages that are missing
-	@tools/deps.sh $(BUILD_PACKAGES) $(TEST_PACKAGES) $(DEMO_PACKAGES)
+	@tests/tools/deps.sh $(BUILD_PACKAGES) $(TEST_PACKAGES) $(DEMO_PACKAGES)
 
 # --- tests ----------------------------------------------------------------------------------------------------------
 write_suites = { echo '\#include "check.h"'; for s in $(1); do echo "extern const struct test_suite $$s;"; done; \
@@ -146,13 +146,13 @@ test: deps ## install what is missing, build, and run every test, those in headl
 demo: deps ## compute the sample sheets in headless Calc; prints them, pictures in build/demo
 	@echo "Building"
 	@$(MAKE) --no-print-directory -s all tools
-	@BUILD=$(BUILD) OXT=$(OXT) tools/demo.sh
+	@BUILD=$(BUILD) OXT=$(OXT) tests/tools/demo.sh
 
 # --- quality --------------------------------------------------------------------------------------------------------
 C_FILES = $(shell git ls-files '*.c' '*.h')
 
 lint: ## layout, clang-tidy, cppcheck: silent when all is well
-	@tools/deps.sh $(LINT_PACKAGES)
+	@tests/tools/deps.sh $(LINT_PACKAGES)
 	@clang-format --dry-run -Werror $(C_FILES)
 	@printf '%s\n' $(filter %.c,$(C_FILES)) | xargs -P $(JOBS) -I{} clang-tidy --quiet {} -- \
 	  -std=c11 $(CPPFLAGS) -Itests/support -Itests -isystem $(SDK)/include 2>/dev/null
@@ -164,7 +164,7 @@ MEMCHECK := valgrind -q --error-exitcode=1 --leak-check=full --show-leak-kinds=d
   --errors-for-leak-kinds=definite,indirect --suppressions=tests/glue/valgrind.supp
 
 valgrind: $(BUILD)/tests/run $(BUILD)/tests/glue-run $(ADDIN) ## the suites and the glue under memcheck
-	@tools/deps.sh $(LINT_PACKAGES)
+	@tests/tools/deps.sh $(LINT_PACKAGES)
 	GASLEAF_ADDIN=$(ADDIN) $(MEMCHECK) $(BUILD)/tests/glue-run $(SUITE)
 	$(MEMCHECK) $(BUILD)/tests/run $(SUITE)
 

@@ -49,7 +49,7 @@ for sheet in tests/sheets/*.fods; do
     [ -e "$sheet" ] && cp "$sheet" "$results/sheets/"
 done
 csv='csv:Text - txt - csv (StarCalc):44,34,76,1,,0,false,false,false,false,false,-1'
-tools/office.sh "$OXT" "$results/csv" "$csv" -- "$results"/sheets/*.fods
+tests/tools/office.sh "$OXT" "$results/csv" "$csv" -- "$results"/sheets/*.fods
 for sheet in "$results"/sheets/*.fods; do
     topic=$(basename "$sheet" .fods)
     part "sheet $topic" "$BUILD/tests/tools/count_sheet" "$results/csv/$topic-check.csv" \

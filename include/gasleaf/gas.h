@@ -31,9 +31,9 @@ struct gas_term {
 };
 
 struct gas_interval {
-    double T_from, T_to;       /* K; T_to of one interval is T_from of the next; T_to may be INFINITY */
-    double power[GAS_POWERS];  /* J/(mol K^(1 + i + GAS_POWER_LOWEST)) */
-    size_t term_count;         /* 0 for most gases */
+    double T_from, T_to;      /* K; T_to of one interval is T_from of the next; T_to may be INFINITY */
+    double power[GAS_POWERS]; /* J/(mol K^(1 + i + GAS_POWER_LOWEST)) */
+    size_t term_count;        /* 0 for most gases */
     const struct gas_term *term;
 };
 

@@ -82,9 +82,9 @@ struct gas_heading {
     int state;              /* 1 to 9; 0: none written; may be outside 0..9 on GAS_HEADING_STATE */
     struct gas_unit unit;   /* SI of the symbol when none is written */
     bool has_unit;
-    bool tolerance;         /* a plus-minus column */
-    bool by_gas;            /* "W by gas": work counted positive out of the gas */
-    bool on_gas;            /* "W on gas" was written */
+    bool tolerance;              /* a plus-minus column */
+    bool by_gas;                 /* "W by gas": work counted positive out of the gas */
+    bool on_gas;                 /* "W on gas" was written */
     char text[GAS_HEADING_TEXT]; /* as written, trimmed, for sentences and output headings */
 };
 

@@ -12,7 +12,7 @@ if [ ! -e "$1" ]; then
 fi
 echo "Computing $# sample sheets in headless Calc"
 csv='csv:Text - txt - csv (StarCalc):44,34,76,1,,0,false,true,false,false,false,-1'
-tools/office.sh "$OXT" "$demo" "$csv" pdf -- "$@"
+tests/tools/office.sh "$OXT" "$demo" "$csv" pdf -- "$@"
 for example in "$@"; do
     name=$(basename "$example" .fods)
     for sheet in "$demo/$name"-*.csv; do
