@@ -77,20 +77,23 @@ static bool keeps_its_sign(const struct curve *curve)
     return curve->dP * curve->dv >= 0;
 }
 
-/* A rate or heat that cannot be had is NAN and stays NAN in both sums. */
+/* A rate or heat that cannot be had is NAN and stays NAN in both sums. A place where the rate is just 0 is passed over:
+ * the sign is told by the places before and after it. */
 static void split(const struct heat_context *c, double heat, int pieces, double *in, double *out)
 {
-    double done = 0, rate = heat_rate(c, 0);
+    double done = 0, x = 0, rate = heat_rate(c, 0);
     for (int i = 1; i <= pieces; i++) {
-        const double next = heat_rate(c, (double)i / pieces);
+        const double x_next = (double)i / pieces, next = heat_rate(c, x_next);
+        if (next == 0)
+            continue;
         if (rate * next < 0) {
-            const struct gas_result x = root_between(heat_rate, c, (double)(i - 1) / pieces, (double)i / pieces);
-            const double until = heat_until(c, x.value);
+            const double until = heat_until(c, root_between(heat_rate, c, x, x_next).value);
             add_heat(until - done, in, out);
             done = until;
         }
         if (isnan(rate + next))
             done = NAN;
+        x = x_next;
         rate = next;
     }
     add_heat(heat - done, in, out);

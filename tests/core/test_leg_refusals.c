@@ -324,6 +324,49 @@ static void without_heat_capacity(void)
     check_int("with Q", gas_leg_run(&bare, GAS_CLOSED, &start, NULL, &heated, &c).status, GAS_NO_HEAT_CAPACITY);
 }
 
+static double any_figure(void)
+{
+    static const double odd[] = {0, -1, NAN, INFINITY, -INFINITY, 1e-308, 1e308, 1, 300, 1e5, -1e5, 0.025, 1e-9, 1e9};
+    const int i = (int)check_random(0, 28);
+    return i < 14 ? odd[i] : exp(check_random(-30, 30));
+}
+
+/* Whatever comes in, the answer is a lawful state or a refusal; nothing in between. */
+static void anything_at_all(void)
+{
+    check_seed(31);
+    for (int i = 0; i < 60000; i++) {
+        const struct gas *gas = path_gases[i % PATH_GASES];
+        const struct gas_point table[] = {{any_figure(), NAN, any_figure()}, {any_figure(), NAN, any_figure()}};
+        const struct gas_point start =
+            i % 3 ? point_PT(table[0].P > 0 ? table[0].P : 1e5, check_random(250, 900)) : table[1];
+        const struct gas_leg leg = {.process = (enum gas_process)(int)check_random(0, 12),
+                                    .ending = (enum gas_ending)(int)check_random(0, 13),
+                                    .value = any_figure(),
+                                    .second = any_figure(),
+                                    .n = any_figure(),
+                                    .efficiency = i % 2 ? 1 : any_figure(),
+                                    .P_outside = any_figure(),
+                                    .point_count = (size_t)(i % 3),
+                                    .point = table};
+        const enum gas_system system = i % 7 < 4 ? GAS_CLOSED : GAS_FLOW;
+        struct gas_change c;
+        struct gas_point at;
+        const struct gas_result r = gas_leg_run(gas, system, &start, i % 5 ? &table[1] : NULL, &leg, &c);
+        if (r.status) {
+            if (!isnan(r.value))
+                check_true("a refusal has no value", false);
+            continue;
+        }
+        const bool lawful = c.end.P > 0 && c.end.T > 0 && c.end.v > 0 && isfinite(c.W) && isfinite(c.Q) &&
+                            isfinite(c.dS) && c.S_made >= 0 && isfinite(c.end.P + c.end.T + c.end.v);
+        check_true("lawful", lawful);
+        check_close("Pv = RT", c.end.P * c.end.v, GAS_R * c.end.T, 1e-9, 0);
+        const struct gas_result on = gas_leg_at(gas, system, &start, &leg, &c, 0.5, &at);
+        check_true("on the way", on.status || (at.P > 0 && at.T > 0 && at.v > 0));
+    }
+}
+
 /* clang-format off */
 const struct test_suite suite_leg_refusals = {"leg_refusals", (const struct test_case[]){
     {"every process with every ending", every_process_with_every_ending},
@@ -331,5 +374,6 @@ const struct test_suite suite_leg_refusals = {"leg_refusals", (const struct test
     {"bad starts", bad_starts},
     {"bad tables", bad_tables},
     {"without heat capacity", without_heat_capacity},
+    {"anything at all", anything_at_all},
     {0}}};
 /* clang-format on */
