@@ -5,7 +5,7 @@
 #include "leg.h"
 #include "outward.h"
 
-enum { SIGN_PIECES = 16 }; /* stretches in which a reversal of the heat is looked for */
+enum { SIGN_PIECES = 8 }; /* stretches in which a reversal of the heat is looked for */
 
 /* How ln v, ln P and ln T move with s, the length along the line. */
 struct line {
