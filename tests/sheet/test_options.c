@@ -132,7 +132,7 @@ static void refusals(void)
 
 #define TEXT(words)                                                                                                    \
     {                                                                                                                  \
-        GAS_CELL_TEXT, 0, (words), sizeof words - 1                                                                    \
+        GAS_CELL_TEXT, 0, (words), sizeof(words) - 1                                                                   \
     }
 #define NUMBER(value)                                                                                                  \
     {                                                                                                                  \
