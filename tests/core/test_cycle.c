@@ -150,6 +150,26 @@ static void polytrope_turns(void)
     gsl_integration_workspace_free(space);
 }
 
+/* More heat than nitrogen can take by cooling along n = 1.32 is met beyond the turn, on the hot side. */
+static void heat_beyond_the_turn(void)
+{
+    const struct gas_point start = point_PT(2e5, 1100);
+    struct gas_leg leg = leg_of(GAS_POLYTROPIC, GAS_TO_T, 5900);
+    struct gas_change hot, cold, again;
+    leg.n = 1.32;
+    check_int("hot", gas_leg_run(&nitrogen, GAS_CLOSED, &start, NULL, &leg, &hot).status, GAS_OK);
+    leg.value = 200;
+    check_int("cold", gas_leg_run(&nitrogen, GAS_CLOSED, &start, NULL, &leg, &cold).status, GAS_OK);
+    check_true("hot side takes more", hot.Q > cold.Q && cold.Q > 0);
+    leg.ending = GAS_WITH_Q;
+    leg.value = hot.Q;
+    check_int("again", gas_leg_run(&nitrogen, GAS_CLOSED, &start, NULL, &leg, &again).status, GAS_OK);
+    check_close("again", again.end.T, 5900, 1e-9, 0);
+    leg.value = 0.5 * cold.Q; /* both sides offer this: the near one counts */
+    check_int("near", gas_leg_run(&nitrogen, GAS_CLOSED, &start, NULL, &leg, &again).status, GAS_OK);
+    check_true("near", again.end.T < 1100 && again.end.T > 200);
+}
+
 /* A line that leaves the data on the way: the ends and Q stand, how the heat divides is not known. */
 static void line_above_the_data(void)
 {
@@ -200,6 +220,7 @@ const struct test_suite suite_cycle = {"cycle", (const struct test_case[]){
     {"printed Diesel", printed_diesel},
     {"straight line turns", straight_line_turns},
     {"polytrope turns", polytrope_turns},
+    {"heat beyond the turn", heat_beyond_the_turn},
     {"line above the data", line_above_the_data},
     {"does not close", does_not_close},
     {"fault names the leg", fault_names_the_leg},
