@@ -142,6 +142,17 @@ static const struct gas_function rows[] = {
       LEGACY, CHECKED_LEGS, HEADINGS, AUDIT_OPTIONS},
      "GAS.AUDITLIST(\"N2\";\"7 bar(g); 35 °C; 12 m3\";\"m, kg\";91.85)", "case"},
 
+    {"GAS.CARD", "card", gas_fn_card,
+     "What is known of a gas, with sources: molar mass, heat capacity, range, critical constants, composition",
+     {THE_GAS,
+      {"item", "One line of the card, with its unit if you like, such as M, kg/kmol or cp, kJ/kg-K or Tc or x N2; left out: the whole card", true, GAS_PARAMETER_ANY}},
+     "GAS.CARD(\"Ar\";\"M, kg/kmol\")", "39.95"},
+
+    {"GAS.LIST", "list", gas_fn_list,
+     "The gases known by name, with formula, CAS number, molar mass in kg/kmol and the range of their heat capacity",
+     {{"search", "Part of a name, formula or CAS number, or element F; left out: all gases", true, GAS_PARAMETER_ANY}},
+     "GAS.LIST(\"neon\")", "name"},
+
     {"GAS.GIVEN", "given", gas_fn_given,
      "A block of givens from scattered cells: heading, value, heading, value and so on",
      {{"heading", "Quantity and unit of the value that follows, such as P1, bar(g)", false, GAS_PARAMETER_ANY},

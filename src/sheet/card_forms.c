@@ -62,7 +62,7 @@ static bool build_jaeschke_schley(struct gas_form_case *form_case)
 static bool build_planck_einstein(struct gas_form_case *form_case)
 {
     enum { MOST = 12 };
-    char u[8], theta[8], th[8];
+    char u[20], theta[20], th[20];
     if (!add_constant(form_case, "c0"))
         return false;
     for (int k = 1; k <= MOST; k++) {

@@ -21,6 +21,8 @@ gas_entry gas_fn_end;     /* fn_path.c */
 gas_entry gas_fn_path;    /* fn_path.c */
 gas_entry gas_fn_trace;   /* fn_trace.c */
 gas_entry gas_fn_cycle;   /* fn_cycle.c */
+gas_entry gas_fn_card;    /* fn_gases.c */
+gas_entry gas_fn_list;    /* fn_gases.c */
 gas_entry gas_fn_faults;  /* fn_desk.c */
 gas_entry gas_fn_given;   /* fn_desk.c */
 gas_entry gas_fn_solve;   /* fn_solve.c */
