@@ -6,6 +6,8 @@
 #include "sheet/functions.h"
 #include "sheet/path_call.h"
 
+#define TURNING "the heat changes sign on a leg whose temperatures leave the data; split that leg."
+
 /* What a cycle can be asked, by symbol. */
 static const struct cycle_row {
     enum gas_symbol symbol;
@@ -15,8 +17,8 @@ static const struct cycle_row {
     const char *why_not; /* when it is NAN */
 } cycle_rows[] = {
     {GAS_SYM_W_NET, GAS_DIM_MOLAR_ENERGY, offsetof(struct gas_cycle, W_net), NULL, ""},
-    {GAS_SYM_Q_IN, GAS_DIM_MOLAR_ENERGY, offsetof(struct gas_cycle, Q_in), NULL, ""},
-    {GAS_SYM_Q_OUT, GAS_DIM_MOLAR_ENERGY, offsetof(struct gas_cycle, Q_out), NULL, ""},
+    {GAS_SYM_Q_IN, GAS_DIM_MOLAR_ENERGY, offsetof(struct gas_cycle, Q_in), NULL, TURNING},
+    {GAS_SYM_Q_OUT, GAS_DIM_MOLAR_ENERGY, offsetof(struct gas_cycle, Q_out), NULL, TURNING},
     {GAS_SYM_EFFICIENCY, GAS_DIM_NUMBER, offsetof(struct gas_cycle, efficiency), "%",
      "this cycle takes work in; ask for COP heating or COP cooling."},
     {GAS_SYM_COP_HEATING, GAS_DIM_NUMBER, offsetof(struct gas_cycle, cop_heating), "",
