@@ -153,6 +153,15 @@ static const struct gas_function rows[] = {
      {{"search", "Part of a name, formula or CAS number, or element F; left out: all gases", true, GAS_PARAMETER_ANY}},
      "GAS.LIST(\"neon\")", "name"},
 
+    {"GAS.STAGES", "stages", gas_fn_stages,
+     "Staged compression with intercooling: ratio, temperatures, shaft power and cooler duty per stage and in total",
+     {THE_GAS,
+      {"given", "Suction P1 and T1, discharge P2 and a flow or an amount: a text, a block, or a table with headings", false, GAS_PARAMETER_ANY},
+      {"stages", "Text such as 3 stages; isentropic 78 %; cool to 40 °C; drop 0.2 bar; drive 95 %, or ratio at most 3.5; polytropic 80 %", false, GAS_PARAMETER_ANY},
+      {"wanted", "Headings of what is asked of each case: shaft power, input power, cooler duty, T2, ratio, stages; left out: a table of the stages", true, GAS_PARAMETER_ANY},
+      HEADINGS, OPTIONS},
+     "GAS.STAGES(\"air | k = 1.4\";\"P1 = 1 bar; T1 = 300 K; P2 = 9 bar; 1 kg/s\";\"2 stages; isentropic; cool to T1\";\"shaft power, kW\")", "222.28"},
+
     {"GAS.GIVEN", "given", gas_fn_given,
      "A block of givens from scattered cells: heading, value, heading, value and so on",
      {{"heading", "Quantity and unit of the value that follows, such as P1, bar(g)", false, GAS_PARAMETER_ANY},
