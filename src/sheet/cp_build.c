@@ -113,6 +113,25 @@ bool gas_cp_finish(const struct gas_cp_build *build, double T_from, double T_to,
     return true;
 }
 
+static bool is_word(struct gas_piece text, size_t i)
+{
+    return i < text.length && ((text.at[i] >= 'a' && text.at[i] <= 'z') || (text.at[i] >= 'A' && text.at[i] <= 'Z'));
+}
+
+/* A C, F or R that stands alone or behind a degree sign or "deg": "J/mol-°C", "Btu/lb-F", "kJ/(kg degC)". */
+static bool is_per_degree(struct gas_piece text)
+{
+    for (size_t i = 0; i < text.length; i++) {
+        bool behind_deg = i >= 3 && memcmp(text.at + i - 3, "deg", 3) == 0;
+        bool alone = (i == 0 || !is_word(text, i - 1)) && !is_word(text, i + 1);
+        if (text.at[i] && strchr("CFR", text.at[i]) && (alone || behind_deg))
+            return true;
+        if (i + 3 <= text.length && (memcmp(text.at + i, "\u2103", 3) == 0 || memcmp(text.at + i, "\u2109", 3) == 0))
+            return true;
+    }
+    return false;
+}
+
 static bool known_unit(struct gas_piece text, struct gas_cp_unit *unit, struct gas_unit_fault *fault)
 {
     char folded[40];
@@ -126,6 +145,7 @@ static bool known_unit(struct gas_piece text, struct gas_cp_unit *unit, struct g
     if (!gas_unit_parse(text.at, text.length, NULL, &parsed, fault))
         return false;
     unit->factor = parsed.scale;
+    unit->per_degree = is_per_degree(text);
     unit->per_mass = parsed.dimension == GAS_DIM_SPECIFIC_ENTROPY || parsed.dimension == GAS_DIM_SPECIFIC_ENERGY;
     unit->enthalpy = parsed.dimension == GAS_DIM_MOLAR_ENERGY || parsed.dimension == GAS_DIM_SPECIFIC_ENERGY;
     return unit->per_mass || unit->enthalpy || parsed.dimension == GAS_DIM_MOLAR_ENTROPY;

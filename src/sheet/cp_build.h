@@ -42,10 +42,11 @@ bool gas_cp_finish(const struct gas_cp_build *build, double T_from, double T_to,
 
 /* How a printed cp is brought to J/(mol K): a factor, from its unit text. "R" and "-" mean cp/R. */
 struct gas_cp_unit {
-    double factor; /* J/(mol K) per printed unit; of a unit per mass still to be multiplied by M */
-    bool per_mass; /* J/(kg K) */
-    bool over_R;   /* factor is 1, still to be multiplied by R */
-    bool enthalpy; /* J/mol or J/kg: of an enthalpy polynomial */
+    double factor;   /* J/(mol K) per printed unit; of a unit per mass still to be multiplied by M */
+    bool per_mass;   /* J/(kg K) */
+    bool over_R;     /* factor is 1, still to be multiplied by R */
+    bool enthalpy;   /* J/mol or J/kg: of an enthalpy polynomial */
+    bool per_degree; /* per degC, degF or degR: T in the formula may be in them too, so it has to be said */
 };
 bool gas_cp_unit_read(struct gas_piece text, struct gas_cp_unit *unit, struct gas_refusal *refusal);
 /* Is it the text of a cp (or enthalpy) unit at all? */

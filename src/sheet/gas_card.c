@@ -184,6 +184,11 @@ static bool build_form(struct gas_card *card, struct gas_draft *draft)
     settle_units(card, form);
     if (card->cp_unit.enthalpy && form->build != gas_form_find((struct gas_piece){"passutdanner", 12})->build)
         return gas_refuse(card->refusal, WHAT, "the cp unit is that of an energy; write it such as kJ/kg-K.");
+    if (card->cp_unit.per_degree && !card->T_unit_said &&
+        form->power != gas_form_find((struct gas_piece){"constant", 8})->power)
+        return gas_refuse(card->refusal, WHAT,
+                          "cp is per °C, °F or °R, so it is not certain what T is in the form; add a "
+                          "row T unit with K, °C, °F or °R.");
     for (size_t i = 0; i < card->intervals; i++)
         if (!build_interval(card, form, i, draft, &interval[i]))
             return false;
@@ -193,40 +198,53 @@ static bool build_form(struct gas_card *card, struct gas_draft *draft)
     return every_constant_is_used(card, form) && join_intervals(card, interval);
 }
 
-/* A row cp or k, read as the rule it stands for. */
+/* The rule that a row cp or k stands for, as text in the arena; NULL without memory. */
+static const char *row_rule(const struct gas_card *card, struct gas_draft *draft)
+{
+    const struct gas_piece unit = card->cp_text_unit;
+    size_t size = card->cp.length + unit.length + 80;
+    char *text = gas_arena_take(draft->arena, size, 1);
+    if (!text)
+        return NULL;
+    if (!isnan(card->k))
+        snprintf(text, size, "k = %.17g", card->k);
+    else if (!isnan(card->cp_value))
+        snprintf(text, size, "cp = %.17g %.*s", card->cp_value, (int)unit.length, unit.at);
+    else
+        snprintf(text, size, "cp = %.*s %.*s", (int)card->cp.length, card->cp.at, (int)unit.length, unit.at);
+    return text;
+}
+
+/* What the other rows of the card say for its cp: unit, unit of T, range. */
+static bool complete_rules(const struct gas_card *card, struct gas_rules *rules)
+{
+    double from, to;
+    if (!interval_range(card, 0, &from, &to))
+        return false;
+    if (rules->bare && card->cp_unit_said) {
+        rules->unit = card->cp_unit;
+        rules->bare = false;
+    }
+    if (!rules->range_said && isfinite(to)) {
+        rules->range_said = true;
+        rules->T_from = from;
+        rules->T_to = to;
+    }
+    rules->T_said = rules->T_said && rules->source == GAS_CP_FROM_FORMULA;
+    return true;
+}
+
 static bool build_row_cp(const struct gas_card *card, struct gas_draft *draft)
 {
-    struct gas_rules rules = {.refusal = draft->refusal, .T_unit = card->T_unit, .T_said = card->T_unit_said};
-    char *text = gas_arena_take(draft->arena, card->cp.length + card->cp_text_unit.length + 80, 1);
-    double from, to;
-    int length;
-    rules.unit.factor = 1;
-    if (!text)
-        return gas_refuse_memory(draft->refusal);
+    struct gas_rules rules = {
+        .refusal = draft->refusal, .T_unit = card->T_unit, .T_said = card->T_unit_said, .unit = {.factor = 1}};
     if (!isnan(card->k) && (!isnan(card->cp_value) || card->cp.length))
         return gas_refuse(card->refusal, WHAT, "it gives both cp and k; keep one.");
-    if (!isnan(card->k))
-        length = sprintf(text, "k = %.17g", card->k);
-    else if (!isnan(card->cp_value))
-        length =
-            sprintf(text, "cp = %.17g %.*s", card->cp_value, (int)card->cp_text_unit.length, card->cp_text_unit.at);
-    else
-        length = sprintf(text, "cp = %.*s %.*s", (int)card->cp.length, card->cp.at, (int)card->cp_text_unit.length,
-                         card->cp_text_unit.at);
-    if (!gas_rules_read(&rules, (struct gas_piece){text, (size_t)length}) || !interval_range(card, 0, &from, &to))
-        return false;
-    if (rules.bare && card->cp_unit_said) {
-        rules.unit = card->cp_unit;
-        rules.bare = false;
-    }
-    if (!rules.range_said && isfinite(to)) {
-        rules.range_said = true;
-        rules.T_from = from;
-        rules.T_to = to;
-    }
-    if (rules.source != GAS_CP_FROM_FORMULA)
-        rules.T_said = false;
-    return gas_rules_apply(&rules, draft);
+    const char *text = row_rule(card, draft);
+    if (!text)
+        return gas_refuse_memory(draft->refusal);
+    return gas_rules_read(&rules, (struct gas_piece){text, strlen(text)}) && complete_rules(card, &rules) &&
+           gas_rules_apply(&rules, draft);
 }
 
 static bool build_heat(struct gas_card *card, struct gas_draft *draft, const struct gas_species *species)

@@ -8,6 +8,9 @@
 
 #define ROOM_TEMPERATURE 298.15 /* K */
 
+/* No vapour comes near it: a cp this large has a wrong unit. */
+#define MOST_CP_OVER_R 1000.0
+
 bool gas_refuse_memory(struct gas_refusal *refusal)
 {
     return gas_refuse(refusal, "gas", "there is no memory left to read it; close other documents and try again.");
@@ -110,10 +113,20 @@ static bool refuse_cp(const struct gas_draft *draft, double ratio, double T)
     gas_number_format(least, sizeof least, draft->gas.R, 4);
     if (!isfinite(ratio))
         return gas_refuse(draft->refusal, "cp", "it has no finite value at %s K; check the constants and units.", at);
+    if (ratio > 1)
+        return gas_refuse(draft->refusal, "cp",
+                          "it comes to %s J/(mol K) at %s K, far more than any gas has; check the figures, their unit "
+                          "and the unit of T.",
+                          cp, at);
     return gas_refuse(draft->refusal, "cp",
                       "it comes to %s J/(mol K) at %s K, but must be above R = %s J/(mol K) to leave a positive cv; "
                       "check the figures, their unit and the unit of T.",
                       cp, at, least);
+}
+
+static bool possible(double ratio)
+{
+    return ratio > 1 && ratio < MOST_CP_OVER_R;
 }
 
 static bool check_inside(const struct gas_draft *draft, const struct gas_interval *interval)
@@ -123,7 +136,7 @@ static bool check_inside(const struct gas_draft *draft, const struct gas_interva
     for (int i = 0; i <= STEPS && from <= to; i++) {
         double T = i == STEPS ? to : from * pow(to / from, (double)i / STEPS);
         double ratio = cp_over_R(draft, interval, T);
-        if (!(ratio > 1))
+        if (!possible(ratio))
             return refuse_cp(draft, ratio, T);
     }
     return true;
@@ -139,10 +152,10 @@ static double where_cp_fails(const struct gas_draft *draft, const struct gas_int
         bad *= factor;
         if (factor > 1 ? bad > 1e5 : bad < 1)
             return end;
-    } while (cp_over_R(draft, interval, bad) > 1);
+    } while (possible(cp_over_R(draft, interval, bad)));
     while (fabs(good - bad) > 1e-9 * good) {
         double middle = (good + bad) / 2;
-        if (cp_over_R(draft, interval, middle) > 1)
+        if (possible(cp_over_R(draft, interval, middle)))
             good = middle;
         else
             bad = middle;
@@ -155,7 +168,7 @@ static bool bound(struct gas_draft *draft)
 {
     struct gas_interval kept = draft->gas.interval[0];
     double ratio = cp_over_R(draft, &kept, ROOM_TEMPERATURE);
-    if (!(ratio > 1))
+    if (!possible(ratio))
         return refuse_cp(draft, ratio, ROOM_TEMPERATURE);
     kept.T_from = where_cp_fails(draft, &kept, 1 / 1.02, kept.T_from);
     kept.T_to = where_cp_fails(draft, &kept, 1.02, kept.T_to);

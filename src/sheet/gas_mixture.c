@@ -63,11 +63,11 @@ static double whole_of(const struct gas_recipe *recipe, double plain, bool rest)
     return plain < (rest ? 1 : 1.5) ? 1 : 100;
 }
 
-static bool refuse_sum(struct gas_refusal *refusal, double sum, double whole, bool rest)
+static bool refuse_sum(struct gas_refusal *refusal, double sum, bool marked, bool rest)
 {
     char figure[40];
     gas_number_format(figure, sizeof figure, sum, 6);
-    const char *percent = whole > 1 ? " %" : "";
+    const char *percent = marked ? " %" : "";
     if (rest)
         return gas_refuse(refusal, "gas", "the fractions add up to %s%s already, which leaves nothing for the rest.",
                           figure, percent);
@@ -99,7 +99,7 @@ static bool settle_amounts(struct gas_recipe *recipe, struct gas_refusal *refusa
         sum += component->rest ? 0 : component->amount;
     }
     if (rest ? sum >= whole : fabs(sum - whole) > SUM_TOLERANCE * whole * (1 + 1e-9))
-        return refuse_sum(refusal, sum, whole, rest != NULL);
+        return refuse_sum(refusal, sum, recipe->percent, rest != NULL);
     if (rest)
         rest->amount = whole - sum;
     return true;

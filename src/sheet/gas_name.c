@@ -43,7 +43,9 @@ bool gas_refuse_name(struct gas_refusal *refusal, struct gas_piece name)
         used += name_and_formula(list + used, sizeof list - used, near[i], i > 0);
     gas_quoted(shown, sizeof shown, name.at, name.length);
     if (count == 0)
-        return gas_refuse(refusal, "gas", "%s is not known; use GAS.LIST to search, or give a gas card.", shown);
+        return gas_refuse(
+            refusal, "gas",
+            "%s is not known; use GAS.LIST to search, or give a gas card. A mixture is written N2 79 + O2 21.", shown);
     return gas_refuse(refusal, "gas", "%s is not known; nearest %s %s; use GAS.LIST to search.", shown,
                       count == 1 ? "is" : "are", list);
 }

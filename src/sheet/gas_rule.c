@@ -112,23 +112,19 @@ bool gas_constant_read(double figure, const struct gas_unit *unit, double *unive
     return true;
 }
 
-static bool per_degree_C_or_F(struct gas_piece text)
+static bool is_digit(char c)
 {
-    static const char *const marks[] = {"°C", "ºC", "℃", "degC", "deg C", "°F", "ºF", "℉", "degF", "deg F"};
-    for (size_t i = 0; i < sizeof marks / sizeof *marks; i++)
-        for (size_t at = 0, length = strlen(marks[i]); at + length <= text.length; at++)
-            if (memcmp(text.at + at, marks[i], length) == 0)
-                return true;
-    return false;
+    return c >= '0' && c <= '9';
 }
 
-/* The unit behind a formula, in brackets or not; a range may follow in parentheses or behind "from". */
+/* The unit behind a formula, in brackets or not; a range may follow: "J/mol-K, from 298 to 2000 K". */
 static bool read_formula_unit(struct gas_rules *rules, struct gas_piece text)
 {
     for (size_t i = 0; i + 1 < text.length; i++) {
         struct gas_piece tail = {text.at + i, text.length - i};
-        bool range = (text.at[i] == '(' && strchr("0123456789", text.at[i + 1])) ||
-                     ((i == 0 || text.at[i - 1] == ' ') && gas_piece_take(&tail, "from"));
+        bool apart = i == 0 || text.at[i - 1] == ' ';
+        bool range = (text.at[i] == '(' && is_digit(text.at[i + 1])) ||
+                     (apart && (is_digit(text.at[i]) || gas_piece_take(&tail, "from")));
         if (!range)
             continue;
         tail = (struct gas_piece){text.at + i, text.length - i};
@@ -142,7 +138,6 @@ static bool read_formula_unit(struct gas_rules *rules, struct gas_piece text)
     if (text.length > 2 && strchr("([", text.at[0]) && strchr(")]", text.at[text.length - 1]))
         text = gas_piece_trim((struct gas_piece){text.at + 1, text.length - 2});
     rules->bare = text.length == 0;
-    rules->per_degree = per_degree_C_or_F(text);
     return rules->bare || gas_cp_unit_read(text, &rules->unit, rules->refusal);
 }
 
@@ -244,13 +239,11 @@ static bool read_rule(struct gas_rules *rules, struct gas_piece text)
 /* Rules end at ';', '|', a line break, and at a comma that is not inside a number. */
 static bool ends_rule(struct gas_piece text, size_t i)
 {
-    static const char digits[] = "0123456789";
     if (text.at[i] && strchr(";|\r\n", text.at[i]))
         return true;
     if (text.at[i] != ',')
         return false;
-    bool inside = i > 0 && i + 1 < text.length && text.at[i - 1] && text.at[i + 1] && strchr(digits, text.at[i - 1]) &&
-                  strchr(digits, text.at[i + 1]);
+    bool inside = i > 0 && i + 1 < text.length && is_digit(text.at[i - 1]) && is_digit(text.at[i + 1]);
     return !inside;
 }
 

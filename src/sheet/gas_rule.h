@@ -18,8 +18,7 @@ struct gas_rules {
     enum gas_cp_source source;
     struct gas_sum sum; /* of cp or cv, in `unit`, T in `T_unit` */
     struct gas_cp_unit unit;
-    bool bare;       /* no unit was written: J/(mol K) */
-    bool per_degree; /* the unit is per degC or degF */
+    bool bare; /* no unit was written: J/(mol K) */
     struct gas_T_unit T_unit;
     bool T_said;
     double k;

@@ -134,10 +134,10 @@ static bool accept_formula(const struct gas_rules *rules)
                           "cp = %g without a unit would be J/(mol K), less than any gas has; give the unit, such as "
                           "kJ/kg-K.",
                           rules->sum.term[0].factor);
-    if (rules->per_degree && !rules->T_said && !is_constant(&rules->sum))
+    if (rules->unit.per_degree && !rules->T_said && !is_constant(&rules->sum))
         return gas_refuse(
             rules->refusal, WHAT,
-            "cp is per °C or °F, so it is not certain what T is in the formula; add \"T in °C\" or \"T in "
+            "cp is per °C, °F or °R, so it is not certain what T is in the formula; add \"T in °C\" or \"T in "
             "K\".");
     return true;
 }

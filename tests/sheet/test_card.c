@@ -363,6 +363,8 @@ static const struct {
     {2, "M;28~form;polynomial~A;29~;5", "no label"},
     {2, "M;28~cp;29~form;polynomial~A;29", "two ways"},
     {2, "M;28~cp;29~k;1.4", "both cp and k"},
+    {3, "M;28;~form;cubic;~A;29;J/mol-°C~B;1e-3;", "not certain what T is"},
+    {2, "M;28~form;cubic~cp unit;Btu/lbmol-F~A;6.9~B;1e-3", "not certain what T is"},
     {2, "M;28~cp;1.04", "without a unit"},
     {2, "M;28~k;0.4", "above 1"},
     {4, "M;28;;~form;NASA 7;;~a1;3.5;;", "constant a2 is missing"},

@@ -39,6 +39,8 @@ static const struct cp_row cps[] = {
     {"N2 | cp = 6.9 + 1e-3 T Btu/lbmol-R, T in °R", 500, (6.9 + 0.9) * 4.1868, 1e-14, "900 degR"},
     {"N2 | cp = 6.4 + 1e-3 T Btu/lbmol-°F, T in °F", 310.927777777778, 6.5 * 4.1868, 1e-13, "100 degF"},
     {"N2 | cp = 28.58 + 3.77 T J/mol-K, T in K/1000", 1000, 28.58 + 3.77, 1e-14, "thousands"},
+    {"N2 | cp = 28.58 + 3.77e-3 T J/mol-K 298 to 2000 K", 1000, 28.58 + 3.77, 1e-14, "range behind the unit"},
+    {"N2 | cp = 28.58 + 3.77e-3 T J/mol-K from 298 to 2000 K", 1000, 28.58 + 3.77, 1e-14, "range behind the unit"},
     {"N2 | cp = 29.1 J/mol-K (300 to 400 K)", 350, 29.1, 1e-15, "range behind the unit"},
 };
 
@@ -164,6 +166,10 @@ static const struct {
     {"N2 | cp at 25", "If 25 °C was meant"},
     {"N2 | cp at 25 kg", "not a temperature"},
     {"N2 | cp = 29 + 1e-3 T kJ/mol-°C", "not certain what T is"},
+    {"N2 | cp = 29 + 1e-3 T J/mol-C", "not certain what T is"},
+    {"N2 | cp = 7 + 1e-3 T Btu/lbmol-F", "not certain what T is"},
+    {"N2 | cp = 7 + 1e-3 T Btu/(lbmol degR)", "not certain what T is"},
+    {"N2 | cp = 29 kJ/mol-K", "far more than any gas"},
     {"N2 | cp = 29 + 1e3/T^2 J/mol-K; T in °C", "only a polynomial"},
     {"N2 | cp = 29 J/mol-K, 2000 to 298 K", "lower temperature first"},
     {"N2 | cp = 29 J/mol-K, 298 to K", "not a temperature"},
