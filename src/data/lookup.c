@@ -24,22 +24,26 @@ static size_t special(const char *text, size_t left, char *made)
     return (u[1] == 0x80 && u[2] >= 0x80 && u[2] <= 0x95) || (u[1] == 0x88 && u[2] == 0x92) ? 3 : 0;
 }
 
+/* The next character as it counts: 0 for one that does not matter, in lower case unless keep_case. Bytes taken. */
+static size_t counted(const char *text, size_t left, bool keep_case, char *made)
+{
+    size_t taken = special(text, left, made);
+    if (taken)
+        return taken;
+    char c = text[0];
+    if (c == ' ' || c == '-' || c == '_' || c == '(' || c == ')' || c == '\t' || c == '\r' || c == '\n')
+        c = 0;
+    *made = !keep_case && c >= 'A' && c <= 'Z' ? (char)(c - 'A' + 'a') : c;
+    return 1;
+}
+
 /* Writes the text without what does not matter, as it is (keep_case) or in lower case; 0 when it does not fit. */
 static size_t spelt(const char *text, size_t length, bool keep_case, char key[KEY])
 {
     size_t used = 0;
     for (size_t i = 0; i < length;) {
         char c;
-        size_t taken = special(text + i, length - i, &c);
-        if (taken == 0) {
-            c = text[i];
-            taken = 1;
-            if (strchr(" \t\r\n-_()", c)) /* 0 is among them too */
-                c = 0;
-            else if (!keep_case && c >= 'A' && c <= 'Z')
-                c = (char)(c - 'A' + 'a');
-        }
-        i += taken;
+        i += counted(text + i, length - i, keep_case, &c);
         if (c && used + 1 >= KEY)
             return 0;
         if (c)
@@ -51,10 +55,16 @@ static size_t spelt(const char *text, size_t length, bool keep_case, char key[KE
 
 /* ---- the names of a species ------------------------------------------------------------------------------ */
 
+/* Is a text the one of a key (which is not empty)? Stops at the first difference: a search looks at every name. */
 static bool same(const char *key, const char *text, size_t length, bool keep_case)
 {
-    char other[KEY];
-    return spelt(text, length, keep_case, other) && strcmp(key, other) == 0;
+    for (size_t i = 0; i < length;) {
+        char c;
+        i += counted(text + i, length - i, keep_case, &c);
+        if (c && c != *key++)
+            return false;
+    }
+    return *key == 0;
 }
 
 /* Calls back with each alias of a list "a|b|c" by moving a cursor. */
