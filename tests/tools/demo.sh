@@ -11,7 +11,7 @@ if [ ! -e "$1" ]; then
     exit 1
 fi
 echo "Computing $# sample sheets in headless Calc"
-csv='csv:Text - txt - csv (StarCalc):44,34,76,1,,0,false,true,false,false,false,-1'
+csv='csv:Text - txt - csv (StarCalc):44,34,76,1,,0,false,true,true,false,false,-1'
 tests/tools/office.sh "$OXT" "$demo" "$csv" pdf -- "$@"
 for example in "$@"; do
     name=$(basename "$example" .fods)
