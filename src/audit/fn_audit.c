@@ -54,7 +54,6 @@ static void read_legacy(struct sheet_check *sheet, size_t wanted)
         struct gas_refusal refusal = {0};
         struct audited *row = &audit->row[i];
         const struct gas_cell *cell = legacy_cell(sheet, i, wanted);
-        row->status = AUDIT_BLANK;
         if (legacy_read(cell, job, &job->wanted.heading[0], job->options.digits, &row->legacy, &refusal))
             continue;
         row->status = AUDIT_REFUSED;

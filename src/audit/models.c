@@ -14,7 +14,14 @@ bool model_R(struct replay *replay, double parameter)
 {
     if (fabs(replay->job.gas.R / parameter - 1) < 1e-12)
         return false;
+    double ratio = parameter / replay->job.gas.R;
     replay->job.gas.R = parameter;
+    if (replay->desk->job->choice->rule[0] == 'k') { /* k stays, and cp = R k/(k - 1) goes with R */
+        replay->interval = *replay->desk->job->gas.interval;
+        for (int i = 0; i < GAS_POWERS; i++)
+            replay->interval.power[i] *= ratio;
+        replay->job.gas.interval = &replay->interval;
+    }
     return true;
 }
 
@@ -64,11 +71,7 @@ static bool hold_cp(struct replay *replay, double cp)
 {
     if (!(cp > replay->job.gas.R) || replay->job.gas.interval_count == 0)
         return false;
-    replay->interval = (struct gas_interval){.T_from = 1, .T_to = INFINITY};
-    replay->interval.power[-GAS_POWER_LOWEST] = cp;
-    replay->job.gas.interval = &replay->interval;
-    replay->job.gas.interval_count = 1;
-    replay->job.gas.rule = GAS_CP_INTEGRATED;
+    replay_hold_cp(replay, cp);
     return true;
 }
 
@@ -121,32 +124,29 @@ bool model_cp_at_mean(struct replay *replay, double parameter)
     return cp_rule(replay, GAS_CP_AT_MEAN);
 }
 
-/* The formula of one interval evaluated at the temperature in degC. */
-static double cp_of_celsius(const struct gas_interval *interval, double celsius)
+/* The integral of the powers of an interval between two figures of one sign. */
+static double integral_of(const struct gas_interval *interval, double from, double to)
 {
     double sum = 0;
-    for (int i = 0; i < GAS_POWERS; i++)
+    for (int i = 0; i < GAS_POWERS; i++) {
+        int power = i + GAS_POWER_LOWEST + 1;
         if (interval->power[i] != 0)
-            sum += interval->power[i] * pow(celsius, i + GAS_POWER_LOWEST);
+            sum += interval->power[i] * (power == 0 ? log(to / from) : (pow(to, power) - pow(from, power)) / power);
+    }
     return sum;
 }
 
-/* A formula in K used with degC: its integral between the two temperatures, as a mean. */
+/* A formula in K used with degC, as its mean between the two temperatures. */
 bool model_cp_celsius(struct replay *replay, double parameter)
 {
     (void)parameter;
-    enum { PANELS = 32 }; /* Simpson's rule; the formulas are smooth where they make sense at all */
     const struct gas *gas = &replay->desk->job->gas;
-    double from = replay->truth->T_start - 273.15, to = replay->truth->T_end - 273.15, sum = 0;
+    double from = replay->truth->T_start - 273.15, to = replay->truth->T_end - 273.15;
     if (gas->interval_count != 1 || gas->interval->term_count > 0 || !isfinite(from))
         return false;
     if (!isfinite(to) || fabs(to - from) < 1e-6)
-        to = from + 1e-3;
-    for (int i = 0; i <= 2 * PANELS; i++) {
-        double weight = i == 0 || i == 2 * PANELS ? 1 : i % 2 ? 4 : 2;
-        sum += weight * cp_of_celsius(gas->interval, from + (to - from) * i / (2 * PANELS));
-    }
-    return hold_cp(replay, sum / (6 * PANELS));
+        to = from * (1 + 1e-6);
+    return hold_cp(replay, integral_of(gas->interval, from, to) / (to - from));
 }
 
 bool model_cp_for_cv(struct replay *replay, double parameter)

@@ -16,7 +16,7 @@ mismodel model_cp_at_start, model_cp_at_end, model_cp_at, model_cp_of_k, model_c
     model_cp_celsius, model_cp_for_cv;
 /* the sum itself */
 mismodel model_factor, model_energy_by_molar_mass, model_log10, model_flow_for_closed, model_exchanged,
-    model_ratio_inverted, model_reversible, model_efficiency_turned, model_isothermal, model_adiabatic,
-    model_exponent_of_volume, model_exponent_of_pressure, model_exponent_inverted, model_exponent_k;
+    model_ratio_inverted, model_reversible, model_efficiency_turned, model_isothermal, model_adiabatic, model_exponent,
+    model_exponent_k;
 
 #endif

@@ -147,41 +147,15 @@ static bool set_exponent(struct gas_typed_leg *leg, double n)
     return true;
 }
 
-/* (P2/P1)^(n-1) where (n-1)/n is due; the polytrope whose (n'-1)/n' is n-1. */
-static bool exponent_of_volume(const struct replay *replay, size_t index, struct gas_typed_leg *leg)
+/* parameter: enum wrong_exponent */
+bool model_exponent(struct replay *replay, double parameter)
 {
-    bool by_pressure = leg->ending == GAS_TO_P || leg->ending == GAS_BY_P_RATIO;
-    return by_pressure && set_exponent(leg, 1 / (2 - exponent_of(replay, index, leg)));
-}
-
-bool model_exponent_of_volume(struct replay *replay, double parameter)
-{
-    (void)parameter;
-    return change_legs(replay, exponent_of_volume);
-}
-
-/* (V1/V2)^((n-1)/n) where n-1 is due */
-static bool exponent_of_pressure(const struct replay *replay, size_t index, struct gas_typed_leg *leg)
-{
-    bool by_volume = leg->ending == GAS_TO_V || leg->ending == GAS_BY_V_RATIO;
-    return by_volume && set_exponent(leg, 2 - 1 / exponent_of(replay, index, leg));
-}
-
-bool model_exponent_of_pressure(struct replay *replay, double parameter)
-{
-    (void)parameter;
-    return change_legs(replay, exponent_of_pressure);
-}
-
-static bool exponent_inverted(const struct replay *replay, size_t index, struct gas_typed_leg *leg)
-{
-    return set_exponent(leg, 1 / exponent_of(replay, index, leg));
-}
-
-bool model_exponent_inverted(struct replay *replay, double parameter)
-{
-    (void)parameter;
-    return change_legs(replay, exponent_inverted);
+    const struct gas_typed_legs *legs = replay->desk->legs;
+    replay->exponent = (enum wrong_exponent)parameter;
+    for (size_t i = 0; legs && i < legs->count; i++)
+        if (isfinite(exponent_of(replay, i, &legs->leg[i])))
+            return true;
+    return false;
 }
 
 /* k = 1.4 for n */

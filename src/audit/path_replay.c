@@ -54,6 +54,31 @@ static void efficiency_turned(const struct replay *replay, const struct gas_poin
     change->dU = gas_du(gas, start->T, T.value).value;
 }
 
+/* T2 by a wrong exponent; the work by the right formula from that T2. */
+static void exponent_wrong(const struct replay *replay, const struct gas_point *start, const struct gas_leg *leg,
+                           struct gas_change *change)
+{
+    const struct gas *gas = &replay->job.gas;
+    bool flow = replay->job.options.system == GAS_FLOW, polytropic = leg->process == GAS_POLYTROPIC;
+    bool by_volume = leg->ending == GAS_TO_V || leg->ending == GAS_BY_V_RATIO;
+    double n = polytropic ? leg->n : gas_gamma(gas, start->T).value;
+    double ratio = by_volume ? start->v / change->end.v : change->end.P / start->P;
+    double power[] = {
+        [EXPONENT_N_1] = n - 1, [EXPONENT_N_1_N] = (n - 1) / n, [EXPONENT_INVERSE] = 1 / n, [EXPONENT_N] = n};
+    if ((!polytropic && leg->process != GAS_ADIABATIC) || leg->efficiency < 1 || !isfinite(n) ||
+        replay->exponent == (by_volume ? EXPONENT_N_1 : EXPONENT_N_1_N))
+        return;
+    change->end.T = start->T * pow(ratio, power[replay->exponent]);
+    change->dH = gas_dh(gas, start->T, change->end.T).value;
+    change->dU = gas_du(gas, start->T, change->end.T).value;
+    change->W = flow ? change->dH : change->dU;
+    if (polytropic)
+        change->W = (flow ? n : 1) * gas->R / (n - 1) * (change->end.T - start->T);
+    change->Q = (flow ? change->dH : change->dU) - change->W;
+    *(by_volume ? &change->end.P : &change->end.v) =
+        gas->R * change->end.T / (by_volume ? change->end.v : change->end.P);
+}
+
 static void add_up(struct gas_path_case *path)
 {
     struct gas_change sum = {.end = path->change[path->count - 1].end};
@@ -85,8 +110,10 @@ bool path_replay(struct replay *replay, double *si)
             heat_swapped(&path.leg[i], replay->job.options.system, change);
         if (replay->efficiency_turned)
             efficiency_turned(replay, i ? &path.change[i - 1].end : &path.start, &path.leg[i], change);
+        if (replay->exponent)
+            exponent_wrong(replay, i ? &path.change[i - 1].end : &path.start, &path.leg[i], change);
     }
-    if (replay->log10 || replay->heat_swapped || replay->efficiency_turned)
+    if (replay->log10 || replay->heat_swapped || replay->efficiency_turned || replay->exponent)
         add_up(&path);
     return gas_path_quantity(&replay->job, &path, &path.total, &replay->job.wanted.heading[0], si, &refusal);
 }

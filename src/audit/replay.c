@@ -3,6 +3,8 @@
 #include <math.h>
 #include <string.h>
 
+#include <gasleaf/heat.h>
+
 #include "audit/path_replay.h"
 
 static struct gas_leg_figure *leg_figure(struct gas_typed_leg *leg, enum leg_place place)
@@ -199,6 +201,7 @@ void replay_reset(struct replay *replay, const struct desk_case *truth)
     replay->figures = truth->figures;
     replay->factor = 1;
     replay->legs_changed = replay->log10 = replay->heat_swapped = replay->efficiency_turned = false;
+    replay->exponent = EXPONENT_RIGHT;
     for (size_t i = 0; i < replay->desk->sites; i++)
         replay->reading[i].changed = false;
 }
@@ -226,6 +229,24 @@ struct gas_typed_legs *replay_legs(struct replay *replay)
         replay->legs_changed = true;
     }
     return &replay->legs;
+}
+
+void replay_hold_cp(struct replay *replay, double cp)
+{
+    replay->interval = (struct gas_interval){.T_from = 1e-3, .T_to = INFINITY};
+    replay->interval.power[-GAS_POWER_LOWEST] = cp;
+    replay->job.gas.interval = &replay->interval;
+    replay->job.gas.interval_count = 1;
+    replay->job.gas.rule = GAS_CP_INTEGRATED;
+}
+
+/* A reference volume is an amount by way of R: with another R it is another amount. */
+static void follow_R(struct replay *replay)
+{
+    double ratio = replay->desk->job->gas.R / replay->job.gas.R;
+    for (size_t i = 0; ratio != 1 && i < replay->desk->sites; i++)
+        if (replay->desk->site[i].unit->reference_volume)
+            replay_reading(replay, i)->unit.scale *= ratio;
 }
 
 /* Readings of givens and legs into SI; the sign of a work stays what the heading and the options make it. */
@@ -264,12 +285,24 @@ static double show(const struct replay *replay, double si)
     return shown * replay->factor;
 }
 
-double replay_run(struct replay *replay)
+static bool run_task(struct replay *replay, double *si)
 {
     struct gas_refusal refusal = {.made = true};
+    return replay->desk->legs ? path_replay(replay, si)
+                              : replay->job.task->run(&replay->job, &replay->figures, si, &refusal);
+}
+
+double replay_run(struct replay *replay)
+{
     double si;
+    follow_R(replay);
     read_sites(replay);
-    bool good = replay->desk->legs ? path_replay(replay, &si)
-                                   : replay->job.task->run(&replay->job, &replay->figures, &si, &refusal);
-    return good ? show(replay, si) : NAN;
+    if (run_task(replay, &si))
+        return show(replay, si);
+    /* A sheet that mistakes a temperature has left the data, but not noticed: its cp is a constant. */
+    struct gas_result cp = gas_cp(&replay->desk->job->gas, replay->truth->T_start);
+    if (cp.status != GAS_OK || replay->job.gas.interval == &replay->interval)
+        return NAN;
+    replay_hold_cp(replay, cp.value);
+    return run_task(replay, &si) ? show(replay, si) : NAN;
 }

@@ -54,6 +54,9 @@ struct desk_case {
     struct gas_path_case path; /* when desk->legs */
 };
 
+/* What stands in place of (n-1)/n over a pressure ratio, or of n-1 over a volume ratio. */
+enum wrong_exponent { EXPONENT_RIGHT, EXPONENT_N_1, EXPONENT_N_1_N, EXPONENT_INVERSE, EXPONENT_N };
+
 struct replay {
     const struct desk *desk;
     const struct desk_case *truth;
@@ -64,9 +67,10 @@ struct replay {
     struct gas_interval interval; /* of a changed heat capacity */
     struct gas_typed_legs legs;   /* copied when changed */
     bool legs_changed;
-    bool log10;             /* ln read as log10 in isothermal legs */
-    bool heat_swapped;      /* cp for cv and the reverse where heat or work is counted */
-    bool efficiency_turned; /* multiplied where it divides */
+    bool log10;                   /* ln read as log10 in isothermal legs */
+    bool heat_swapped;            /* cp for cv and the reverse where heat or work is counted */
+    bool efficiency_turned;       /* multiplied where it divides */
+    enum wrong_exponent exponent; /* of T2/T1 in adiabatic and polytropic legs */
 };
 
 /* desk_open - the sites of a prepared job; false and a refusal only when memory is out. */
@@ -87,6 +91,9 @@ struct gas_typed_legs *replay_legs(struct replay *replay);
 
 /* replay_figure - of a site in the user's own unit; NAN when it has none in this case. */
 double replay_figure(const struct desk *desk, const struct desk_case *truth, size_t site);
+
+/* replay_hold_cp - a constant heat capacity, J/(mol K), at any temperature. */
+void replay_hold_cp(struct replay *replay, double cp);
 
 /* replay_run - the wanted figure in the user's unit, NAN when it cannot be. */
 double replay_run(struct replay *replay);

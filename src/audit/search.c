@@ -3,6 +3,9 @@
 #include <math.h>
 #include <string.h>
 
+/* Two slips together that are less likely than this are chance rather than explanation (common practice). */
+static const double WORTH = 0.004;
+
 enum { KEPT = 40, ROW_TRIES = 2500, CALL_TRIES = 60000 };
 
 /* One case being searched. */
@@ -56,6 +59,8 @@ static void keep(struct hunt *hunt, const short part[TOGETHER], double figure)
 {
     double good = fit(hunt->row, figure);
     if (!(good > 0))
+        return;
+    if (part[1] >= 0 && part[2] < 0 && likelihood(hunt->audit, part) < WORTH)
         return;
     struct explanation new = {.figure = figure, .score = good * likelihood(hunt->audit, part)};
     memcpy(new.part, part, sizeof new.part);
@@ -241,6 +246,26 @@ static size_t find_common(struct hunt *hunt, struct explanation common[NAMED])
     return count;
 }
 
+/* No slip holds for all: those that fit many cases are likelier than those that fit one. */
+static void weigh_by_share(struct hunt *hunt)
+{
+    enum { SAMPLE = 30 };
+    struct audit *audit = hunt->audit;
+    size_t fits[INSTANCES] = {0}, sampled = 0;
+    for (size_t i = 0; i < audit->rows && sampled < SAMPLE; i++) {
+        if (!differs(&audit->row[i]) || !read_case(audit, i, &hunt->truth))
+            continue;
+        hunt->row = &audit->row[i];
+        hunt->kept = 0;
+        try_singles(hunt);
+        for (size_t k = 0; k < audit->instances; k++)
+            fits[k] += fit(hunt->row, hunt->figure[k]) > 0;
+        sampled++;
+    }
+    for (size_t k = 0; k < audit->instances && sampled > 1; k++)
+        audit->instance[k].likelihood *= 0.2 + (double)fits[k] / (double)sampled;
+}
+
 static size_t first_that_differs(const struct audit *audit, size_t *total)
 {
     size_t first = audit->rows;
@@ -297,7 +322,8 @@ bool audit_open(struct audit *audit, const struct desk *desk, struct gas_arena *
     audit->instance = gas_arena_take(arena, INSTANCES, sizeof *audit->instance);
     if (!audit->row || !audit->replay || !audit->instance)
         return gas_refuse(refusal, "given", "there is not enough memory for it; give fewer rows.");
-    memset(audit->row, 0, audit->rows * sizeof *audit->row);
+    for (size_t i = 0; i < audit->rows; i++)
+        audit->row[i] = (struct audited){.status = AUDIT_BLANK};
     replay_open(audit->replay, desk);
     return true;
 }
@@ -317,6 +343,8 @@ void audit_run(struct audit *audit)
         hunt->row = &audit->row[first];
         explain(hunt);
         count = find_common(hunt, common);
+        if (count == 0)
+            weigh_by_share(hunt);
     }
     for (size_t i = 0; i < audit->rows; i++)
         if (differs(&audit->row[i]))

@@ -71,7 +71,6 @@ static const struct slip table[] = {
     ROUND_MODEL("R 0.08206",  R, 0.60, "R = 0.08206 L atm",      model_R, 0.08206 * 101.325),
     ROUND_MODEL("R 0.0821",   R, 0.50, "R = 0.0821 L atm",       model_R, 0.0821 * 101.325),
     ROUND_MODEL("R 0.082",    R, 0.20, "R = 0.082 L atm",        model_R, 0.082 * 101.325),
-    ROUND_MODEL("R 0.0831",   R, 0.10, "R = 0.0831 L bar",       model_R, 8.31),
     ROUND_MODEL("R 1.987",    R, 0.40, "R = 1.987 cal",          model_R, 1.987 * 4.184),
     ROUND_MODEL("R 1.986",    R, 0.20, "R = 1.986 cal",          model_R, 1.986 * 4.184),
     ROUND_MODEL("R 10.73",    R, 0.40, "R = 10.73 psi ft3/lbmol-\xC2\xB0R", model_R, 10.73 * 6894.757293168361 * 0.028316846592 * 1.8 / 453.59237),
@@ -157,9 +156,10 @@ static const struct slip table[] = {
     MODEL("efficiency turned",   EFFICIENCY, 0.60, "efficiency multiplied where it divides, or the reverse", model_efficiency_turned, 0),
     MODEL("isothermal formula",  FORMULA, 0.20, "the isothermal formula used", model_isothermal, 0),
     MODEL("adiabatic formula",   FORMULA, 0.20, "the adiabatic formula used", model_adiabatic, 0),
-    MODEL("exponent n-1",        EXPONENT, 0.40, "exponent n-1 in place of (n-1)/n", model_exponent_of_volume, 0),
-    MODEL("exponent (n-1)/n",    EXPONENT, 0.40, "exponent (n-1)/n in place of n-1", model_exponent_of_pressure, 0),
-    MODEL("exponent 1/n",        EXPONENT, 0.20, "exponent 1/n in place of n", model_exponent_inverted, 0),
+    MODEL("exponent n-1",        EXPONENT, 0.40, "exponent n-1 in place of (n-1)/n", model_exponent, EXPONENT_N_1),
+    MODEL("exponent (n-1)/n",    EXPONENT, 0.40, "exponent (n-1)/n in place of n-1", model_exponent, EXPONENT_N_1_N),
+    MODEL("exponent 1/n",        EXPONENT, 0.15, "exponent 1/n in place of (n-1)/n or n-1", model_exponent, EXPONENT_INVERSE),
+    MODEL("exponent n",          EXPONENT, 0.15, "exponent n in place of (n-1)/n or n-1", model_exponent, EXPONENT_N),
     MODEL("exponent 1.4",        EXPONENT, 0.30, "exponent 1.4 in place of n", model_exponent_k, 0),
 
     /* units */

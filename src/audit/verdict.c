@@ -51,8 +51,7 @@ void verdict_slips(struct audit *audit, size_t row, const struct explanation *ex
 
 static int shown_digits(const struct audited *row)
 {
-    int digits = row->legacy.digits + 1;
-    return digits < 5 ? 5 : digits;
+    return row->legacy.digits < 5 || row->legacy.figure == 0 ? 5 : row->legacy.digits;
 }
 
 static void write_figure(struct writer *writer, const struct audited *row, double figure)
@@ -132,7 +131,7 @@ void verdict_text(struct audit *audit, size_t index, char *buffer, size_t size)
         break;
     case AUDIT_EXPLAINED:
         write_against(&writer, audit, row);
-        write_words(&writer, "Likely: ");
+        write_words(&writer, row->explanation[0].part[1] < 0 ? "Likely: " : "Possibly, together: ");
         write_explanations(&writer, audit, index);
         break;
     case AUDIT_DIFFERS:
