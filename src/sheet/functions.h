@@ -24,6 +24,8 @@ gas_entry gas_fn_cycle;   /* fn_cycle.c */
 gas_entry gas_fn_card;    /* fn_gases.c */
 gas_entry gas_fn_list;    /* fn_gases.c */
 gas_entry gas_fn_stages;  /* fn_stages.c */
+gas_entry gas_fn_fill;    /* fn_vessel.c */
+gas_entry gas_fn_vent;    /* fn_vessel.c */
 gas_entry gas_fn_faults;  /* fn_desk.c */
 gas_entry gas_fn_given;   /* fn_desk.c */
 gas_entry gas_fn_solve;   /* fn_solve.c */

@@ -122,13 +122,24 @@ static bool extent_of_wanted(struct gas_job *job, struct gas_refusal *refusal)
 
 /* -- a call -------------------------------------------------------------------------------------------------------- */
 
+/* An option that would be passed over is a mistake of whoever wrote it. */
+static bool options_belong(const struct gas_job *job, struct gas_refusal *refusal)
+{
+    if (job->options.wall_said && !job->task->wall)
+        return gas_refuse(refusal, "options",
+                          "isothermal, adiabatic and heat lost are options of FILL and VENT; in %s write a process.",
+                          job->task->name);
+    return !job->options.outlet_said ||
+           gas_refuse(refusal, "options", "outlet is an option of MIX; %s does not take it.", job->task->name);
+}
+
 bool gas_job_read(struct gas_job *job, const struct gas_job_arguments *arguments, struct gas_refusal *refusal)
 {
     job->choice = NULL;
     job->own = NULL;
     job->extent = GAS_EXTENT_NONE;
     job->barometer_column = -1;
-    if (!gas_options_read(arguments->options, &job->options, refusal))
+    if (!gas_options_read(arguments->options, &job->options, refusal) || !options_belong(job, refusal))
         return false;
     job->choice = gas_choose(arguments->gas, refusal);
     if (!job->choice)

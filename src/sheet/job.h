@@ -39,6 +39,7 @@ struct gas_job;
 struct gas_task {
     const char *name;   /* of the worksheet function, "SOLVE": for sentences */
     bool mixed_extents; /* totals may stand beside flows (a vessel's V and a line's flow) */
+    bool wall;          /* the options of a vessel's wall mean something here; elsewhere they are refused */
     /* prepare - once per call and after a change of headings: refuse givens and wanted that are not of this task,
      * compile the rest into job->own (from the arena). */
     bool (*prepare)(struct gas_job *job, struct gas_arena *arena, struct gas_refusal *refusal);

@@ -260,4 +260,4 @@ static bool run(const struct gas_job *job, const struct gas_case *figures, doubl
     return true;
 }
 
-const struct gas_task gas_task_solve = {"SOLVE", false, prepare, run};
+const struct gas_task gas_task_solve = {.name = "SOLVE", .prepare = prepare, .run = run};

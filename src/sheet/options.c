@@ -182,6 +182,42 @@ static bool read_digits(struct reader *reader)
     return true;
 }
 
+static bool read_isothermal(struct reader *reader)
+{
+    reader->options->wall_said = true;
+    reader->options->wall = GAS_WALL_ISOTHERMAL;
+    return true;
+}
+
+static bool read_adiabatic(struct reader *reader)
+{
+    reader->options->wall_said = true;
+    reader->options->wall = GAS_WALL_ADIABATIC;
+    return true;
+}
+
+static bool read_wall_heat(struct reader *reader)
+{
+    double figure;
+    size_t used;
+    if (!gas_number_parse(reader->rest.at, reader->rest.length, &figure, &used))
+        return refuse_form(reader);
+    struct gas_piece unit = gas_piece_trim((struct gas_piece){reader->rest.at + used, reader->rest.length - used});
+    if (unit.length != 1 || unit.at[0] != '%' || !(figure >= 0 && figure <= 100))
+        return refuse_form(reader);
+    reader->options->wall_said = true;
+    reader->options->wall = GAS_WALL_FRACTION;
+    reader->options->wall_fraction = figure / 100;
+    return true;
+}
+
+static bool read_outlet(struct reader *reader)
+{
+    reader->options->outlet_said = true;
+    return read_figure(reader, reader->rest, GAS_DIM_PRESSURE, &reader->options->P_outlet) &&
+           (reader->options->P_outlet > 0 || refuse_form(reader));
+}
+
 /* THE table of options: words (lower case, longer ones first), what follows them, the reader. */
 /* clang-format off */
 static const struct option {
@@ -203,13 +239,18 @@ static const struct option {
     {"scf",          true,  "scf 60 °F, 14.73 psi",    read_scf},
     {"digits",       true,  "digits 4",                read_digits},
     {"hard errors",  false, "hard errors",             read_hard_errors},
+    {"isothermal",   false, "isothermal",              read_isothermal},
+    {"adiabatic",    false, "adiabatic",               read_adiabatic},
+    {"heat lost",    true,  "heat lost 30 %",          read_wall_heat},
+    {"heat gained",  true,  "heat gained 30 %",        read_wall_heat},
+    {"outlet",       true,  "outlet 2 bar",            read_outlet},
 };
 /* clang-format on */
 enum { OPTIONS = sizeof table / sizeof *table };
 
 static bool refuse_unknown(const char *shown, struct gas_refusal *refusal)
 {
-    char known[400];
+    char known[480];
     size_t used = 0;
     for (size_t i = 0; i < OPTIONS && used < sizeof known; i++)
         used += (size_t)snprintf(known + used, sizeof known - used, "%s%s", i ? "; " : "", table[i].form);

@@ -8,6 +8,7 @@
 #include <gasleaf/path.h>
 #include <gasleaf/state.h>
 #include <gasleaf/unit.h>
+#include <gasleaf/vessel.h>
 
 #include "sheet/cell.h"
 #include "sheet/sentence.h"
@@ -24,6 +25,11 @@ struct gas_options {
     double agree;                     /* relative disagreement allowed among over-determined givens */
     int digits;                       /* of the figures that are checked; 0: their own */
     struct gas_references references; /* what Nm3, Sm3, scf mean */
+    bool wall_said;                   /* vessels: an option says what passes the wall */
+    enum gas_wall wall;               /* adiabatic, isothermal or a fraction */
+    double wall_fraction;             /* of the heat that would keep the gas at its first temperature */
+    bool outlet_said;                 /* mixing of streams: an option gives the outlet pressure */
+    double P_outlet;                  /* Pa */
 };
 
 extern const struct gas_options gas_options_default;
