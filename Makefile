@@ -39,7 +39,7 @@ TEST_SRC    := $(wildcard tests/support/*.c) $(foreach layer,$(UNIT_LAYERS),$(wi
 GLUE_SRC    := $(wildcard tests/support/*.c) $(wildcard tests/glue/*.c) $(filter-out %/main.c,$(call sources,generate))
 suites = $(patsubst test_%.c,suite_%,$(filter test_%,$(notdir $(1))))
 
-.PHONY: bench all check test demo deps generate install lint valgrind clean help glue tools sdk
+.PHONY: bench all check test demo deps generate install lint valgrind clean help glue tools sdk checks
 all: $(OXT) ## build the extension, build/gasleaf.oxt
 
 help: ## print the targets
@@ -120,8 +120,13 @@ $(BUILD)/tests/glue-run: $(call objects,$(GLUE_SRC)) $(BUILD)/tests/glue_suites.
 	$(CC) $^ -o $@ -L$(SDK)/lib -luno_cppu -luno_sal -lcunit -ludunits2 -lm -ldl -pthread \
 	  -Wl,-rpath,$(OFFICE)/program
 
-$(BUILD)/tests/tools/%: $(BUILD)/tests/tools/%.o $(BUILD)/tests/tools/csv.o
-	$(CC) $^ -o $@
+SUPPORT := $(BUILD)/tests/support
+$(BUILD)/tests/tools/%: $(BUILD)/tests/tools/%.o $(SUPPORT)/csv.o $(SUPPORT)/published.o
+	$(CC) $^ -o $@ -lm
+
+$(BUILD)/tests/tools/check_page: $(BUILD)/tests/tools/check_page.o \
+    $(addprefix $(SUPPORT)/,csv.o published.o published_page.o formula.o) $(SHEETLIB) $(LIB)
+	$(CC) $^ -o $@ -ludunits2 -lm -pthread
 
 check: $(BUILD)/tests/run ## build and run the suites that need no office (SUITE=prefix runs a part)
 	$(BUILD)/tests/run $(SUITE)
@@ -136,7 +141,17 @@ $(BENCHES): %: %.o $(SHEETLIB) $(LIB)
 bench: $(BENCHES) ## time per row of large tables
 	@for b in $(BENCHES); do $$b || exit 1; done
 
-tools: $(foreach tool,make_sheet count_sheet show_table,$(BUILD)/tests/tools/$(tool))
+CHECK_TABLES := $(wildcard tests/check/*.csv)
+CHECK_SHEETS := $(CHECK_TABLES:tests/check/%.csv=$(BUILD)/checks/%.fods)
+$(BUILD)/checks/%.fods: tests/check/%.csv $(BUILD)/tests/tools/check_rows $(BUILD)/tests/tools/make_sheet
+	@mkdir -p $(@D)
+	@$(BUILD)/tests/tools/check_rows $< > $(@:.fods=.tsv)
+	@$(BUILD)/tests/tools/make_sheet $(@:.fods=.tsv) $@ > $(@:.fods=.rows)
+
+checks: $(BUILD)/tests/tools/check_page $(CHECK_SHEETS) ## write docs/checks.md and, to open in Calc, build/checks/*.fods
+	$(BUILD)/tests/tools/check_page
+
+tools: $(foreach tool,make_sheet count_sheet show_table check_rows,$(BUILD)/tests/tools/$(tool))
 
 test: deps ## install what is missing, build, and run every test, those in headless Calc too
 	@echo "Building"

@@ -38,7 +38,14 @@ part "layers include downwards, C alone" tests/check_arrows.sh
 part "unit suites" "$BUILD/tests/run"
 part "glue of the add-in" env GASLEAF_ADDIN="$ADDIN" "$BUILD/tests/glue-run"
 
-echo "-- headless Calc computes tests/sheets"
+echo "-- headless Calc computes tests/sheets and tests/check"
+for table in tests/check/*.csv; do
+    topic=published-$(basename "$table" .csv)
+    "$BUILD/tests/tools/check_rows" "$table" >"$results/$topic.tsv" || failed=$((failed + 1))
+    if ! "$BUILD/tests/tools/make_sheet" "$results/$topic.tsv" "$results/sheets/$topic.fods" >"$results/$topic.rows"; then
+        failed=$((failed + 1))
+    fi
+done
 for table in tests/sheets/*.tsv; do
     topic=$(basename "$table" .tsv)
     if ! "$BUILD/tests/tools/make_sheet" "$table" "$results/sheets/$topic.fods" >"$results/$topic.rows"; then

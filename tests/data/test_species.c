@@ -7,7 +7,6 @@
 #include <gasleaf/species.h>
 
 #include "check.h"
-#include "check/janaf.h"
 #include "check/printed_masses.h"
 
 static const struct gas_species *find(const char *text)
@@ -173,53 +172,6 @@ static void molar_masses(void)
     check_close("heavy water", gas_species_molar_mass(find("D2O")), 20.027203555688e-3, 1e-12, 0);
 }
 
-/*
- * 0.5 % holds for most gases. The others rest on later or other spectra and anharmonic corrections in the NASA set; the
- * bound of each is the difference between the two publications, rounded up to the next whole per cent.
- */
-static double janaf_tolerance(const struct janaf_row *row)
-{
-    /* clang-format off */
-    static const struct {
-        int percent;
-        const char *names;
-    } differing[] = {
-        {1, "|hydrogen sulfide|carbonyl sulfide|ammonia|carbon disulfide|acetylene|ethylene oxide|carbon tetrachloride"
-            "|hexafluoroethane|tetrachloroethylene|phosphoryl chloride|methyl|"},
-        {2, "|nitrous oxide|nitric acid|iodine|cyanogen|sulfur tetrafluoride|silicon tetrafluoride|"},
-        {3, "|nitrogen dioxide|dinitrogen tetroxide|ozone|trifluoromethane|chlorodifluoromethane|diborane|"},
-        {5, "|dinitrogen pentoxide|nitrogen trifluoride|hydrogen peroxide|methane|"},
-        {7, "|hydrazine|"}, {9, "|octasulfur|"}, {11, "|dinitrogen trioxide|"}, {12, "|chloroform|"}};
-    /* clang-format on */
-    char name[60];
-    snprintf(name, sizeof name, "|%s|", row->name);
-    for (size_t i = 0; i < sizeof differing / sizeof differing[0]; i++)
-        if (strstr(differing[i].names, name))
-            return differing[i].percent / 100.0;
-    return 0.005;
-}
-
-static void against_janaf(void)
-{
-    size_t count = sizeof janaf / sizeof janaf[0];
-    double s298 = NAN;
-    for (size_t i = 0; i < count; i++) {
-        const struct janaf_row *row = &janaf[i];
-        const struct gas_species *species = find(row->name);
-        if (!check_true(row->name, species != NULL))
-            continue;
-        const struct gas gas = gas_of_species(species);
-        double tolerance = janaf_tolerance(row);
-        char id[80];
-        snprintf(id, sizeof id, "%s %s %g K", row->table, row->name, row->T);
-        if (row->T == 298.15)
-            s298 = row->s;
-        check_close(id, gas_cp(&gas, row->T).value, row->cp, tolerance, 0);
-        check_close(id, gas_dh(&gas, 298.15, row->T).value, 1000 * row->dh, tolerance, 0.5);
-        check_close(id, gas_ds_isobaric(&gas, 298.15, row->T).value, row->s - s298, tolerance, 2e-3);
-    }
-}
-
 /* US Standard Atmosphere 1976, Table I, geometric altitude (from memory): printed to 6 digits. */
 static void standard_atmosphere(void)
 {
@@ -344,7 +296,6 @@ const struct test_suite suite_species = {"species",
                                                                     {"CAS numbers", cas_numbers_add_up},
                                                                     {"formulas", formulas_agree_with_elements},
                                                                     {"molar masses", molar_masses},
-                                                                    {"against JANAF", against_janaf},
                                                                     {"standard atmosphere", standard_atmosphere},
                                                                     {"lookups", lookups},
                                                                     {"near misses", near_misses},

@@ -3,6 +3,8 @@
  *
  *   # remark
  *   id <tab> =formula <tab> expected <tab> tolerance <tab> source        a check
+ *   ! heading <tab> heading ...                                           of further cells that checks carry after
+ *                                                                         the source: shown, not judged
  *   @ A10 = value <tab> value ...                                         cells of the sheet "data", across from A10
  *   @ A10:C14 = =formula                                                  an array formula on that sheet
  *
@@ -234,7 +236,10 @@ static void put_check(FILE *out, long row, char *line)
     put_paragraphs(out, field[4]);
     fputs("</table:table-cell>\n<table:table-cell office:value-type=\"string\">", out);
     put_paragraphs(out, field[1][0] == '=' ? field[1] + 1 : field[1]);
-    fputs("</table:table-cell>\n</table:table-row>\n", out);
+    fputs("</table:table-cell>\n", out);
+    for (size_t i = 5; i < count; i++)
+        put_cell(out, field[i], 0, 0);
+    fputs("</table:table-row>\n", out);
 }
 
 static const char *place(const char *text, long *row, long *column)
@@ -315,7 +320,7 @@ static void put_data(FILE *out, struct cells *cells)
     fputs(row ? "</table:table-row>\n" : "<table:table-row><table:table-cell/></table:table-row>\n", out);
 }
 
-static long put_checks(FILE *out, FILE *in, struct cells *cells)
+static long put_checks(FILE *out, FILE *in, struct cells *cells, char **further)
 {
     char *line = NULL;
     size_t room = 0;
@@ -323,13 +328,15 @@ static long put_checks(FILE *out, FILE *in, struct cells *cells)
     while (getline(&line, &room, in) >= 0)
         if (*line == '@')
             read_data(cells, line);
+        else if (*line == '!')
+            *further = strdup(line + 1);
         else if (*line != '#' && *trimmed(line))
             put_check(out, row++, line);
     free(line);
     return row - FIRST_ROW;
 }
 
-static void put_head(FILE *out, long last)
+static void put_head(FILE *out, long last, char *further)
 {
     static const char *const heading[] = {"id", "result", "expected", "tolerance", "ok", "source", "formula"};
     fputs("<?xml version=\"1.0\" encoding=\"UTF-8\"?>\n"
@@ -350,6 +357,10 @@ static void put_head(FILE *out, long last)
         FIRST_ROW, last, FIRST_ROW, last);
     for (size_t i = 0; i < sizeof heading / sizeof *heading; i++)
         put_cell(out, heading[i], 0, 0);
+    char *field[FIELDS] = {0};
+    size_t count = further ? split(further, field) : 0;
+    for (size_t i = 0; i < count; i++)
+        put_cell(out, field[i], 0, 0);
     fputs("</table:table-row>\n", out);
 }
 
@@ -361,14 +372,15 @@ int main(int argc, char **argv)
     if (!in || !out)
         die("cannot open", in ? argv[2] : argv[1]);
     struct cells cells = {0};
-    char *rows = NULL;
+    char *rows = NULL, *further = NULL;
     size_t size = 0;
     FILE *body = open_memstream(&rows, &size);
     if (!body)
         die("no memory", argv[1]);
-    long count = put_checks(body, in, &cells);
+    long count = put_checks(body, in, &cells, &further);
     fclose(body);
-    put_head(out, count + FIRST_ROW);
+    put_head(out, count + FIRST_ROW, further);
+    free(further);
     fputs(rows, out);
     fputs("</table:table>\n<table:table table:name=\"data\">\n", out);
     put_data(out, &cells);
