@@ -12,7 +12,7 @@ UDUNITS   ?= $(firstword $(wildcard /usr/lib/*/libudunits2.so.0 /usr/lib64/libud
 UDUNITS_LICENCE ?= /usr/share/doc/libudunits2-0/copyright
 # Debian packages that `make deps` installs when they are missing.
 BUILD_PACKAGES := gcc libc6-dev make zip libudunits2-dev libreoffice-calc libreoffice-dev libreoffice-dev-common
-TEST_PACKAGES  := libcunit1-dev libgsl-dev units unzip
+TEST_PACKAGES  := libcunit1-dev libgsl-dev units unzip locales
 DEMO_PACKAGES  := poppler-utils fonts-dejavu-core
 LINT_PACKAGES  := clang-format clang-tidy cppcheck valgrind
 
