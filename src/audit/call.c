@@ -4,6 +4,17 @@
 
 #include "sheet/job_solve.h"
 #include "sheet/path_task.h"
+#include "sheet/stages_task.h"
+
+/* Does the text speak of stages, as GAS.STAGES takes them? A leg never does. */
+static bool speaks_of_stages(const struct gas_block *legs)
+{
+    for (size_t i = 0; i < legs->rows * legs->columns; i++)
+        if (legs->cell[i].kind == GAS_CELL_TEXT &&
+            (strcasestr(legs->cell[i].text, "stage") || strcasestr(legs->cell[i].text, "ratio")))
+            return true;
+    return false;
+}
 
 static bool read_arguments(struct check_call *check, const struct gas_call *call, const struct check_arguments *places)
 {
@@ -13,6 +24,12 @@ static bool read_arguments(struct check_call *check, const struct gas_call *call
                                                 .headings = gas_argument(call, places->headings),
                                                 .options = gas_argument(call, places->options)};
     const struct gas_block *legs = gas_argument(call, places->legs);
+    if (speaks_of_stages(legs)) {
+        check->job.task = &gas_stages_task;
+        check->job.legs = &check->staging;
+        return gas_job_read(&check->job, &arguments, &check->refusal) &&
+               gas_staging_read(legs, &check->job.options, &check->staging, &check->refusal);
+    }
     if (!gas_omitted(legs) && !(gas_single(legs) && gas_cell_blank(legs->cell)))
         return gas_path_open(&check->job, &check->legs, &arguments, legs, &check->refusal);
     check->job.task = &gas_task_solve;

@@ -9,6 +9,7 @@
 
 #include "sheet/job.h"
 #include "sheet/legs.h"
+#include "sheet/staging_text.h"
 
 /* Where the arguments stand in the call. */
 struct check_arguments {
@@ -18,6 +19,7 @@ struct check_arguments {
 struct check_call {
     struct gas_job job; /* read, not prepared: wanted may hold several headings */
     struct gas_typed_legs legs;
+    struct gas_typed_staging staging;
     struct gas_refusal refusal;
 };
 
