@@ -34,8 +34,8 @@ ADDIN     := $(BUILD)/oxt/gasleaf.so
 OXT       := $(BUILD)/gasleaf.oxt
 GENERATOR := $(BUILD)/generate
 
-UNIT_LAYERS := core data units sheet audit check
-TEST_SRC    := $(wildcard tests/support/*.c) $(foreach layer,$(UNIT_LAYERS),$(wildcard tests/$(layer)/test_*.c))
+UNIT_LAYERS := core data units sheet audit check fuzz
+TEST_SRC    := $(wildcard tests/support/*.c) $(filter-out tests/fuzz/test_%,$(wildcard tests/fuzz/*.c)) $(foreach layer,$(UNIT_LAYERS),$(wildcard tests/$(layer)/test_*.c))
 GLUE_SRC    := $(wildcard tests/support/*.c) $(wildcard tests/glue/*.c) $(filter-out %/main.c,$(call sources,generate))
 suites = $(patsubst test_%.c,suite_%,$(filter test_%,$(notdir $(1))))
 
@@ -110,10 +110,14 @@ $(BUILD)/tests/glue_suites.c: $(GLUE_SRC) Makefile
 	@$(call write_suites,$(call suites,$(GLUE_SRC))) > $@
 
 $(BUILD)/tests/%.o: CPPFLAGS += -Itests/support -Itests
+$(BUILD)/tests/fuzz/%.o: CPPFLAGS += -DTEST_LOCALES='"$(BUILD)/locale"'
+$(BUILD)/locale/de_DE.UTF-8:
+	@mkdir -p $(@D)
+	localedef -i de_DE -f UTF-8 $@
 $(BUILD)/tests/%suites.o: $(BUILD)/tests/%suites.c
 	$(COMPILE) -c $< -o $@
 
-$(BUILD)/tests/run: $(call objects,$(TEST_SRC)) $(BUILD)/tests/suites.o $(SHEETLIB) $(LIB)
+$(BUILD)/tests/run: $(call objects,$(TEST_SRC)) $(BUILD)/tests/suites.o $(SHEETLIB) $(LIB) | $(BUILD)/locale/de_DE.UTF-8
 	$(CC) $^ -o $@ -lcunit -lgsl -lgslcblas -ludunits2 -lm -pthread
 
 $(BUILD)/tests/glue-run: $(call objects,$(GLUE_SRC)) $(BUILD)/tests/glue_suites.o $(SHEETLIB) $(LIB)
