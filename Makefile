@@ -111,13 +111,15 @@ $(BUILD)/tests/glue_suites.c: $(GLUE_SRC) Makefile
 
 $(BUILD)/tests/%.o: CPPFLAGS += -Itests/support -Itests
 $(BUILD)/tests/fuzz/%.o: CPPFLAGS += -DTEST_LOCALES='"$(BUILD)/locale"'
-$(BUILD)/locale/de_DE.UTF-8:
+# Locales that trip careless code: a decimal comma; a dotless i, in an encoding of single bytes.
+LOCALES := $(BUILD)/locale/de_DE.UTF-8 $(BUILD)/locale/tr_TR
+$(LOCALES): $(BUILD)/locale/%:
 	@mkdir -p $(@D)
-	localedef -i de_DE -f UTF-8 $@
+	localedef -i $(firstword $(subst ., ,$*)) -f $(if $(findstring UTF,$*),UTF-8,ISO-8859-9) $@
 $(BUILD)/tests/%suites.o: $(BUILD)/tests/%suites.c
 	$(COMPILE) -c $< -o $@
 
-$(BUILD)/tests/run: $(call objects,$(TEST_SRC)) $(BUILD)/tests/suites.o $(SHEETLIB) $(LIB) | $(BUILD)/locale/de_DE.UTF-8
+$(BUILD)/tests/run: $(call objects,$(TEST_SRC)) $(BUILD)/tests/suites.o $(SHEETLIB) $(LIB) | $(LOCALES)
 	$(CC) $^ -o $@ -lcunit -lgsl -lgslcblas -ludunits2 -lm -pthread
 
 $(BUILD)/tests/glue-run: $(call objects,$(GLUE_SRC)) $(BUILD)/tests/glue_suites.o $(SHEETLIB) $(LIB)

@@ -43,6 +43,9 @@ check "only src/addin knows the office" \
     "$(grep -nE '#include <(uno|typelib|rtl|sal|osl|cppu|com)/' -r src include | grep -v '^src/addin/uno_headers.h:')"
 check "public headers stand on public headers" \
     "$(grep -nE '#include "' -r include)"
+check "letters and figures are read whatever the locale (src/sheet/ascii.h, gas_number_parse)" \
+    "$(grep -nE '\b(is(alpha|alnum|digit|space|upper|lower|punct|print)|to(lower|upper)|strn?casecmp|atof|sscanf) ?\(' -r src |
+        grep -v '^src/generate/')"
 check "C is the only language of the sources" \
     "$(find src include tests -name '*.cc' -o -name '*.cpp' -o -name '*.cxx' -o -name '*.hxx' -o -name '*.hpp' -o -name '*.C')"
 

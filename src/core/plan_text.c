@@ -1,5 +1,4 @@
 /* Formulas of the working: the texts of the table with the state numbers of a plan set in. */
-#include <ctype.h>
 #include <stdio.h>
 #include <string.h>
 
@@ -40,10 +39,15 @@ static bool numbered(const struct gas_plan *plan, int variable)
     return variable >= 0 && !plan->unnumbered && !plan->shared[variable];
 }
 
+static bool in_word(char c) /* whatever the locale */
+{
+    return (c >= '0' && c <= '9') || (c >= 'a' && c <= 'z') || (c >= 'A' && c <= 'Z');
+}
+
 static size_t word_length(const char *text)
 {
     size_t length = 0;
-    while (isalnum((unsigned char)text[length]))
+    while (in_word(text[length]))
         length++;
     return length;
 }

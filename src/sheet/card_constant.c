@@ -1,10 +1,11 @@
 /* The constants of a card by their letters, in SI. */
 #include "sheet/gas_card.h"
 
-#include <ctype.h>
 #include <math.h>
 #include <stdio.h>
 #include <string.h>
+
+#include "sheet/ascii.h"
 
 #define WHAT "gas card"
 
@@ -36,7 +37,7 @@ bool gas_refuse_constant(const struct gas_form_case *form_case, const char *lett
     const struct gas_form *form = form_case->form;
     snprintf(shown, sizeof shown, "%s", letter);
     if (!letter[1])
-        shown[0] = (char)toupper((unsigned char)letter[0]);
+        shown[0] = gas_ascii_upper(letter[0]);
     if (form_case->card->intervals > 1)
         return gas_refuse(form_case->card->refusal, WHAT, "constant %s is missing in interval %zu; %s is %s.", shown,
                           form_case->interval + 1, form->shown, form->equation);

@@ -10,11 +10,11 @@
  */
 #include "sheet/gas_card.h"
 
-#include <ctype.h>
 #include <math.h>
 #include <stdio.h>
 #include <string.h>
 
+#include "sheet/ascii.h"
 #include "sheet/expression.h"
 
 #define WHAT "gas card"
@@ -157,7 +157,7 @@ static bool take_letters(struct gas_form_case *form_case, struct gas_letter lett
         if (isnan(one->value[form_case->interval]))
             return gas_refuse_constant(form_case, one->label.constant);
         snprintf(upper[i], sizeof upper[i], "%s", one->label.constant);
-        upper[i][0] = (char)toupper((unsigned char)upper[i][0]);
+        upper[i][0] = gas_ascii_upper(upper[i][0]);
         letter[2 * i] = (struct gas_letter){one->label.constant, one->value[form_case->interval]};
         letter[2 * i + 1] = (struct gas_letter){upper[i], one->value[form_case->interval]};
         one->used = true;

@@ -1,10 +1,13 @@
 #include "sheet/cell.h"
 
+#include <math.h>
 #include <stdint.h>
 #include <string.h>
 
-#define NO_MEMORY "Check the range: it is too large for the memory at hand; give fewer rows."
+#define NO_MEMORY  "Check the range: it is too large for the memory at hand; give fewer rows."
+#define NOT_FINITE "Check the result: it is not a finite number; look for a figure out of all proportion."
 static struct gas_cell no_memory = {GAS_CELL_TEXT, 0, NO_MEMORY, sizeof NO_MEMORY - 1};
+static const struct gas_cell not_finite = {GAS_CELL_TEXT, 0, NOT_FINITE, sizeof NOT_FINITE - 1};
 
 bool gas_cell_blank(const struct gas_cell *cell)
 {
@@ -65,7 +68,7 @@ static struct gas_cell *answer_cell(struct gas_call *call, size_t row, size_t co
 
 void gas_put_number(struct gas_call *call, size_t row, size_t column, double number)
 {
-    *answer_cell(call, row, column) = gas_cell_number(number);
+    *answer_cell(call, row, column) = isfinite(number) ? gas_cell_number(number) : not_finite;
 }
 
 void gas_put_text(struct gas_call *call, size_t row, size_t column, const char *text)

@@ -72,7 +72,7 @@ const struct gas_cell *gas_block_sentence(const struct gas_block *block);
 const struct gas_block *gas_argument(const struct gas_call *call, size_t index);
 
 /* Answers. gas_answer_block makes rows x columns of empty cells, or false when memory is out (the answer then is a
- * sentence). Texts are copied. */
+ * sentence). Texts are copied; a number that is not finite becomes a sentence. */
 bool gas_answer_block(struct gas_call *call, size_t rows, size_t columns);
 void gas_answer_number(struct gas_call *call, double number);
 void gas_answer_text(struct gas_call *call, const char *text);

@@ -22,8 +22,8 @@ static bool add_term(struct gas_sum *sum, struct gas_sum_term term, struct gas_r
     if (!isfinite(term.factor))
         return gas_refuse(refusal, WHAT, "a factor is too large to compute with; check its figures.");
     if (fabs(term.exponent) > EXPONENT_MOST)
-        return gas_refuse(refusal, WHAT, "T to the power %g is beyond what is read (-%d to %d).", term.exponent,
-                          EXPONENT_MOST, EXPONENT_MOST);
+        return gas_refuse(refusal, WHAT, "T to the power %s is beyond what is read (-%d to %d).",
+                          gas_shown(term.exponent).text, EXPONENT_MOST, EXPONENT_MOST);
     if (term.factor == 0)
         return true;
     while (i < sum->count && sum->term[i].exponent != term.exponent)
@@ -92,7 +92,7 @@ static bool raise_term(struct gas_sum *sum, double power, struct gas_refusal *re
 {
     struct gas_sum_term term = sum->term[0];
     if (term.factor < 0 && power != floor(power))
-        return gas_refuse(refusal, WHAT, "a negative term cannot be raised to the power %g.", power);
+        return gas_refuse(refusal, WHAT, "a negative term cannot be raised to the power %s.", gas_shown(power).text);
     *sum = (struct gas_sum){0};
     return add_term(sum, (struct gas_sum_term){pow(term.factor, power), term.exponent * power}, refusal);
 }
@@ -107,8 +107,8 @@ bool gas_sum_raise(struct gas_sum *sum, const struct gas_sum *exponent, struct g
     if (sum->count == 1)
         return raise_term(sum, power, refusal);
     if (power != floor(power) || power < 0 || power > POWER_OF_SUM_MOST)
-        return gas_refuse(refusal, WHAT, "a sum is raised to the power %g; whole powers from 0 to %d can be expanded.",
-                          power, POWER_OF_SUM_MOST);
+        return gas_refuse(refusal, WHAT, "a sum is raised to the power %s; whole powers from 0 to %d can be expanded.",
+                          gas_shown(power).text, POWER_OF_SUM_MOST);
     struct gas_sum base = *sum;
     *sum = gas_sum_of(1, 0);
     for (int i = 0; i < (int)power; i++)

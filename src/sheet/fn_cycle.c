@@ -57,9 +57,9 @@ static bool closed_cycle(struct gas_path_call *path, const struct gas_path_case 
     if (result.status == GAS_OK)
         return true;
     return gas_refuse(&path->refusal, "legs",
-                      "the cycle does not close: P ends %.3g %% and T %.3g %% off its start; end "
-                      "the last leg with `to start`.",
-                      100 * cycle->gap_P, 100 * cycle->gap_T);
+                      "the cycle does not close: P ends %s %% and T %s %% off its start; end "
+                      "the last leg with \"to start\".",
+                      gas_shown_to(100 * cycle->gap_P, 3).text, gas_shown_to(100 * cycle->gap_T, 3).text);
 }
 
 static struct gas_heading cycle_heading(const struct gas_job *job, const struct cycle_row *row)

@@ -12,15 +12,23 @@ void gas_fn_given(struct gas_call *call)
                        "heading and value number %zu is a range or is left out; give single cells "
                        "in pairs, or pass a two-column range to the function itself.",
                        i / 2 + 1);
-    if (call->count % 2)
+    if (call->count == 0)
+        gas_refuse(&refusal, "given", "nothing is given; give headings and values in pairs.");
+    else if (call->count % 2)
         gas_refuse(&refusal, "given", "the last heading has no value; give headings and values in pairs.");
     if (refusal.made) {
         gas_answer_text(call, refusal.text);
         return;
     }
-    if (gas_answer_block(call, call->count / 2, 2))
-        for (size_t i = 0; i < call->count; i++)
-            call->answer.cell[i] = *call->argument[i].cell;
+    if (!gas_answer_block(call, call->count / 2, 2))
+        return;
+    for (size_t i = 0; i < call->count; i++) {
+        const struct gas_cell *cell = call->argument[i].cell;
+        if (cell->kind == GAS_CELL_NUMBER)
+            gas_put_number(call, i / 2, i % 2, cell->number);
+        else
+            call->answer.cell[i] = *cell;
+    }
 }
 
 static bool is_fault(const struct gas_cell *cell)

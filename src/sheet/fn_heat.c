@@ -1,9 +1,9 @@
 /* Heat capacities, their integrals and the inverse: CP, CV, GAMMA, CPMEAN, DH, DU, DS, TEMP. */
 #include <string.h>
-#include <strings.h>
 
 #include <gasleaf/heat.h>
 
+#include "sheet/ascii.h"
 #include "sheet/elementwise.h"
 #include "sheet/functions.h"
 #include "sheet/gas_choice.h"
@@ -143,9 +143,9 @@ static void refuse_result(struct heat_call *heat, const struct gas_result *resul
                                range.T_to);
     else if (result->status == GAS_OUTSIDE_DATA)
         gas_refuse(&heat->refusal, name,
-                   "%s would take the temperature outside the data for %s (%g to %g K); give a "
+                   "%s would take the temperature outside the data for %s (%s to %s K); give a "
                    "smaller change.",
-                   shown, choice->label, range.T_from, range.T_to);
+                   shown, choice->label, gas_shown(range.T_from).text, gas_shown(range.T_to).text);
     else
         gas_refuse(&heat->refusal, name, "%s %s; check figure and unit.", shown, gas_status_words(result->status));
 }
@@ -308,13 +308,13 @@ static const struct temp_kind *temp_kind_of(const struct gas_block *argument, st
         return &temp_kinds[0];
     const struct gas_cell *cell = argument->cell;
     for (size_t i = 0; cell->kind == GAS_CELL_TEXT && i < sizeof temp_kinds / sizeof *temp_kinds; i++)
-        if (strcasecmp(cell->text, temp_kinds[i].word) == 0)
+        if (gas_ascii_same(cell->text, temp_kinds[i].word))
             return &temp_kinds[i];
     if (cell->kind == GAS_CELL_TEXT)
         gas_refuse(refusal, "kind", "%s is none of dh, du and ds; give one of them.",
                    gas_quoted(shown, sizeof shown, cell->text, cell->length));
     else
-        gas_refuse(refusal, "kind", "%g is a number; give dh, du or ds.", cell->number);
+        gas_refuse(refusal, "kind", "%s is a number; give dh, du or ds.", gas_shown(cell->number).text);
     return &temp_kinds[0];
 }
 

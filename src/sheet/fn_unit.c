@@ -1,8 +1,8 @@
 /* UNIT: conversion that knows gauge, differences and reference volumes. */
 #include <math.h>
 #include <string.h>
-#include <strings.h>
 
+#include "sheet/ascii.h"
 #include "sheet/elementwise.h"
 #include "sheet/functions.h"
 
@@ -17,7 +17,7 @@ static const char *after_difference_mark(const char *text)
 {
     static const char *const marks[] = {"Δ", "delta ", "difference "};
     for (size_t i = 0; i < sizeof marks / sizeof *marks; i++)
-        if (strncasecmp(text, marks[i], strlen(marks[i])) == 0)
+        if (gas_ascii_starts(text, marks[i]))
             return text + strlen(marks[i]);
     return text;
 }
@@ -76,9 +76,9 @@ static bool read_barometer(const struct gas_block *argument, double *barometer, 
         return false;
     *barometer = reading.si;
     return reading.si > 0 || gas_refuse(refusal, "barometer",
-                                        "%g Pa is not a pressure of air; give it in Pa or with "
+                                        "%s Pa is not a pressure of air; give it in Pa or with "
                                         "its unit, such as 0.98 bar.",
-                                        reading.si);
+                                        gas_shown(reading.si).text);
 }
 
 static bool convert(const struct gas_cell *cell, const struct side *from, const struct side *to, double barometer,

@@ -227,10 +227,9 @@ const struct gas_choice *gas_choose_text(const char *text, size_t length, struct
 
 static const struct gas_choice *refuse_cell(const struct gas_cell *cell, struct gas_refusal *refusal)
 {
-    char shown[40];
     if (cell->kind == GAS_CELL_NUMBER) {
-        gas_number_format(shown, sizeof shown, cell->number, 6);
-        gas_refuse(refusal, "gas", "%s is a number; write a name, a formula or a mixture, such as N2.", shown);
+        gas_refuse(refusal, "gas", "%s is a number; write a name, a formula or a mixture, such as N2.",
+                   gas_shown(cell->number).text);
     } else if (cell->kind == GAS_CELL_EMPTY) {
         gas_choose_text("", 0, refusal);
     } else {

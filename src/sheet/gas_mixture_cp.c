@@ -80,8 +80,9 @@ static bool shared_range(struct gas_draft *draft, const struct gas *gas, const s
     if (shared->T_from < shared->T_to)
         return true;
     return gas_refuse(draft->refusal, "gas",
-                      "the data of %s begin at %g K, where those of %s have ended (%g K); they cannot be mixed.",
-                      part[latest].label, shared->T_from, part[earliest].label, shared->T_to);
+                      "the data of %s begin at %s K, where those of %s have ended (%s K); they cannot be mixed.",
+                      part[latest].label, gas_shown(shared->T_from).text, part[earliest].label,
+                      gas_shown(shared->T_to).text);
 }
 
 static bool sum_heat(struct gas_draft *draft, const struct gas *gas, const struct gas_part *part, size_t count)

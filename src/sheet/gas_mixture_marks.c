@@ -1,7 +1,7 @@
 /* What stands beside the fraction of a component: percent signs, basis, the rest. */
+#include "sheet/ascii.h"
 #include "sheet/gas_mixture.h"
 
-#include <ctype.h>
 #include <math.h>
 #include <string.h>
 
@@ -51,10 +51,10 @@ static bool starts(struct gas_piece text, const char *mark)
     if (text.length < length)
         return false;
     for (size_t i = 0; i < length; i++)
-        if (tolower((unsigned char)text.at[i]) != mark[i])
+        if (gas_ascii_lower(text.at[i]) != mark[i])
             return false;
-    bool word = isalpha((unsigned char)mark[length - 1]);
-    return !word || text.length == length || !isalnum((unsigned char)text.at[length]);
+    bool word = gas_ascii_letter(mark[length - 1]);
+    return !word || text.length == length || !(gas_ascii_letter(text.at[length]) || gas_ascii_digit(text.at[length]));
 }
 
 static size_t one_mark(struct gas_piece text, struct gas_marks *marks)

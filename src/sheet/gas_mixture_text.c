@@ -1,7 +1,7 @@
 /* "N2 79 + O2 21", "79 % N2; 21 % O2", "1-butene 5 + carbon dioxide rest". */
+#include "sheet/ascii.h"
 #include "sheet/gas_mixture.h"
 
-#include <ctype.h>
 #include <string.h>
 
 static struct gas_piece front(struct gas_piece text, size_t length)
@@ -22,7 +22,7 @@ static bool separates(struct gas_piece text, size_t i)
     if (text.at[i] != '+')
         return false;
     bool exponent = i >= 2 && i + 1 < text.length && (text.at[i - 1] == 'e' || text.at[i - 1] == 'E') &&
-                    isdigit((unsigned char)text.at[i - 2]) && isdigit((unsigned char)text.at[i + 1]);
+                    gas_ascii_digit(text.at[i - 2]) && gas_ascii_digit(text.at[i + 1]);
     return !exponent;
 }
 

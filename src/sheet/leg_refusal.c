@@ -60,14 +60,14 @@ bool gas_refuse_leg(struct gas_refusal *refusal, const struct gas_job *job, cons
         return gas_refuse(refusal, "gas", "%s has no heat capacity, which \"%s\" needs; give one after '|'.",
                           job->choice->label, text);
     if (fault->argument == ARG_EFFICIENCY)
-        return gas_refuse(refusal, what, "\"%s\": an efficiency of %g %s.", text, leg->efficiency,
+        return gas_refuse(refusal, what, "\"%s\": an efficiency of %s %s.", text, gas_shown(leg->efficiency).text,
                           fault->status == GAS_NOT_APPLICABLE
                               ? "does not apply to this process; leave it out, or use the "
                                 "option flow for a machine"
                               : "is not above 0 and at most 1; 78 % is written 78 % or 0.78");
     if (fault->argument == ARG_EXPONENT)
-        return gas_refuse(refusal, what, "\"%s\": the exponent %g %s; give n, such as n=1.3.", text, leg->n,
-                          gas_status_words(fault->status));
+        return gas_refuse(refusal, what, "\"%s\": the exponent %s %s; give n, such as n=1.3.", text,
+                          gas_shown(leg->n).text, gas_status_words(fault->status));
     if (fault->status == GAS_WRONG_SIDE)
         return gas_refuse(refusal, what,
                           "\"%s\": the outside pressure %s is on the wrong side of the gas pressure %s for "

@@ -2,14 +2,15 @@
 
 #include <stdio.h>
 #include <string.h>
-#include <strings.h>
+
+#include "sheet/ascii.h"
 
 /* Where a word stands on its own in the piece; the length of the piece when it does not. */
 static size_t find_word(struct gas_piece piece, const char *word)
 {
     size_t length = strlen(word);
     for (size_t i = 0; i + length <= piece.length; i++)
-        if (strncasecmp(piece.at + i, word, length) == 0 && (i == 0 || piece.at[i - 1] == ' ') &&
+        if (gas_ascii_starts(piece.at + i, word) && (i == 0 || piece.at[i - 1] == ' ') &&
             (i + length == piece.length || piece.at[i + length] == ' '))
             return i;
     return piece.length;
@@ -120,11 +121,11 @@ static bool read_ratio(const struct reader *reader, struct gas_piece text, bool 
         char letter;
         enum gas_ending ending;
     } letters[] = {{'P', GAS_BY_P_RATIO}, {'V', GAS_BY_V_RATIO}, {'T', GAS_BY_T_RATIO}};
-    static const char *const signs[] = {"x ", "× ", "* ", "×", "*"};
+    static const char *const signs[] = {"x ", "X ", "× ", "* ", "×", "*"};
     struct gas_piece rest = gas_piece_trim((struct gas_piece){text.at + 1, text.length ? text.length - 1 : 0});
     *is_ratio = false;
     for (size_t i = 0; text.length && i < 3; i++)
-        for (size_t k = 0; text.at[0] == letters[i].letter && k < sizeof signs / sizeof *signs; k++)
+        for (size_t k = 0; gas_ascii_upper(text.at[0]) == letters[i].letter && k < sizeof signs / sizeof *signs; k++)
             if (rest.length > strlen(signs[k]) && strncmp(rest.at, signs[k], strlen(signs[k])) == 0) {
                 *is_ratio = true;
                 reader->leg->ending = letters[i].ending;
@@ -144,7 +145,7 @@ static bool read_end_point(const struct reader *reader, struct gas_piece text)
     if (!ending_of(&leg->value, &kind))
         return refuse_leg(reader,
                           "a leg ends at a pressure, a temperature or a volume; give one with its unit, a ratio "
-                          "such as V x 0.125, or `with Q = 50 kJ`.");
+                          "such as V x 0.125, or \"with Q = 50 kJ\".");
     leg->ending = kind;
     if (and == text.length)
         return true;
@@ -165,11 +166,11 @@ static bool read_end_point(const struct reader *reader, struct gas_piece text)
 static bool read_destination(const struct reader *reader, struct gas_piece text)
 {
     bool is_ratio;
-    if (text.length == 5 && strncasecmp(text.at, "start", 5) == 0) {
+    if (text.length == 5 && gas_ascii_starts(text.at, "start")) {
         reader->leg->ending = GAS_TO_START;
         return true;
     }
-    if (text.length == 7 && strncasecmp(text.at, "balance", 7) == 0) {
+    if (text.length == 7 && gas_ascii_starts(text.at, "balance")) {
         reader->leg->ending = GAS_TO_BALANCE;
         return true;
     }
@@ -184,7 +185,7 @@ static bool read_transfer(const struct reader *reader, struct gas_piece text)
     struct gas_leg_figure *value = &reader->leg->value;
     bool heat = gas_piece_take(&text, "q") || gas_piece_take(&text, "heat");
     if (!heat && !gas_piece_take(&text, "w") && !gas_piece_take(&text, "work"))
-        return refuse_leg(reader, "after `with` comes Q or W, such as `with Q = 50 kJ`.");
+        return refuse_leg(reader, "after \"with\" comes Q or W, such as \"with Q = 50 kJ\".");
     reader->leg->ending = heat ? GAS_WITH_Q : GAS_WITH_W;
     if (text.length == 0) {
         *value = (struct gas_leg_figure){.kind = GAS_FIGURE_COLUMN, .symbol = heat ? GAS_SYM_Q : GAS_SYM_W};
@@ -214,14 +215,14 @@ static bool read_modifier(const struct reader *reader, struct gas_piece text)
     if (text.length == 0)
         return leg->process != GAS_POLYTROPIC && !against
                    ? true
-                   : refuse_leg(reader, against ? "give the outside pressure, such as `against 1 bar`."
+                   : refuse_leg(reader, against ? "give the outside pressure, such as \"against 1 bar\"."
                                                 : "give the exponent, such as n=1.3, or an efficiency, such as 82 %.");
     if (!read_figure(reader, text, &figure))
         return false;
     if (against) {
         leg->outside = figure;
         return (figure.kind == GAS_FIGURE_FIXED ? figure.unit.dimension == GAS_DIM_PRESSURE : true) ||
-               refuse_leg(reader, "what follows `against` must be a pressure.");
+               refuse_leg(reader, "what follows \"against\" must be a pressure.");
     }
     bool percent = figure.kind == GAS_FIGURE_FIXED && figure.unit.scale != 1;
     if (exponent || is_column(&figure, GAS_SYM_EXPONENT))
@@ -252,9 +253,9 @@ static bool read_leg(const struct reader *reader, struct gas_piece text)
         return true;
     }
     if (end == text.length)
-        return refuse_leg(reader,
-                          "it has no ending; write `to 8 bar`, `to 400 °C`, `to V x 0.125`, `with Q = 50 kJ` or "
-                          "`to start`.");
+        return refuse_leg(
+            reader, "it has no ending; write \"to 8 bar\", \"to 400 °C\", \"to V x 0.125\", \"with Q = 50 kJ\" or "
+                    "\"to start\".");
     size_t skip = end + (to < with ? 2 : 4);
     struct gas_piece rest = gas_piece_trim((struct gas_piece){text.at + skip, text.length - skip});
     return to < with ? read_destination(reader, rest) : read_transfer(reader, rest);

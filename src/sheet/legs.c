@@ -1,8 +1,8 @@
 #include "sheet/legs.h"
 
 #include <stdio.h>
-#include <strings.h>
 
+#include "sheet/ascii.h"
 #include "sheet/leg_text.h"
 
 /* The legs of one cell. */
@@ -42,7 +42,7 @@ static bool read_points(const struct gas_block *range, const struct gas_options 
     *legs =
         (struct gas_typed_legs){.count = 1, .points = range, .point_P = heading[0].unit, .point_V = heading[1].unit};
     const struct gas_cell *between = range->columns > 2 ? gas_cell_at(range, 0, 2) : NULL;
-    bool curved = between && between->kind == GAS_CELL_TEXT && strncasecmp(between->text, "polytropic", 10) == 0;
+    bool curved = between && between->kind == GAS_CELL_TEXT && gas_ascii_starts(between->text, "polytropic");
     legs->leg[0].process = curved ? GAS_THROUGH_POLYTROPES : GAS_THROUGH_POINTS;
     snprintf(legs->leg[0].text, GAS_LEG_TEXT, "through %zu points", range->rows - 1);
     return true;
@@ -63,8 +63,8 @@ bool gas_legs_read(const struct gas_block *argument, const struct gas_options *o
         if (gas_cell_blank(cell))
             continue;
         if (cell->kind != GAS_CELL_TEXT)
-            return gas_refuse(refusal, "legs", "%g is a number; a leg is a text such as isothermal to 8 bar.",
-                              cell->number);
+            return gas_refuse(refusal, "legs", "%s is a number; a leg is a text such as isothermal to 8 bar.",
+                              gas_shown(cell->number).text);
         if (!add_text(options, legs, cell, refusal))
             return false;
     }

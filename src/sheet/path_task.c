@@ -214,9 +214,9 @@ static bool given_end_agrees(const struct gas_job *job, const struct gas_case *f
     gas_figure(given, sizeof given, figures->row->figure[column], &heading->unit);
     gas_figure(found, sizeof found, gas_job_shown(job, figures, heading, si), &heading->unit);
     return gas_refuse(refusal, name,
-                      "%s is given, but the legs lead to %s (%.2g %% apart); name %s in a leg, or correct "
+                      "%s is given, but the legs lead to %s (%s %% apart); name %s in a leg, or correct "
                       "one of them.",
-                      given, found, 100 * apart, name);
+                      given, found, gas_shown_to(100 * apart, 2).text, name);
 }
 
 bool gas_path_solve(const struct gas_job *job, const struct gas_case *figures, struct gas_path_case *path,

@@ -1,7 +1,8 @@
 #include "sheet/piece.h"
 
-#include <ctype.h>
 #include <string.h>
+
+#include "sheet/ascii.h"
 
 /* Bytes of white space at the front; a no-break space is two bytes. */
 static size_t space_at(struct gas_piece piece)
@@ -51,7 +52,7 @@ static size_t matched(struct gas_piece piece, const char *words)
         if (*words == ' ')
             while (i < piece.length && piece.at[i] == ' ')
                 i++;
-        else if (i < piece.length && tolower((unsigned char)piece.at[i]) == (unsigned char)*words)
+        else if (i < piece.length && gas_ascii_lower(piece.at[i]) == *words)
             i++;
         if (i == before)
             return 0;
@@ -62,7 +63,7 @@ static size_t matched(struct gas_piece piece, const char *words)
 bool gas_piece_take(struct gas_piece *piece, const char *words)
 {
     size_t used = matched(*piece, words);
-    if (used == 0 || (used < piece->length && isalpha((unsigned char)piece->at[used])))
+    if (used == 0 || (used < piece->length && gas_ascii_letter(piece->at[used])))
         return false;
     struct gas_piece rest = gas_piece_trim((struct gas_piece){piece->at + used, piece->length - used});
     if (rest.length && (rest.at[0] == '=' || rest.at[0] == ':'))

@@ -7,13 +7,40 @@
 
 #include <gasleaf/unit.h>
 
-/* Cut at a character boundary: a UTF-8 continuation byte is never the last thing dropped alone. */
-static void cut_to_fit(char *text, size_t size)
+/* Bytes of a character that may be shown: whole UTF-8, no control character; 0 otherwise. */
+static size_t shown_bytes(const char *text)
 {
-    size_t end = size - 1;
+    const unsigned char *at = (const unsigned char *)text;
+    size_t bytes = *at < 0x80 ? 1 : *at < 0xC2 ? 0 : *at < 0xE0 ? 2 : *at < 0xF0 ? 3 : *at < 0xF5 ? 4 : 0;
+    for (size_t i = 1; i < bytes; i++)
+        if ((at[i] & 0xC0) != 0x80)
+            return 0;
+    bool control = *at < ' ' || *at == 0x7F || (*at == 0xC2 && at[1] < 0xA0);
+    bool overlong = (*at == 0xE0 && at[1] < 0xA0) || (*at == 0xF0 && at[1] < 0x90);
+    bool none = (*at == 0xED && at[1] > 0x9F) || (*at == 0xF4 && at[1] > 0x8F);
+    return control || overlong || none ? 0 : bytes;
+}
+
+/* What cannot be shown becomes a question mark, white space of any kind a space. */
+static void make_showable(char *text)
+{
+    for (size_t bytes; *text; text += bytes) {
+        bytes = shown_bytes(text);
+        if (bytes)
+            continue;
+        *text = strchr("\t\r\n", *text) ? ' ' : '?';
+        bytes = 1;
+    }
+}
+
+/* A sentence that was too long ends in an ellipsis and a full stop, after a whole character. */
+static void end_early(char *text, size_t size)
+{
+    static const char ending[] = "\u2026.";
+    size_t end = size - sizeof ending;
     while (end > 0 && ((unsigned char)text[end] & 0xC0) == 0x80)
         end--;
-    text[end] = '\0';
+    memcpy(text + end, ending, sizeof ending);
 }
 
 bool gas_refuse(struct gas_refusal *refusal, const char *what, const char *format, ...)
@@ -21,22 +48,25 @@ bool gas_refuse(struct gas_refusal *refusal, const char *what, const char *forma
     if (refusal->made)
         return false;
     refusal->made = true;
-    int used = snprintf(refusal->text, sizeof refusal->text, "Check %.60s: ", what);
+    int used = snprintf(refusal->text, sizeof refusal->text, "Check %.80s: ", what);
     size_t room = sizeof refusal->text - (size_t)used;
     va_list values;
     va_start(values, format);
     int needed = vsnprintf(refusal->text + used, room, format, values);
     va_end(values);
     if (needed >= 0 && (size_t)needed >= room)
-        cut_to_fit(refusal->text, sizeof refusal->text);
+        end_early(refusal->text, sizeof refusal->text);
+    make_showable(refusal->text);
     return false;
 }
 
 bool gas_refuse_sentence(struct gas_refusal *refusal, const char *sentence)
 {
-    if (!refusal->made)
-        snprintf(refusal->text, sizeof refusal->text, "%s", sentence);
+    if (refusal->made)
+        return false;
     refusal->made = true;
+    if ((size_t)snprintf(refusal->text, sizeof refusal->text, "%s", sentence) >= sizeof refusal->text)
+        end_early(refusal->text, sizeof refusal->text);
     return false;
 }
 
@@ -54,10 +84,25 @@ const char *gas_quoted(char *buffer, size_t size, const char *text, size_t lengt
     return buffer;
 }
 
+struct gas_shown gas_shown_to(double figure, int digits)
+{
+    struct gas_shown shown;
+    if (isfinite(figure))
+        gas_number_format(shown.text, sizeof shown.text, figure, digits);
+    else
+        snprintf(shown.text, sizeof shown.text, "a figure without bounds");
+    return shown;
+}
+
+struct gas_shown gas_shown(double figure)
+{
+    return gas_shown_to(figure, 6);
+}
+
 const char *gas_figure(char *buffer, size_t size, double figure, const struct gas_unit *unit)
 {
-    gas_number_format(buffer, size, figure, 6);
-    size_t used = strlen(buffer);
+    int length = snprintf(buffer, size, "%s", gas_shown(figure).text);
+    size_t used = length < (int)size ? (size_t)length : size - 1;
     if (unit && unit->text[0] && strcmp(unit->text, "1") != 0)
         snprintf(buffer + used, size - used, " %s", unit->text);
     return buffer;
@@ -78,8 +123,8 @@ bool gas_refuse_unit(struct gas_refusal *refusal, const char *what, const struct
     case GAS_UNIT_TOO_LONG:
         return gas_refuse(refusal, what, "the unit is too long to be one; write one such as kJ/kg-K.");
     default:
-        return gas_refuse(refusal, what, "%s is not a unit known here%s%s.", at, fault->hint[0] ? "; " : "",
-                          fault->hint[0] ? fault->hint : "; write one such as bar(g), kPa, °C, kg/h or kJ/kg-K");
+        return gas_refuse(refusal, what, "%s is not a unit known here; %s.", at,
+                          fault->hint[0] ? fault->hint : "write one such as bar(g), kPa, °C, kg/h or kJ/kg-K");
     }
 }
 
@@ -102,9 +147,8 @@ bool gas_refuse_heading(struct gas_refusal *refusal, const char *what, const cha
     case GAS_HEADING_TOO_LONG:
         return gas_refuse(refusal, what, "%s is too long for a heading; write a quantity and its unit.", shown);
     default:
-        return gas_refuse(refusal, what,
-                          "%s names no known quantity%s%s; write one such as \"P1, bar(g)\" or \"m, kg\".", shown,
-                          hint[0] ? "; " : "", hint);
+        return gas_refuse(refusal, what, "%s names no known quantity; %s.", shown,
+                          hint[0] ? hint : "write one such as \"P1, bar(g)\" or \"m, kg\"");
     }
 }
 
@@ -134,7 +178,7 @@ bool gas_accept_level(struct gas_refusal *refusal, const char *what, double figu
     char shown[80], limit[40];
     gas_figure(shown, sizeof shown, figure, unit);
     if (!isfinite(figure))
-        return gas_refuse(refusal, what, "%s is not a finite number.", shown);
+        return gas_refuse(refusal, what, "the figure is not finite; look for a division by zero where it comes from.");
     double si = gas_unit_to_si(unit, figure, barometer);
     if (unit->dimension == GAS_DIM_TEMPERATURE && si <= 0) {
         gas_figure(limit, sizeof limit, gas_unit_from_si(unit, 0, barometer), unit);

@@ -30,6 +30,13 @@ bool gas_refuse_sentence(struct gas_refusal *refusal, const char *sentence);
 /* A user's text as it may appear inside a sentence: in quotes, shortened, control characters replaced. */
 const char *gas_quoted(char *buffer, size_t size, const char *text, size_t length);
 
+/* A bare figure as a user would write it: 100000, 0.05, -2.5e-7; six digits. Use: gas_shown(x).text */
+struct gas_shown {
+    char text[40];
+};
+struct gas_shown gas_shown(double figure);
+struct gas_shown gas_shown_to(double figure, int digits);
+
 /* A figure with its unit as the user sees it: "-2 bar(g)", "25 K". */
 const char *gas_figure(char *buffer, size_t size, double figure, const struct gas_unit *unit);
 

@@ -87,6 +87,11 @@ static bool refuse_contradiction(const struct label *label, struct piece text, c
                                  struct gas_heading_fault *fault)
 {
     char hint[300], name[GAS_HEADING_TEXT];
+    if (!label->quantity && !label->has_basis) {
+        snprintf(hint, sizeof hint, "%.40s is %s; name a quantity of the gas", unit->text,
+                 gas_dimension_words(unit->dimension));
+        return gas_heading_refuse(fault, GAS_HEADING_UNKNOWN, hint);
+    }
     gas_copy_text(name, sizeof name, text.text, text.length);
     enum gas_dimension dimension = label->quantity ? label->quantity->bare : GAS_DIM_PRESSURE;
     if (label->quantity && dimension == unit->dimension)
@@ -291,7 +296,7 @@ static void blame(struct attempt *attempt, struct piece text)
     struct gas_unit unit;
     struct gas_heading_fault fault = {.status = GAS_HEADING_UNIT};
     bool good = gas_unit_parse(text.text, text.length, attempt->references, &unit, &fault.unit);
-    bool near = strstr(fault.unit.hint, "did you mean") || fault.unit.status == GAS_UNIT_AMBIGUOUS ||
+    bool near = strstr(fault.unit.hint, " is meant") || fault.unit.status == GAS_UNIT_AMBIGUOUS ||
                 fault.unit.status == GAS_UNIT_REFERENCE;
     if (good) {
         gas_heading_refuse(&fault, GAS_HEADING_UNKNOWN, "");

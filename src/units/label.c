@@ -289,7 +289,7 @@ void gas_label_nearest(const char *text, size_t length, char *hint, size_t size)
                 p += part + (p[part] == ',');
             }
     if (best[0])
-        snprintf(hint, size, "did you mean %s?", best);
+        snprintf(hint, size, "perhaps %s is meant", best);
     else
         snprintf(hint, size, "name a quantity and its unit, such as P1, bar(g)");
 }

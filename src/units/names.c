@@ -235,9 +235,9 @@ void gas_unit_name_nearest(const char *word, char *hint, size_t size)
                          name);
     }
     if (nearest.count == 1)
-        snprintf(hint, size, "did you mean %s?", nearest.text[0]);
+        snprintf(hint, size, "perhaps %s is meant", nearest.text[0]);
     else if (nearest.count == 2)
-        snprintf(hint, size, "did you mean %s or %s?", nearest.text[0], nearest.text[1]);
+        snprintf(hint, size, "perhaps %s or %s is meant", nearest.text[0], nearest.text[1]);
     else
-        snprintf(hint, size, "no such unit is known");
+        snprintf(hint, size, "write one such as bar(g), kPa, °C, kg/h or kJ/kg-K");
 }

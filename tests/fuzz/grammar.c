@@ -180,6 +180,15 @@ static char *mutate(struct fuzz *fuzz, const char *text, size_t *length)
     return made;
 }
 
+static char *capitals(struct fuzz *fuzz, const char *text, size_t length)
+{
+    char *made = gas_arena_copy(fuzz->arena, text, length);
+    for (size_t i = 0; made && i < length; i++)
+        if (made[i] >= 'a' && made[i] <= 'z')
+            made[i] = (char)(made[i] - 'a' + 'A');
+    return made;
+}
+
 static char *repeat(struct fuzz *fuzz, const char *piece, size_t *length)
 {
     size_t one = strlen(piece), times = LONG_TEXT / one;
@@ -213,6 +222,8 @@ static struct gas_cell text_cell(struct fuzz *fuzz, const char *const *texts)
     size_t length = strlen(text);
     for (size_t turns = fuzz_below(fuzz, 3) == 0 ? 1 + fuzz_below(fuzz, 3) : 0; turns && text; turns--)
         text = mutate(fuzz, text, &length);
+    if (text && fuzz_below(fuzz, 16) == 0)
+        text = capitals(fuzz, text, length);
     return text ? (struct gas_cell){GAS_CELL_TEXT, 0, text, length} : (struct gas_cell){0};
 }
 

@@ -240,7 +240,7 @@ static void what_is_not_a_heading_is_refused(void)
         {"", GAS_HEADING_EMPTY, "quantity"},
         {"   ", GAS_HEADING_EMPTY, ""},
         {"xyzzy", GAS_HEADING_UNKNOWN, "name a quantity"},
-        {"Presure, bar", GAS_HEADING_UNKNOWN, "did you mean pressure"},
+        {"Presure, bar", GAS_HEADING_UNKNOWN, "perhaps pressure is meant"},
         {"Tempreature, K", GAS_HEADING_UNKNOWN, "temperature"},
         {"Remarks", GAS_HEADING_UNKNOWN, ""},
         {"Tag no.", GAS_HEADING_UNKNOWN, ""},

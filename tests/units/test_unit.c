@@ -143,7 +143,7 @@ static void what_is_not_a_unit_is_refused(void)
         {"barr", GAS_UNIT_UNKNOWN, "barr", "bar"},
         {"kJ/kgg", GAS_UNIT_UNKNOWN, "kgg", "kg"},
         {"kJ/furlong", GAS_UNIT_UNKNOWN, "furlong", ""},
-        {"xyzzy", GAS_UNIT_UNKNOWN, "xyzzy", "no such unit"},
+        {"xyzzy", GAS_UNIT_UNKNOWN, "xyzzy", "write one such as"},
         {"Mbar", GAS_UNIT_UNKNOWN, "Mbar", "mbar"}, /* not quietly a millibar */
         {"Mmol", GAS_UNIT_UNKNOWN, "Mmol", "mmol"},
         {"k", GAS_UNIT_UNKNOWN, "k", "K"},
