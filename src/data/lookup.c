@@ -1,5 +1,8 @@
+/* Species by any of their names. All names are spelt in the common way once, at the first look-up. */
 #include <math.h>
+#include <pthread.h>
 #include <stdbool.h>
+#include <stdint.h>
 #include <string.h>
 
 #include <gasleaf/species.h>
@@ -53,37 +56,65 @@ static size_t spelt(const char *text, size_t length, bool keep_case, char key[KE
     return used;
 }
 
-/* ---- the names of a species ------------------------------------------------------------------------------ */
+/* ---- the names, spelt once ------------------------------------------------------------------------------- */
 
-/* Is a text the one of a key (which is not empty)? Stops at the first difference: a search looks at every name. */
-static bool same(const char *key, const char *text, size_t length, bool keep_case)
-{
-    for (size_t i = 0; i < length;) {
-        char c;
-        i += counted(text + i, length - i, keep_case, &c);
-        if (c && c != *key++)
-            return false;
-    }
-    return *key == 0;
-}
+enum { NAMES = 1536 };
 
-/* Calls back with each alias of a list "a|b|c" by moving a cursor. */
-static const char *next_alias(const char **cursor, size_t *length)
-{
-    const char *alias = *cursor;
-    *length = strcspn(alias, "|");
-    *cursor = alias + *length + (alias[*length] == '|');
-    return *length ? alias : NULL;
-}
-
-static bool is_alias(const struct gas_species *species, const char *key, bool keep_case)
-{
-    const char *cursor = species->aliases, *alias;
+struct name {
+    const struct gas_species *species;
+    const char *text; /* a formula as the table has it; NULL where case never matters */
+    bool cas;         /* a number: nothing is near to it */
     size_t length;
-    while ((alias = next_alias(&cursor, &length)))
-        if (same(key, alias, length, keep_case))
-            return true;
-    return false;
+    char lower[KEY];
+};
+
+/* In the order of the species; the hashes lie by themselves, so that a look-up reads little memory. */
+static struct name names[NAMES];
+static uint32_t lower_hash[NAMES];
+static size_t name_count;
+static pthread_once_t names_once = PTHREAD_ONCE_INIT;
+
+static uint32_t hash_of(const char *key)
+{
+    uint32_t hash = 2166136261U; /* FNV-1a */
+    for (; *key; key++)
+        hash = (hash ^ (unsigned char)*key) * 16777619U;
+    return hash;
+}
+
+enum kind { NAME, FORMULA, CAS };
+
+static void add_name(const struct gas_species *species, const char *text, size_t length, enum kind kind)
+{
+    struct name *name = &names[name_count];
+    if (name_count == NAMES)
+        return; /* tests/data walks all names: none is lost */
+    name->length = spelt(text, length, false, name->lower);
+    if (name->length == 0)
+        return;
+    name->species = species;
+    name->text = kind == FORMULA ? text : NULL;
+    name->cas = kind == CAS;
+    lower_hash[name_count++] = hash_of(name->lower);
+}
+
+static void add_species(const struct gas_species *species)
+{
+    add_name(species, species->formula, strlen(species->formula), FORMULA);
+    add_name(species, species->name, strlen(species->name), NAME);
+    add_name(species, species->cas, strlen(species->cas), CAS);
+    for (const char *alias = species->aliases; *alias;) {
+        size_t length = strcspn(alias, "|");
+        add_name(species, alias, length, NAME);
+        alias += length + (alias[length] == '|');
+    }
+}
+
+static void add_names(void)
+{
+    const struct gas_species *species;
+    for (size_t i = 0; (species = gas_species_at(i)); i++)
+        add_species(species);
 }
 
 /* A free atom: a single atom that does not boil as such, unlike argon. */
@@ -94,29 +125,34 @@ static bool is_atom(const struct gas_species *species)
 
 /* ---- finding --------------------------------------------------------------------------------------------- */
 
-/* The one species of a formula; NULL when several isomers share it. */
-static const struct gas_species *by_formula(const char *key, bool keep_case)
+static bool same_case(const char *formula, const char *key)
 {
-    const struct gas_species *found = NULL, *species;
-    for (size_t i = 0; (species = gas_species_at(i)); i++) {
-        if (!keep_case && is_atom(species))
+    char other[KEY];
+    return spelt(formula, strlen(formula), true, other) && strcmp(key, other) == 0;
+}
+
+/* The one species of a formula; NULL when several isomers share it. as_written: NULL when case does not matter. */
+static const struct gas_species *by_formula(const char *lower, uint32_t hash, const char *as_written)
+{
+    const struct gas_species *found = NULL;
+    for (size_t i = 0; i < name_count; i++) {
+        const struct name *name = &names[i];
+        if (lower_hash[i] != hash || !name->text || strcmp(name->lower, lower) != 0)
             continue;
-        if (!same(key, species->formula, strlen(species->formula), keep_case))
+        if (as_written ? !same_case(name->text, as_written) : is_atom(name->species))
             continue;
         if (found)
             return NULL;
-        found = species;
+        found = name->species;
     }
     return found;
 }
 
-static const struct gas_species *by_name(const char *key)
+static const struct gas_species *by_name(const char *lower, uint32_t hash)
 {
-    const struct gas_species *species;
-    for (size_t i = 0; (species = gas_species_at(i)); i++)
-        if (same(key, species->name, strlen(species->name), false) || is_alias(species, key, false) ||
-            same(key, species->cas, strlen(species->cas), false))
-            return species;
+    for (size_t i = 0; i < name_count; i++)
+        if (lower_hash[i] == hash && !names[i].text && strcmp(names[i].lower, lower) == 0)
+            return names[i].species;
     return NULL;
 }
 
@@ -125,10 +161,12 @@ const struct gas_species *gas_species_find(const char *text, size_t length)
     char as_written[KEY], lower[KEY];
     if (!spelt(text, length, true, as_written) || !spelt(text, length, false, lower))
         return NULL;
-    const struct gas_species *found = by_formula(as_written, true);
+    pthread_once(&names_once, add_names);
+    uint32_t hash = hash_of(lower);
+    const struct gas_species *found = by_formula(lower, hash, as_written);
     if (!found)
-        found = by_name(lower);
-    return found ? found : by_formula(lower, false);
+        found = by_name(lower, hash);
+    return found ? found : by_formula(lower, hash, NULL);
 }
 
 /* ---- near misses ----------------------------------------------------------------------------------------- */
@@ -138,8 +176,9 @@ static unsigned least(unsigned a, unsigned b)
     return a < b ? a : b;
 }
 
-/* Damerau-Levenshtein distance: letters added, dropped, changed, or two neighbours swapped. */
-static unsigned distance(const char *a, const char *b)
+/* Damerau-Levenshtein distance: letters added, dropped, changed, or two neighbours swapped. KEY when more than `most`
+ * is certain: a letter of a further on never brings it below the least of two rows. */
+static unsigned distance(const char *a, const char *b, unsigned most)
 {
     unsigned rows[3][KEY + 1], *above = rows[0], *before = rows[1], *row = rows[2];
     size_t wide = strlen(b);
@@ -147,35 +186,42 @@ static unsigned distance(const char *a, const char *b)
         above[j] = before[j] = (unsigned)j;
     for (size_t i = 1; a[i - 1]; i++) {
         row[0] = (unsigned)i;
+        unsigned lowest = row[0];
         for (size_t j = 1; j <= wide; j++) {
             row[j] = least(least(before[j], row[j - 1]) + 1, before[j - 1] + (a[i - 1] != b[j - 1]));
             if (i > 1 && j > 1 && a[i - 1] == b[j - 2] && a[i - 2] == b[j - 1])
                 row[j] = least(row[j], above[j - 2] + 1);
+            lowest = least(lowest, row[j]);
         }
+        if (lowest > most + 1)
+            return KEY;
         unsigned *spare = above;
         above = before, before = row, row = spare;
     }
     return before[wide];
 }
 
-static unsigned away_from(const char *key, const char *text, size_t length)
+/* KEY when it is more than `most`. */
+static unsigned away_from(const char *key, size_t size, const struct name *name, unsigned most)
 {
-    char other[KEY];
-    size_t size = strlen(key);
-    if (!spelt(text, length, false, other))
-        return KEY;
-    unsigned away = distance(key, other);
-    return size >= 3 && strncmp(key, other, size) == 0 ? least(away, 1) : away;
+    bool begins = size >= 3 && strncmp(key, name->lower, size) == 0;
+    size_t apart = size > name->length ? size - name->length : name->length - size;
+    if (begins)
+        return least(distance(key, name->lower, KEY), 1);
+    return apart > most ? KEY : distance(key, name->lower, most);
 }
 
-static unsigned away_from_species(const char *key, const struct gas_species *species)
+/* The nearest of a species' names; *at moves on to the next species. */
+static unsigned away_from_species(const char *key, size_t size, size_t *at, unsigned most)
 {
-    unsigned away = away_from(key, species->name, strlen(species->name));
-    const char *cursor = species->aliases, *alias;
-    size_t length;
-    while ((alias = next_alias(&cursor, &length)))
-        away = least(away, away_from(key, alias, length));
-    return is_atom(species) ? away : least(away, away_from(key, species->formula, strlen(species->formula)));
+    const struct gas_species *species = names[*at].species;
+    unsigned away = KEY;
+    for (; *at < name_count && names[*at].species == species; ++*at) {
+        const struct name *name = &names[*at];
+        if (!name->cas && !(name->text && is_atom(species)))
+            away = least(away, away_from(key, size, name, most));
+    }
+    return away;
 }
 
 size_t gas_species_nearest(const char *text, size_t length, const struct gas_species **found, size_t most)
@@ -185,13 +231,15 @@ size_t gas_species_nearest(const char *text, size_t length, const struct gas_spe
     size_t count = 0;
     char key[KEY];
     size_t size = spelt(text, length, false, key);
-    const struct gas_species *species;
+    unsigned farthest = size < 3 ? 1 : (unsigned)size / 3;
     if (size == 0)
         return 0;
     most = most < MOST ? most : MOST;
-    for (size_t i = 0; (species = gas_species_at(i)); i++) {
-        unsigned here = away_from_species(key, species);
-        if (here > (size < 3 ? 1 : size / 3))
+    pthread_once(&names_once, add_names);
+    for (size_t i = 0; i < name_count;) {
+        const struct gas_species *species = names[i].species;
+        unsigned here = away_from_species(key, size, &i, farthest);
+        if (here > farthest)
             continue;
         size_t at = count;
         while (at > 0 && away[at - 1] > here)
