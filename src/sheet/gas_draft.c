@@ -44,7 +44,8 @@ static char lower(char c)
 /* Bytes read at the front of a text; *plain is what they stand for. */
 static size_t fold_one(struct gas_piece text, char one[2], const char **plain)
 {
-    for (size_t i = 0; i < sizeof spelling / sizeof *spelling; i++) {
+    const bool plain_ascii = (unsigned char)text.at[0] < 0x80;
+    for (size_t i = 0; !plain_ascii && i < sizeof spelling / sizeof *spelling; i++) {
         size_t bytes = strlen(spelling[i].printed);
         if (text.length >= bytes && memcmp(text.at, spelling[i].printed, bytes) == 0)
             return *plain = spelling[i].plain, bytes;
