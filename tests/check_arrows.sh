@@ -46,6 +46,8 @@ check "public headers stand on public headers" \
 check "letters and figures are read whatever the locale (src/sheet/ascii.h, gas_number_parse)" \
     "$(grep -nE '\b(is(alpha|alnum|digit|space|upper|lower|punct|print)|to(lower|upper)|strn?casecmp|atof|sscanf) ?\(' -r src |
         grep -v '^src/generate/')"
+check "figures in texts do not depend on the locale (gas_shown, gas_number_format)" \
+    "$(grep -nE '%[0-9.]*[gf]' -r src/sheet src/audit | grep -v 'cp_build.c.*"/%[.]0f"')"
 check "C is the only language of the sources" \
     "$(find src include tests -name '*.cc' -o -name '*.cpp' -o -name '*.cxx' -o -name '*.hxx' -o -name '*.hpp' -o -name '*.C')"
 

@@ -74,8 +74,8 @@ static void print_references(struct print *print)
             i < job->table.columns ? &job->table.heading[i] : &job->wanted.heading[i - job->table.columns];
         if (!is_reference(heading))
             continue;
-        snprintf(words, sizeof words, "%.40s is an amount: a volume at %.6g K and %.8g Pa", heading->unit.text,
-                 heading->unit.reference_T, heading->unit.reference_P);
+        snprintf(words, sizeof words, "%.40s is an amount: a volume at %s K and %s Pa", heading->unit.text,
+                 gas_shown(heading->unit.reference_T).text, gas_shown_to(heading->unit.reference_P, 8).text);
         print_basis(print, "reference conditions", words, "the unit as written, or the options");
     }
 }
@@ -90,8 +90,8 @@ static void print_conventions(struct print *print)
                    print->figures.barometer, "Pa");
     print_references(print);
     if (any_heading(job, has_datum)) {
-        snprintf(words, sizeof words, "h = 0 and s = 0 at %.6g K and %.6g Pa; u = h - P v", options->datum.T,
-                 options->datum.P);
+        snprintf(words, sizeof words, "h = 0 and s = 0 at %s K and %s Pa; u = h - P v",
+                 gas_shown(options->datum.T).text, gas_shown(options->datum.P).text);
         print_basis(print, "datum", words,
                     "options; 25 \xC2\xB0"
                     "C and 1 bar unless given");
@@ -134,7 +134,7 @@ static void print_given(struct print *print, size_t column)
     if (gauge)
         snprintf(line->figures, sizeof line->figures, "%s%s%s", sign, shown, *sign ? "" : " + barometer");
     else if (level)
-        snprintf(line->figures, sizeof line->figures, "%s + %.6g", shown, heading->unit.offset);
+        snprintf(line->figures, sizeof line->figures, "%s + %s", shown, gas_shown(heading->unit.offset).text);
     else
         snprintf(line->figures, sizeof line->figures, "%s", shown);
     snprintf(line->source, sizeof line->source, "given: %.70s", heading->text);

@@ -89,9 +89,9 @@ bool gas_cp_add_power(struct gas_cp_build *build, double factor, double exponent
         return add_power_of_T(build, factor * pow(unit->scale, -exponent), exponent);
     if (exponent != floor(exponent) || exponent < 0)
         return gas_refuse(build->refusal, "cp",
-                          "with T in %s only a polynomial can be used, and this has T to the power %g; give the "
+                          "with T in %s only a polynomial can be used, and this has T to the power %s; give the "
                           "constants for T in K or °R.",
-                          unit->text, exponent);
+                          unit->text, gas_shown(exponent).text);
     double binomial = 1;
     for (double k = 0; k <= exponent; k++) { /* factor C(exponent, k) (T/scale)^k shift^(exponent - k) */
         if (!add_power_of_T(build, factor * binomial * pow(shift, exponent - k) * pow(unit->scale, -k), k))

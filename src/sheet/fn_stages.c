@@ -146,7 +146,8 @@ static void put_total(const struct stages_call *stages, struct gas_call *call, s
     put_energy(stages, call, row, WORK, staged->work);
     put_energy(stages, call, row, DUTY, staged->cooling);
     if (staged->count > 1 && !isnan(saving))
-        snprintf(text, sizeof text, "%.1f %% %s than one stage", 100 * fabs(saving), saving >= 0 ? "less" : "more");
+        snprintf(text, sizeof text, "%s %% %s than one stage", gas_shown_to(100 * fabs(saving), 3).text,
+                 saving >= 0 ? "less" : "more");
     gas_put_text(call, row, NOTE, text);
 }
 
@@ -155,7 +156,7 @@ static void put_input(const struct stages_call *stages, struct gas_call *call, s
     char text[60];
     gas_put_text(call, row, STAGE, stages->job.extent == GAS_EXTENT_FLOW ? "input power" : "input");
     put_energy(stages, call, row, WORK, stages->stages.staged.input);
-    snprintf(text, sizeof text, "drive %g %%", 100 * stages->stages.staging.drive);
+    snprintf(text, sizeof text, "drive %s %%", gas_shown(100 * stages->stages.staging.drive).text);
     gas_put_text(call, row, NOTE, stages->typed.said[GAS_SAYS_DRIVE] ? text : "no drive losses given");
 }
 

@@ -86,8 +86,8 @@ static bool interval_range(const struct gas_card *card, size_t i, double *from, 
         return false;
     return *from < *to ||
            gas_refuse(card->refusal, WHAT,
-                      "the range from %g to %g is reversed; write the lower temperature in the row from.",
-                      card->from[i], card->to[i]);
+                      "the range from %s to %s is reversed; write the lower temperature in the row from.",
+                      gas_shown(card->from[i]).text, gas_shown(card->to[i]).text);
 }
 
 static bool build_powers(struct gas_form_case *form_case)
@@ -144,8 +144,8 @@ static bool join_intervals(const struct gas_card *card, struct gas_interval *int
         double gap = interval[i + 1].T_from - interval[i].T_to;
         if (fabs(gap) > 1e-6 * interval[i].T_to)
             return gas_refuse(card->refusal, WHAT,
-                              "one interval ends at %g K and the next begins at %g K; they must meet.",
-                              interval[i].T_to, interval[i + 1].T_from);
+                              "one interval ends at %s K and the next begins at %s K; they must meet.",
+                              gas_shown(interval[i].T_to).text, gas_shown(interval[i + 1].T_from).text);
         interval[i + 1].T_from = interval[i].T_to;
     }
     return true;
@@ -207,9 +207,9 @@ static const char *row_rule(const struct gas_card *card, struct gas_draft *draft
     if (!text)
         return NULL;
     if (!isnan(card->k))
-        snprintf(text, size, "k = %.17g", card->k);
+        snprintf(text, size, "k = %s", gas_shown_to(card->k, 17).text);
     else if (!isnan(card->cp_value))
-        snprintf(text, size, "cp = %.17g %.*s", card->cp_value, (int)unit.length, unit.at);
+        snprintf(text, size, "cp = %s %.*s", gas_shown_to(card->cp_value, 17).text, (int)unit.length, unit.at);
     else
         snprintf(text, size, "cp = %.*s %.*s", (int)card->cp.length, card->cp.at, (int)unit.length, unit.at);
     return text;

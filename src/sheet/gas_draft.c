@@ -189,8 +189,8 @@ static bool check_join(const struct gas_draft *draft, const struct gas_interval 
     char at[40];
     gas_number_format(at, sizeof at, T, 6);
     return gas_refuse(draft->refusal, "gas card",
-                      "cp jumps by %.0f %% at %s K, where two intervals meet; check their constants.",
-                      100 * fabs(above - below) / below, at);
+                      "cp jumps by %s %% at %s K, where two intervals meet; check their constants.",
+                      gas_shown_to(100 * fabs(above - below) / below, 2).text, at);
 }
 
 bool gas_draft_check(struct gas_draft *draft)

@@ -55,8 +55,8 @@ static bool read_k(struct gas_rules *rules, struct gas_piece text)
     if (unit.text[0])
         return gas_refuse(rules->refusal, WHAT, "k is a ratio and has no unit.");
     if (!(rules->k > 1 && rules->k <= 2))
-        return gas_refuse(rules->refusal, WHAT, "k = %g cannot be cp/cv; it lies above 1 and not above 5/3 for a gas.",
-                          rules->k);
+        return gas_refuse(rules->refusal, WHAT, "k = %s cannot be cp/cv; it lies above 1 and not above 5/3 for a gas.",
+                          gas_shown(rules->k).text);
     return true;
 }
 

@@ -94,9 +94,9 @@ bool gas_constants_apply(struct gas_draft *draft, double M, double universal, do
     draft->gas.R = specific * M;
     if (fabs(draft->gas.R - GAS_R) > GAS_R_TOLERANCE * GAS_R)
         return gas_refuse(draft->refusal, "R",
-                          "R and M together give %.5g J/(mol K), more than 1 %% away from 8.31446 J/(mol K); "
+                          "R and M together give %s J/(mol K), more than 1 %% away from 8.31446 J/(mol K); "
                           "correct one of them.",
-                          draft->gas.R);
+                          gas_shown_to(draft->gas.R, 5).text);
     return true;
 }
 
@@ -131,9 +131,9 @@ static bool accept_formula(const struct gas_rules *rules)
         return gas_refuse(rules->refusal, WHAT, "cp has the unit of an energy; write it such as kJ/kg-K.");
     if (rules->bare && is_constant(&rules->sum) && rules->sum.term[0].factor < LEAST_BARE_CP)
         return gas_refuse(rules->refusal, WHAT,
-                          "cp = %g without a unit would be J/(mol K), less than any gas has; give the unit, such as "
+                          "cp = %s without a unit would be J/(mol K), less than any gas has; give the unit, such as "
                           "kJ/kg-K.",
-                          rules->sum.term[0].factor);
+                          gas_shown(rules->sum.term[0].factor).text);
     if (rules->unit.per_degree && !rules->T_said && !is_constant(&rules->sum))
         return gas_refuse(
             rules->refusal, WHAT,

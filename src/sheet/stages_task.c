@@ -115,8 +115,8 @@ static bool figure_si(const struct gas_job *job, const struct gas_case *figures,
 
 static bool refuse_share(struct gas_refusal *refusal, const char *what, double share)
 {
-    return gas_refuse(refusal, "stages", "%s of %g is not above 0 and at most 1; 78 %% is written 78 %% or 0.78.", what,
-                      share);
+    return gas_refuse(refusal, "stages", "%s of %s is not above 0 and at most 1; 78 %% is written 78 %% or 0.78.", what,
+                      gas_shown(share).text);
 }
 
 /* What core would take another way, or name less well. */
@@ -124,20 +124,20 @@ static bool sensible(const struct gas_typed_staging *typed, const double *si, st
 {
     double count = si[GAS_SAYS_COUNT], limit = si[GAS_SAYS_LIMIT], efficiency = si[GAS_SAYS_EFFICIENCY];
     if (!isnan(count) && !(count >= 1 && count <= GAS_STAGES_MAX && count == floor(count)))
-        return gas_refuse(refusal, "stages", "%g is no number of stages; give a whole number from 1 to %d.", count,
-                          GAS_STAGES_MAX);
+        return gas_refuse(refusal, "stages", "%s is no number of stages; give a whole number from 1 to %d.",
+                          gas_shown(count).text, GAS_STAGES_MAX);
     if (!isnan(limit) && !(limit > 1))
         return gas_refuse(refusal, "stages",
-                          "a ratio of %g per stage does not raise the pressure; give one above 1, such as ratio at "
+                          "a ratio of %s per stage does not raise the pressure; give one above 1, such as ratio at "
                           "most 3.5.",
-                          limit);
+                          gas_shown(limit).text);
     if (!(efficiency > 0 && efficiency <= 1))
         return refuse_share(refusal, "an efficiency", efficiency);
     if (!isnan(si[GAS_SAYS_DRIVE]) && !(si[GAS_SAYS_DRIVE] > 0 && si[GAS_SAYS_DRIVE] <= 1))
         return refuse_share(refusal, "a drive efficiency", si[GAS_SAYS_DRIVE]);
     if (typed->ratio_count && !isnan(count) && count != typed->ratio_count)
-        return gas_refuse(refusal, "stages", "%g stages are asked for, but %d ratios are given; make them agree.",
-                          count, typed->ratio_count);
+        return gas_refuse(refusal, "stages", "%s stages are asked for, but %d ratios are given; make them agree.",
+                          gas_shown(count).text, typed->ratio_count);
     return true;
 }
 
@@ -212,16 +212,16 @@ static bool refuse_result(const struct gas_job *job, const struct gas_case *figu
                           gas_shown_pressure(job, figures, one, stages->P2),
                           gas_shown_pressure(job, figures, other, stages->P1));
     case AT_COUNT:
-        return gas_refuse(refusal, "stages", "%g %s; give 1 to %d.", fault->figure, gas_status_words(fault->status),
-                          GAS_STAGES_MAX);
+        return gas_refuse(refusal, "stages", "%s %s; give 1 to %d.", gas_shown(fault->figure).text,
+                          gas_status_words(fault->status), GAS_STAGES_MAX);
     case AT_RATIO:
         return fault->status == GAS_TOO_MANY
-                   ? gas_refuse(refusal, "stages", "a ratio of at most %g would take more than %d stages; allow more.",
-                                stages->staging.ratio_limit, GAS_STAGES_MAX)
+                   ? gas_refuse(refusal, "stages", "a ratio of at most %s would take more than %d stages; allow more.",
+                                gas_shown(stages->staging.ratio_limit).text, GAS_STAGES_MAX)
                    : gas_refuse(refusal, "stages",
-                                "the ratios, scaled to reach P2, leave a stage with %g, which does not raise the "
+                                "the ratios, scaled to reach P2, leave a stage with %s, which does not raise the "
                                 "pressure; take fewer stages or other ratios.",
-                                fault->figure);
+                                gas_shown(fault->figure).text);
     case AT_T_COOL:
         if (typed_of(job)->figure[GAS_SAYS_COOLING].kind != GAS_FIGURE_FIXED)
             degrees = gas_unit_si(GAS_DIM_TEMPERATURE);
@@ -230,7 +230,7 @@ static bool refuse_result(const struct gas_job *job, const struct gas_case *figu
     case AT_DROP:
         return refuse_drop(job, stages, fault, refusal);
     default:
-        return gas_refuse(refusal, "stages", "%g %s; check the figures.", fault->figure,
+        return gas_refuse(refusal, "stages", "%s %s; check the figures.", gas_shown(fault->figure).text,
                           gas_status_words(fault->status));
     }
 }
@@ -245,8 +245,8 @@ static bool discharge_pressure(const struct gas_job *job, const struct gas_case 
     if (isnan(stages->P2) && !limit)
         stages->P2 = stages->P1 * ratio;
     else if (!limit && fabs(stages->P2 - stages->P1 * ratio) > job->options.agree * stages->P2)
-        return gas_refuse(refusal, "given", "P2/P1 is %g, but a ratio of %g is given; leave one of them out.",
-                          stages->P2 / stages->P1, ratio);
+        return gas_refuse(refusal, "given", "P2/P1 is %s, but a ratio of %s is given; leave one of them out.",
+                          gas_shown(stages->P2 / stages->P1).text, gas_shown(ratio).text);
     return !isnan(stages->P2) ||
            gas_refuse(refusal, "P2", "the discharge pressure is missing; give it, such as P2 = 9 bar(g).");
 }

@@ -74,7 +74,8 @@ static bool refuse_wall(struct gas_refusal *refusal, const struct gas_job *job, 
         return refuse_given(refusal, job, figures, GAS_SYM_T_WALL, 0, fault);
     default:
         return gas_refuse(refusal, solved->vessel.wall == GAS_WALL_HEAT ? "Q" : "UA",
-                          "%g %s; check UA, time and T wall.", fault->figure, gas_status_words(fault->status));
+                          "%s %s; check UA, time and T wall.", gas_shown(fault->figure).text,
+                          gas_status_words(fault->status));
     }
 }
 

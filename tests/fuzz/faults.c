@@ -44,7 +44,7 @@ static bool is_word(const char *text, const char *at, size_t length)
 static const char *bad_words(const char *text)
 {
     static const char *const words[] = {"nan", "-nan", "inf", "-inf", "NAN", "INF"};
-    static const char *const marks[] = {"(null)", "%s", "%g", "%d", "%z", "%%", "%.", "  ", "..", ": :", "e+0", "e-0"};
+    static const char *const marks[] = {"(null)", "%s", "%g", "%d", "%z", "%%", "  ", ": :", "e+0", "e-0"};
     char plain[2000];
     size_t used = 0, quotes = 0;
     bool quoted = false;
