@@ -39,7 +39,7 @@ TEST_SRC    := $(wildcard tests/support/*.c) $(filter-out tests/fuzz/test_%,$(wi
 GLUE_SRC    := $(wildcard tests/support/*.c) $(wildcard tests/glue/*.c) $(filter-out %/main.c,$(call sources,generate))
 suites = $(patsubst test_%.c,suite_%,$(filter test_%,$(notdir $(1))))
 
-.PHONY: bench all check test demo deps generate install lint valgrind clean help glue tools sdk checks
+.PHONY: audit-report bench all check test demo deps generate install lint valgrind clean help glue tools sdk checks
 all: $(OXT) ## build the extension, build/gasleaf.oxt
 
 help: ## print the targets
@@ -136,6 +136,9 @@ $(BUILD)/tests/tools/check_page: $(BUILD)/tests/tools/check_page.o \
 
 check: $(BUILD)/tests/run ## build and run the suites that need no office (SUITE=prefix runs a part)
 	$(BUILD)/tests/run $(SUITE)
+
+audit-report: $(BUILD)/tests/run ## write docs/audit-confusion.md: how well the audit finds slips
+	GASLEAF_CONFUSION=docs/audit-confusion.md $(BUILD)/tests/run slips
 
 glue: $(BUILD)/tests/glue-run $(ADDIN) ## build and run the suites of the add-in's glue
 	GASLEAF_ADDIN=$(ADDIN) $(BUILD)/tests/glue-run $(SUITE)

@@ -4,7 +4,9 @@
 
 #include "sheet/job_solve.h"
 #include "sheet/path_task.h"
+#include "sheet/piece.h"
 #include "sheet/stages_task.h"
+#include "sheet/vessel_task.h"
 
 /* Does the text speak of stages, as GAS.STAGES takes them? A leg never does. */
 static bool speaks_of_stages(const struct gas_block *legs)
@@ -16,6 +18,15 @@ static bool speaks_of_stages(const struct gas_block *legs)
     return false;
 }
 
+/* The argument is one word. */
+static bool says(const struct gas_block *legs, const char *word)
+{
+    if (!gas_single(legs) || legs->cell->kind != GAS_CELL_TEXT)
+        return false;
+    struct gas_piece text = gas_piece_trim((struct gas_piece){legs->cell->text, legs->cell->length});
+    return gas_piece_take(&text, word) && text.length == 0;
+}
+
 static bool read_arguments(struct check_call *check, const struct gas_call *call, const struct check_arguments *places)
 {
     const struct gas_job_arguments arguments = {.gas = gas_argument(call, 0),
@@ -24,6 +35,10 @@ static bool read_arguments(struct check_call *check, const struct gas_call *call
                                                 .headings = gas_argument(call, places->headings),
                                                 .options = gas_argument(call, places->options)};
     const struct gas_block *legs = gas_argument(call, places->legs);
+    if (says(legs, "fill") || says(legs, "vent")) {
+        check->job.task = says(legs, "fill") ? &gas_fill_task : &gas_vent_task;
+        return gas_job_read(&check->job, &arguments, &check->refusal);
+    }
     if (speaks_of_stages(legs)) {
         check->job.task = &gas_stages_task;
         check->job.legs = &check->staging;

@@ -11,7 +11,7 @@
 #define CHECKED_GAS       {"gas", "Name, formula or CAS number; a mixture; a card; a rule after | holds what the old sheet assumes of cp", false, GAS_PARAMETER_ANY}
 #define CHECKED           {"given", "What is given, as for SOLVE or PATH: a text, a block, or a table with headings", false, GAS_PARAMETER_ANY}
 #define LEGACY            {"legacy", "Old figure or figures, one for each case and wanted heading; a text keeps its digits, such as 0.720", false, GAS_PARAMETER_ANY}
-#define CHECKED_LEGS      {"legs", "Legs of a path, when the figure comes from one, such as isothermal to 8 bar", true, GAS_PARAMETER_ANY}
+#define CHECKED_LEGS      {"legs", "Where the figure comes from: legs of a path, such as isothermal to 8 bar; a stages text; fill or vent", true, GAS_PARAMETER_ANY}
 #define AUDIT_OPTIONS     {"options", "Text of options, such as digits 4; flow; work by gas; barometer 0.98 bar", true, GAS_PARAMETER_ANY}
 #define THE_GAS           {"gas", "Name, formula or CAS number; a mixture such as N2 79 + O2 21; a card or mixture range; a rule after |", false, GAS_PARAMETER_ANY}
 #define TEMPERATURE       {"temperature", "Temperature in K, or in the temperature unit; a text may carry its own unit", false, GAS_PARAMETER_ANY}

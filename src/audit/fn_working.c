@@ -8,6 +8,7 @@
 #include "sheet/job_solve.h"
 #include "sheet/path_task.h"
 #include "sheet/stages_task.h"
+#include "sheet/vessel_task.h"
 
 /* -- what the sum stands on ---------------------------------------------------------------------------------------- */
 
@@ -96,7 +97,9 @@ static void print_conventions(struct print *print)
                     "options; 25 \xC2\xB0"
                     "C and 1 bar unless given");
     }
-    if (job->task != &gas_task_solve) {
+    if (job->task == &gas_fill_task || job->task == &gas_vent_task)
+        print_basis(print, "Q", "heat into the gas is positive; the gas in the vessel is well mixed", "convention");
+    else if (job->task != &gas_task_solve) {
         bool flow = options->system == GAS_FLOW || job->task == &gas_stages_task;
         print_basis(print, "W",
                     options->work_by_gas ? "work by the gas is positive in the answer" : "work on the gas is positive",
@@ -148,8 +151,9 @@ static bool print_steps(struct print *print, struct gas_arena *arena, struct gas
     const struct gas_task *task = print->job->task;
     if (task == &gas_task_solve)
         return print_states(print, arena, refusal);
-    return task == &gas_path_task ? print_path(print, refusal)
-                                  : task != &gas_stages_task || print_stages(print, refusal);
+    if (task == &gas_stages_task)
+        return print_stages(print, refusal);
+    return task == &gas_path_task ? print_path(print, refusal) : print_vessel(print, refusal);
 }
 
 static void print_answers(struct print *print)

@@ -120,6 +120,8 @@ void slip_words(const struct desk *desk, const struct desk_case *truth, const st
     gas_quantity_name(name, site->symbol, site->state);
     if (table && site->kind == SITE_GIVEN)
         snprintf(buffer, size, "%s %s", desk->job->table.heading[site->index].text, slip->given);
+    else if (site->kind == SITE_STAGING)
+        snprintf(buffer, size, "%s behind the coolers %s", figure, slip->given);
     else if (site->kind == SITE_LEG)
         snprintf(buffer, size, "%s in leg %d %s", figure, site->index + 1, slip->given);
     else

@@ -47,5 +47,6 @@ extern const char print_cp_source[];
 bool print_states(struct print *print, struct gas_arena *arena, struct gas_refusal *refusal);
 bool print_path(struct print *print, struct gas_refusal *refusal);
 bool print_stages(struct print *print, struct gas_refusal *refusal);
+bool print_vessel(struct print *print, struct gas_refusal *refusal);
 
 #endif

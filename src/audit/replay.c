@@ -5,6 +5,7 @@
 
 #include <gasleaf/heat.h>
 
+#include "audit/models.h"
 #include "audit/path_replay.h"
 
 static struct gas_leg_figure *leg_figure(struct gas_typed_leg *leg, enum leg_place place)
@@ -19,6 +20,8 @@ double replay_figure(const struct desk *desk, const struct desk_case *truth, siz
         return truth->truth;
     if (at->kind == SITE_GIVEN)
         return truth->row.given >> at->index & 1 ? truth->row.figure[at->index] : NAN;
+    if (at->kind == SITE_STAGING)
+        return desk->staging->figure[at->index].figure;
     struct gas_typed_leg leg = desk->legs->leg[at->index];
     return leg_figure(&leg, at->place)->figure;
 }
@@ -71,6 +74,15 @@ static void add_leg_sites(struct desk *desk, int index)
         add_site(desk, site);
 }
 
+/* The temperature behind the coolers; a drop is a difference, the rest are plain numbers. */
+static void add_staging_sites(struct desk *desk)
+{
+    const struct gas_leg_figure *cool = desk->staging ? &desk->staging->figure[GAS_SAYS_COOLING] : NULL;
+    if (cool && cool->kind == GAS_FIGURE_FIXED)
+        add_site(desk, (struct site){
+                           .kind = SITE_STAGING, .index = GAS_SAYS_COOLING, .symbol = GAS_SYM_T, .unit = &cool->unit});
+}
+
 static void find_sites(struct desk *desk)
 {
     const struct gas_job *job = desk->job;
@@ -83,6 +95,7 @@ static void find_sites(struct desk *desk)
     }
     for (size_t i = 0; desk->legs && i < desk->legs->count && desk->sites + 4 < SITES; i++)
         add_leg_sites(desk, (int)i);
+    add_staging_sites(desk);
     const struct gas_heading *wanted = &job->wanted.heading[0];
     add_site(desk, (struct site){SITE_WANTED, 0, LEG_VALUE, wanted->symbol, wanted->state, &wanted->unit});
 }
@@ -138,6 +151,7 @@ bool desk_open(struct desk *desk, struct gas_job *job, struct gas_arena *arena, 
     memset(desk, 0, sizeof *desk);
     desk->job = job;
     desk->legs = job->task == &gas_path_task ? job->legs : NULL;
+    desk->staging = job->task == &gas_stages_task ? job->legs : NULL;
     find_sites(desk);
     desk->other = other_energy(desk, arena);
     if (!desk->legs && job->gas.interval_count > 0) {
@@ -202,6 +216,8 @@ void replay_reset(struct replay *replay, const struct desk_case *truth)
     replay->factor = 1;
     replay->legs_changed = replay->log10 = replay->heat_swapped = replay->efficiency_turned = false;
     replay->exponent = EXPONENT_RIGHT;
+    replay->filling = FILL_RIGHT;
+    replay->staging_changed = false;
     for (size_t i = 0; i < replay->desk->sites; i++)
         replay->reading[i].changed = false;
 }
@@ -229,6 +245,17 @@ struct gas_typed_legs *replay_legs(struct replay *replay)
         replay->legs_changed = true;
     }
     return &replay->legs;
+}
+
+struct gas_typed_staging *replay_staging(struct replay *replay)
+{
+    if (!replay->desk->staging)
+        return NULL;
+    if (!replay->staging_changed)
+        replay->staging = *replay->desk->staging;
+    replay->job.legs = &replay->staging;
+    replay->staging_changed = true;
+    return &replay->staging;
 }
 
 void replay_hold_cp(struct replay *replay, double cp)
@@ -265,7 +292,9 @@ static void read_sites(struct replay *replay)
                           replay->truth->figures.si[site->index] * gas_unit_to_si(site->unit, figure, 0) < 0;
             replay->figures.si[site->index] = (turned ? -si : si) + reading->shift;
         } else {
-            struct gas_leg_figure *fixed = leg_figure(&replay_legs(replay)->leg[site->index], site->place);
+            struct gas_leg_figure *fixed = site->kind == SITE_STAGING
+                                               ? &replay_staging(replay)->figure[site->index]
+                                               : leg_figure(&replay_legs(replay)->leg[site->index], site->place);
             fixed->figure = si + reading->shift;
             fixed->unit = gas_unit_si(site->unit->dimension);
         }
@@ -288,6 +317,8 @@ static double show(const struct replay *replay, double si)
 static bool run_task(struct replay *replay, double *si)
 {
     struct gas_refusal refusal = {.made = true};
+    if (replay->filling)
+        return vessel_replay(replay, si);
     return replay->desk->legs ? path_replay(replay, si)
                               : replay->job.task->run(&replay->job, &replay->figures, si, &refusal);
 }

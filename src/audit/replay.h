@@ -12,16 +12,17 @@
 
 #include "sheet/job.h"
 #include "sheet/path_task.h"
+#include "sheet/stages_task.h"
 
 enum { SITES = 48 };
 
-enum site_kind { SITE_GIVEN, SITE_LEG, SITE_WANTED };
+enum site_kind { SITE_GIVEN, SITE_LEG, SITE_STAGING, SITE_WANTED };
 enum leg_place { LEG_VALUE, LEG_SECOND, LEG_OUTSIDE };
 
 /* A place where a figure with a unit enters the sum, or leaves it. */
 struct site {
     enum site_kind kind;
-    int index;            /* column of the givens, or leg */
+    int index;            /* column of the givens, leg, or enum gas_staging_item */
     enum leg_place place; /* of a leg */
     enum gas_symbol symbol;
     int state; /* 0: none written; of a leg's end 2 */
@@ -37,10 +38,11 @@ struct reading {
 };
 
 struct desk {
-    struct gas_job *job;               /* prepared; one wanted heading */
-    const struct gas_typed_legs *legs; /* of a path; NULL otherwise */
-    struct gas_job *start, *end;       /* the same givens with T at the start, at the end wanted; NULL: not found */
-    struct gas_job *other;             /* the same with h wanted for u, u for h; NULL: not one of these */
+    struct gas_job *job;                     /* prepared; one wanted heading */
+    const struct gas_typed_legs *legs;       /* of a path; NULL otherwise */
+    const struct gas_typed_staging *staging; /* of staged compression; NULL otherwise */
+    struct gas_job *start, *end; /* the same givens with T at the start, at the end wanted; NULL: not found */
+    struct gas_job *other;       /* the same with h wanted for u, u for h; NULL: not one of these */
     size_t sites;
     struct site site[SITES];
 };
@@ -57,6 +59,9 @@ struct desk_case {
 /* What stands in place of (n-1)/n over a pressure ratio, or of n-1 over a volume ratio. */
 enum wrong_exponent { EXPONENT_RIGHT, EXPONENT_N_1, EXPONENT_N_1_N, EXPONENT_INVERSE, EXPONENT_N };
 
+/* What the end temperature of a filling is mistaken for. */
+enum wrong_filling { FILL_RIGHT, FILL_AT_LINE, FILL_AT_K_LINE };
+
 struct replay {
     const struct desk *desk;
     const struct desk_case *truth;
@@ -71,6 +76,9 @@ struct replay {
     bool heat_swapped;            /* cp for cv and the reverse where heat or work is counted */
     bool efficiency_turned;       /* multiplied where it divides */
     enum wrong_exponent exponent; /* of T2/T1 in adiabatic and polytropic legs */
+    enum wrong_filling filling;
+    struct gas_typed_staging staging; /* copied when changed */
+    bool staging_changed;
 };
 
 /* desk_open - the sites of a prepared job; false and a refusal only when memory is out. */
@@ -88,6 +96,9 @@ struct reading *replay_reading(struct replay *replay, size_t site);
 
 /* replay_legs - the legs, to be changed; NULL when the job has none. */
 struct gas_typed_legs *replay_legs(struct replay *replay);
+
+/* replay_staging - the stages text, to be changed; NULL when the job has none. */
+struct gas_typed_staging *replay_staging(struct replay *replay);
 
 /* replay_figure - of a site in the user's own unit; NAN when it has none in this case. */
 double replay_figure(const struct desk *desk, const struct desk_case *truth, size_t site);

@@ -104,6 +104,14 @@ static bool go_together(const struct instance *a, const struct instance *b)
     return a->slip->kind != b->slip->kind || (a->site >= 0 && b->site >= 0 && a->site != b->site);
 }
 
+/* Two gross slips that happen to undo each other are an accident, not an explanation. */
+static bool undo_each_other(const struct hunt *hunt, size_t i, size_t j)
+{
+    const double gross = 20, truth = hunt->row->truth;
+    double a = fabs(hunt->figure[i] / truth), b = fabs(hunt->figure[j] / truth);
+    return (a > gross && b < 1 / gross) || (b > gross && a < 1 / gross);
+}
+
 static void try_pair(struct hunt *hunt, size_t i, size_t j)
 {
     short part[TOGETHER] = {(short)i, (short)j, -1};
@@ -123,7 +131,8 @@ static void try_pairs(struct hunt *hunt)
         if (isnan(hunt->figure[i]))
             continue;
         for (size_t j = i + 1; j < audit->instances && may_try(hunt, limit); j++) {
-            if (isnan(hunt->figure[j]) || !go_together(&audit->instance[i], &audit->instance[j]))
+            if (isnan(hunt->figure[j]) || !go_together(&audit->instance[i], &audit->instance[j]) ||
+                undo_each_other(hunt, i, j))
                 continue;
             bool small = is_rounding(audit, (int)i) || is_rounding(audit, (int)j);
             double window = fmax(4 * hunt->row->legacy.half, (small ? 0.003 : 0.05) * fabs(legacy));

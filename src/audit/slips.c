@@ -162,6 +162,19 @@ static const struct slip table[] = {
     MODEL("exponent n",          EXPONENT, 0.15, "exponent n in place of (n-1)/n or n-1", model_exponent, EXPONENT_N),
     MODEL("exponent 1.4",        EXPONENT, 0.30, "exponent 1.4 in place of n", model_exponent_k, 0),
 
+    /* machines and vessels */
+    MODEL("ratio divided",       FORMULA, 0.50, "each stage at r/N in place of the N-th root of r", model_ratio_divided, 0),
+    MODEL("single stage",        FORMULA, 0.30, "one stage over the whole ratio", model_single_stage, 0),
+    MODEL("no cooling",          FORMULA, 0.30, "no cooling between the stages", model_no_cooling, 0),
+    MODEL("stages reversible",   EFFICIENCY, 0.60, "the efficiency left out", model_stages_reversible, 0),
+    MODEL("stages efficiency turned", EFFICIENCY, 0.60, "efficiency multiplied where it divides", model_stages_efficiency_turned, 0),
+    MODEL("drive turned",        EFFICIENCY, 0.50, "drive efficiency multiplied where it divides", model_drive, 1),
+    MODEL("drive left out",      EFFICIENCY, 0.50, "drive efficiency left out", model_drive, 0),
+    MODEL("fill at line",        FORMULA, 0.80, "filling temperature taken as the line's", model_fill_at_line, 0),
+    MODEL("fill at k line",      FORMULA, 0.40, "T2 = k T line, true of an evacuated vessel alone", model_fill_at_k_line, 0),
+    MODEL("wall isothermal",     FORMULA, 0.60, "temperature of the vessel taken as unchanged", model_wall_isothermal, 0),
+    MODEL("wall adiabatic",      FORMULA, 0.40, "heat through the vessel's wall left out", model_wall_adiabatic, 0),
+
     /* units */
     AS_UNIT("as bar",     0.50, "bar",     1e5),
     AS_UNIT("as kPa",     0.50, "kPa",     1e3),

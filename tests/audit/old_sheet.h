@@ -338,40 +338,41 @@ SLIP(slip_kgf,           has_P_unit(s, "bar"), s->P_scale = 98066.5)
 SLIP(slip_bar_for_kgf,   has_P_unit(s, "kgf"), s->P_scale = 1e5)
 SLIP(slip_kPa,           has_P_unit(s, "bar") && s->sum == SUM_MASS, s->P_scale = 1e3)
 SLIP(slip_hour,          s->sum == SUM_NORMAL || s->sum == SUM_NORMAL_IN, s->factor = 3600)
-SLIP(slip_pound,         (sheet_is_path(s) || s->sum == SUM_DUTY) && s->m_unit.scale < 1, s->m_unit.scale = 1)
+SLIP(slip_pound,         (sheet_is_path(s) || s->sum == SUM_DUTY) && strcmp(s->m_unit.text, "lb") == 0, s->m_unit.scale = 1)
 
 /* id: as the audit's table names it; often: among the commonest (common practice). */
 static const struct injection {
     const char *id;
     bool often, rounding;
     bool (*inject)(struct sheet *s); /* false where it does not apply */
+    const char *where;               /* NULL: everywhere it can be */
 } injections[] = {
-    {"gauge as absolute",   true,  false, slip_gauge_all},     {"gauge as absolute",   true,  false, slip_gauge_first},
-    {"gauge as absolute",   true,  false, slip_gauge_second},  {"absolute as gauge",   true,  false, slip_absolute},
-    {"barometer twice",     false, false, slip_twice},         {"barometer 1 bar",     true,  false, slip_bar},
-    {"barometer 14.7 psi",  false, true,  slip_147},           {"barometer 1.013 bar", false, true,  slip_1013},
-    {"degrees as absolute", true,  false, slip_degrees},       {"degrees as absolute", true,  false, slip_degrees_first},
-    {"273",                 true,  true,  slip_273},           {"460",                 true,  true,  slip_460},
-    {"R 8.314",             true,  true,  slip_R_8314},        {"R 8.31",              false, true,  slip_R_831},
-    {"R 0.0821",            false, true,  slip_R_00821},       {"R L atm as bar",      true,  false, slip_R_atm},
-    {"R x 1000",            false, false, slip_R_thousand},    {"M whole",             true,  true,  slip_M_whole},
-    {"M 1 decimal",         false, true,  slip_M_decimal},     {"R for R/M",           true,  false, slip_mass},
-    {"answer in mass",      true,  false, slip_moles},         {"ref 15 C 1 atm",      true,  false, slip_15},
-    {"ref 20 C 1 atm",      true,  false, slip_20},            {"ref 25 C 1 atm",      false, false, slip_25},
-    {"ref 0 C 1 bar",       true,  false, slip_0_bar},         {"ref 60 F",            true,  false, slip_60F},
-    {"log10 for ln",        true,  false, slip_log10},         {"ratio inverted",      true,  false, slip_inverted},
-    {"sign",                true,  false, slip_sign},          {"flow for closed",     true,  false, slip_system},
-    {"reversible",          true,  false, slip_reversible},    {"efficiency turned",   true,  false, slip_turned},
-    {"isothermal formula",  false, false, slip_isothermal},    {"exponent n-1",        true,  false, slip_exponent},
-    {"cp at start",         true,  false, slip_cp_start},      {"cp at end",           false, false, slip_cp_end},
-    {"cp at 25",            true,  false, slip_cp_25},         {"cp mean",             false, false, slip_cp_mean},
-    {"cp at mean",          false, false, slip_cp_at_mean},    {"k 1.4",               true,  false, slip_k},
-    {"cp in Celsius",       true,  false, slip_celsius},       {"difference as level", true,  false, slip_level},
-    {"calorie or Btu",      true,  false, slip_cal_IT},        {"calorie or Btu",      true,  false, slip_Btu_th},
-    {"1000 too large answer", true, false, slip_thousand},     {"1000 too small answer", true, false, slip_thousandth},
-    {"as atm",              true,  false, slip_atm},           {"as kgf/cm2",          true,  false, slip_kgf},
-    {"as bar",              true,  false, slip_bar_for_kgf},   {"as kPa",              true,  false, slip_kPa},
-    {"answer per h",        true,  false, slip_hour},          {"lb as kg",            false, false, slip_pound},
+    {"gauge as absolute",   true,  false, slip_gauge_all, NULL},     {"gauge as absolute",   true,  false, slip_gauge_first, "P1"},
+    {"gauge as absolute",   true,  false, slip_gauge_second, "P2"},  {"absolute as gauge",   true,  false, slip_absolute, NULL},
+    {"barometer twice",     false, false, slip_twice, NULL},         {"barometer 1 bar",     true,  false, slip_bar, NULL},
+    {"barometer 14.7 psi",  false, true,  slip_147, NULL},           {"barometer 1.013 bar", false, true,  slip_1013, NULL},
+    {"degrees as absolute", true,  false, slip_degrees, NULL},       {"degrees as absolute", true,  false, slip_degrees_first, "T1"},
+    {"273",                 true,  true,  slip_273, NULL},           {"460",                 true,  true,  slip_460, NULL},
+    {"R 8.314",             true,  true,  slip_R_8314, NULL},        {"R 8.31",              false, true,  slip_R_831, NULL},
+    {"R 0.0821",            false, true,  slip_R_00821, NULL},       {"R L atm as bar",      true,  false, slip_R_atm, NULL},
+    {"R x 1000",            false, false, slip_R_thousand, NULL},    {"M whole",             true,  true,  slip_M_whole, NULL},
+    {"M 1 decimal",         false, true,  slip_M_decimal, NULL},     {"R for R/M",           true,  false, slip_mass, NULL},
+    {"answer in mass",      true,  false, slip_moles, NULL},         {"ref 15 C 1 atm",      true,  false, slip_15, NULL},
+    {"ref 20 C 1 atm",      true,  false, slip_20, NULL},            {"ref 25 C 1 atm",      false, false, slip_25, NULL},
+    {"ref 0 C 1 bar",       true,  false, slip_0_bar, NULL},         {"ref 60 F",            true,  false, slip_60F, NULL},
+    {"log10 for ln",        true,  false, slip_log10, NULL},         {"ratio inverted",      true,  false, slip_inverted, NULL},
+    {"sign",                true,  false, slip_sign, NULL},          {"flow for closed",     true,  false, slip_system, NULL},
+    {"reversible",          true,  false, slip_reversible, NULL},    {"efficiency turned",   true,  false, slip_turned, NULL},
+    {"isothermal formula",  false, false, slip_isothermal, NULL},    {"exponent n-1",        true,  false, slip_exponent, NULL},
+    {"cp at start",         true,  false, slip_cp_start, NULL},      {"cp at end",           false, false, slip_cp_end, NULL},
+    {"cp at 25",            true,  false, slip_cp_25, NULL},         {"cp mean",             false, false, slip_cp_mean, NULL},
+    {"cp at mean",          false, false, slip_cp_at_mean, NULL},    {"k 1.4",               true,  false, slip_k, NULL},
+    {"cp in Celsius",       true,  false, slip_celsius, NULL},       {"difference as level", true,  false, slip_level, NULL},
+    {"calorie or Btu",      true,  false, slip_cal_IT, "cal"},        {"calorie or Btu",      true,  false, slip_Btu_th, "Btu"},
+    {"1000 too large answer", true, false, slip_thousand, NULL},     {"1000 too small answer", true, false, slip_thousandth, NULL},
+    {"as atm",              true,  false, slip_atm, NULL},           {"as kgf/cm2",          true,  false, slip_kgf, NULL},
+    {"as bar",              true,  false, slip_bar_for_kgf, NULL},   {"as kPa",              true,  false, slip_kPa, NULL},
+    {"answer per h",        true,  false, slip_hour, NULL},          {"lb as kg",            false, false, slip_pound, NULL},
 };
 /* clang-format on */
 enum { INJECTIONS = sizeof injections / sizeof *injections };

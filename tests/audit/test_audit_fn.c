@@ -1,4 +1,5 @@
 /* AUDIT and AUDITLIST on cells: verdicts in words, tables, and what users get wrong. */
+#include <math.h>
 #include <stdio.h>
 #include <string.h>
 
@@ -108,6 +109,38 @@ static void rows_may_differ(void)
     check_int("figures may lie across", (long)answer.columns, 3);
 }
 
+/* The same verdict for machines and vessels, the wrong figure by arithmetic: dh = cp T1 (r^(R/cp) - 1), cp = 3.5 R. */
+static void machines_are_judged(void)
+{
+    const double R = 8.31446261815324, T1 = 298.15, M = 0.0289644; /* US Standard Atmosphere 1976 */
+    const double rise = 3.5 * R * T1 * 100 / 1000;                 /* kW for 100 mol/s */
+    const struct {
+        double figure;
+        const char *wanted, *legs, *given, *part;
+    } rows[] = {
+        {2 * rise * (pow(3, 2 / 7.) - 1) / 0.8, "shaft power, kW", "", "", "agrees"},
+        {2 * rise * (pow(4.5, 2 / 7.) - 1) / 0.8, "shaft power, kW", "", "", "each stage at r/N"},
+        {2 * rise * (pow(3, 2 / 7.) - 1), "shaft power, kW", "", "", "the efficiency left out"},
+        {2 * rise * (pow(3, 2 / 7.) - 1) * 0.8, "shaft power, kW", "", "", "efficiency multiplied where it divides"},
+        {rise * (pow(9, 2 / 7.) - 1) / 0.8, "shaft power, kW", "", "", "one stage over the whole ratio"},
+        {2 * rise * (pow(3, 2 / 7.) - 1) / 0.8 * 0.9, "input power, kW", "", "", "drive efficiency multiplied"},
+        {(200e5 / 303.15 - 2e5 / 293.15) * 0.05 * M / R, "m added, kg", "fill",
+         "V = 50 L; P1 = 2 bar; T1 = 20 °C; P2 = 200 bar; T line = 30 °C; P line = 250 bar",
+         "filling temperature taken as the line's"},
+        {(200e5 - 20e5) / 293.15 * 0.05 * M / R, "m out, kg", "vent", "V = 50 L; P1 = 200 bar; T1 = 20 °C; P2 = 20 bar",
+         "temperature of the vessel taken as unchanged"},
+    };
+    for (size_t i = 0; i < sizeof rows / sizeof *rows; i++) {
+        char formula[500];
+        snprintf(formula, sizeof formula, "GAS.AUDIT(\"air | k = 1.4\";\"%s\";\"%s\";%.6g;\"%s\")",
+                 rows[i].given[0] ? rows[i].given : "100 mol/s; P1 = 1 bar; T1 = 25 °C; P2 = 9 bar", rows[i].wanted,
+                 rows[i].figure,
+                 rows[i].legs[0] ? rows[i].legs : "2 stages; isentropic 80 %; cool to 25 °C; drive 90 %");
+        struct gas_block answer = answer_of(formula);
+        check_contains(formula, text_at(&answer, 0, 0), rows[i].part);
+    }
+}
+
 static void done(void)
 {
     gas_arena_free(&arena);
@@ -117,5 +150,6 @@ const struct test_suite suite_audit_fn = {"audit_fn",
                                           (const struct test_case[]){{"verdicts are said", verdicts_are_said},
                                                                      {"columns are judged", columns_are_judged},
                                                                      {"rows may differ", rows_may_differ},
+                                                                     {"machines are judged", machines_are_judged},
                                                                      {"done", done},
                                                                      {0}}};

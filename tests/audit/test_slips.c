@@ -15,7 +15,7 @@
 #include "check.h"
 #include "old_sheet.h"
 
-enum { CASES = 60, PAIRS = 1500, RIGHT = 1000 };
+enum { CASES = 40, PAIRS = 1000, RIGHT = 1000 };
 
 /* One figure audited. */
 struct desk_call {
@@ -81,6 +81,13 @@ struct score {
     char first_else[40];             /* what was named first in its place, most lately */
 };
 
+/* Slips that gave the very same figure in a case. */
+static struct twin {
+    const char *id;
+    char other[60];
+} twins[200];
+static size_t twin_count;
+
 static const char *part_id(const struct desk_call *call, const struct explanation *explanation, size_t part)
 {
     return explanation->part[part] < 0 ? "" : call->audit.instance[explanation->part[part]].slip->id;
@@ -91,6 +98,23 @@ static bool is_named(const struct desk_call *call, const struct explanation *exp
 {
     bool same = strcmp(part_id(call, explanation, 0), id) == 0 && explanation->part[1] < 0;
     return same || (!strict && fabs(explanation->figure - wrong) <= 1e-9 * fabs(wrong));
+}
+
+static void note_twin(const struct desk_call *call, const struct audited *row, const char *id, double wrong)
+{
+    char other[60];
+    const struct explanation *first = &row->explanation[0];
+    if (is_named(call, first, id, wrong, true) || !is_named(call, first, id, wrong, false))
+        return;
+    snprintf(other, sizeof other, "%s%s%s", part_id(call, first, 0), first->part[1] < 0 ? "" : " and ",
+             part_id(call, first, 1));
+    for (size_t i = 0; i < twin_count; i++)
+        if (strcmp(twins[i].id, id) == 0 && strcmp(twins[i].other, other) == 0)
+            return;
+    if (twin_count < sizeof twins / sizeof *twins) {
+        twins[twin_count].id = id;
+        memcpy(twins[twin_count++].other, other, sizeof other);
+    }
 }
 
 static void count(struct score *score, const struct desk_call *call, const struct audited *row, const char *id,
@@ -104,6 +128,8 @@ static void count(struct score *score, const struct desk_call *call, const struc
     score->first += first;
     score->three += three;
     score->strict += row->count && is_named(call, &row->explanation[0], id, wrong, true);
+    if (row->count)
+        note_twin(call, row, id, wrong);
     if (!first)
         snprintf(score->first_else, sizeof score->first_else, "%s",
                  row->count ? part_id(call, row->explanation, 0) : "nothing");
@@ -167,7 +193,8 @@ static void write_table(FILE *file)
                 snprintf(sum.first_else, sizeof sum.first_else, "%s", single[i][k].first_else);
         }
         char name[100];
-        snprintf(name, sizeof name, "%s%s%s", injections[i].id, sum.first_else[0] ? ", else " : "", sum.first_else);
+        snprintf(name, sizeof name, "%s%s%s%s%s", injections[i].id, injections[i].where ? ", " : "",
+                 injections[i].where ? injections[i].where : "", sum.first_else[0] ? ", else " : "", sum.first_else);
         if (sum.tried)
             print_score(file, name, &sum);
     }
@@ -177,6 +204,56 @@ static void write_table(FILE *file)
         snprintf(name, sizeof name, "**slips, %d digits**", digits);
         print_score(file, name, &sum);
     }
+}
+
+/* -- every row of the table ---------------------------------------------------------------------------------------- */
+
+/* Slips that old_sheet.h has no sum for: put in by the audit's own replay, so this only checks the search. */
+static struct score own_rows;
+static bool tried_row[400];
+
+static void try_instance(struct desk_call *call, size_t instance)
+{
+    struct audit *audit = &call->audit;
+    struct desk_case truth;
+    struct gas_refusal refusal = {0};
+    short part[TOGETHER] = {(short)instance, -1, -1};
+    size_t rows;
+    if (!desk_read(&call->desk, 0, &truth, &refusal))
+        return;
+    double figure = audit_figure(audit, &truth, part);
+    if (!isfinite(figure) || figure == 0 || !beyond_rounding(truth.truth, figure, 5))
+        return;
+    struct gas_cell cell = gas_cell_number(rounded(figure, 5));
+    audit->row[0] = (struct audited){.status = AUDIT_BLANK};
+    legacy_read(&cell, &call->job, &call->job.wanted.heading[0], 0, &audit->row[0].legacy, &refusal);
+    audit_run(audit);
+    count(&own_rows, call, &audit->row[0], audit->instance[instance].slip->id, figure);
+    tried_row[audit->instance[instance].slip - slip_table(&rows)] = true;
+}
+
+static void every_row_is_found(void)
+{
+    static struct desk_call call;
+    struct sheet right;
+    size_t rows, tried = 0, kept = twin_count;
+    slip_table(&rows);
+    own_rows = (struct score){0};
+    memset(tried_row, 0, sizeof tried_row);
+    check_seed(24);
+    for (int i = 0; i < 3 * SUMS; i++) {
+        sheet_random(&right, (enum sheet_sum)(i % SUMS));
+        audit_sheet(&call, &right, 1.2345);
+        for (size_t k = 0; k < call.audit.instances; k++)
+            try_instance(&call, k);
+        audit_done(&call);
+    }
+    twin_count = kept; /* those of the independent sums are listed */
+    gas_arena_free(&call.arena);
+    for (size_t i = 0; i < rows; i++)
+        tried += tried_row[i];
+    check_true("three quarters of the table's rows were tried", 4 * tried >= 3 * rows);
+    check_true("rows named among three: 98 %", own_rows.three >= 0.98 * own_rows.tried);
 }
 
 /* -- two slips, and none ------------------------------------------------------------------------------------------- */
@@ -296,6 +373,35 @@ static void slips_are_found(void)
     check_true("rounded constants among three: 98 %", roundings.three >= 0.98 * roundings.tried);
 }
 
+static const char intro[] = "# How well the audit finds slips\n\n"
+                            "<!-- Written by `make audit-report`. -->\n\n"
+                            "Old sheets are simulated: receivers, rigid vessels, normal flows, isothermal and "
+                            "polytropic work, compressors with an\n"
+                            "efficiency, heat duties with a cp formula; random gases, units and readings. Each sheet "
+                            "computes its figure by plain\n"
+                            "arithmetic of its own (`tests/audit/old_sheet.h`), with a slip in it, and rounds it to 3, "
+                            "4 or 5 digits. The audit sees the\n"
+                            "givens and that figure. A slip counts as named when its own row of the table is named, or "
+                            "one that gives the very same\n"
+                            "figure in that case: nobody could tell those apart. Slips that move the figure by less "
+                            "than a unit of its last digit are\n"
+                            "left out. The last column counts the slip's own row alone. Behind a slip stands what was "
+                            "named in its place, once.\n\n"
+                            "These are figures of a simulation with one slip, or two, of the table, and no other "
+                            "difference. Slips that are not in\n"
+                            "the table are not found, and a figure that no slip of the table made is sometimes "
+                            "explained by chance; see below.\n\n";
+
+static void write_chance(FILE *file)
+{
+    fprintf(file, "\n## Figures that no slip made\n\nRight figures times a random factor between 0.5 and 2.\n\n"
+                  "| digits | explained by one slip, %% | by two together, %% |\n| --- | --- | --- |\n");
+    for (int k = 0; k < 3; k++)
+        fprintf(file, "| %d | %.1f | %.1f |\n", k + 3, 100. * chance[k].one / chance[k].tried,
+                100. * chance[k].several / chance[k].tried);
+    fprintf(file, "\nAmong %d right figures, rounded, %d did not get `agrees`.\n", RIGHT, alarms);
+}
+
 static void report(void)
 {
     const char *path = getenv("GASLEAF_CONFUSION");
@@ -304,22 +410,41 @@ static void report(void)
     if (!file)
         return;
     struct score slips = sum_up(false, 0), roundings = sum_up(true, 0);
+    fputs(intro, file);
     write_table(file);
-    print_score(file, "**slips**", &slips);
+    print_score(file, "**all slips**", &slips);
     print_score(file, "**rounded constants**", &roundings);
-    print_score(file, "**two slips at once**", &pairs);
-    for (int k = 0; k < 3; k++)
-        fprintf(
-            file,
-            "%s\nFigures made by no slip, %d digits: %.1f %% are explained by one slip by chance, %.1f %% by two.\n",
-            k ? "" : "\n", k + 3, 100. * chance[k].one / chance[k].tried, 100. * chance[k].several / chance[k].tried);
-    fprintf(file, "\nFalse alarms among %d right figures: %d.\n", RIGHT, alarms);
+    print_score(file, "**two common slips at once**", &pairs);
+    print_score(file, "**every row at every place, put in by the audit itself, 5 digits**", &own_rows);
+    fprintf(file,
+            "\n## Slips that cannot be told apart\n\nIn some case at least, these gave the same figure. The one on the "
+            "right was named first.\n\n| made | named |\n| --- | --- |\n");
+    for (size_t i = 0; i < twin_count; i++)
+        fprintf(file, "| %s | %s |\n", twins[i].id, twins[i].other);
+    write_chance(file);
     fclose(file);
 }
 
-const struct test_suite suite_slips = {"slips", (const struct test_case[]){{"single slips are found", slips_are_found},
-                                                                           {"pairs are found", pairs_are_found},
-                                                                           {"right figures agree", right_figures_agree},
-                                                                           {"chance is told", chance_is_told},
-                                                                           {"report", report},
-                                                                           {0}}};
+/* The page names every slip that is tried here. */
+static void page_is_of_this_table(void)
+{
+    static char page[60000];
+    FILE *file = fopen("docs/audit-confusion.md", "r");
+    if (!check_true("docs/audit-confusion.md is there (make audit-report)", file != NULL))
+        return;
+    size_t length = fread(page, 1, sizeof page - 1, file);
+    fclose(file);
+    page[length] = '\0';
+    for (size_t i = 0; i < INJECTIONS; i++)
+        check_contains("docs/audit-confusion.md (make audit-report)", page, injections[i].id);
+}
+
+const struct test_suite suite_slips = {"slips",
+                                       (const struct test_case[]){{"single slips are found", slips_are_found},
+                                                                  {"every row is found", every_row_is_found},
+                                                                  {"pairs are found", pairs_are_found},
+                                                                  {"right figures agree", right_figures_agree},
+                                                                  {"chance is told", chance_is_told},
+                                                                  {"report", report},
+                                                                  {"the page is of this table", page_is_of_this_table},
+                                                                  {0}}};

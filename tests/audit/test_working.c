@@ -29,6 +29,8 @@ static const struct { const char *working, *function, *arguments; } pairs[] = {
     {"\"N2\";\"2 kg; 25 °C; 5 bar\";\"Q, Btu\";\"isothermal against 1 bar to 2 bar; isobaric to 200 °C\"", "GAS.HEAT", "\"N2\";\"2 kg; 25 °C; 5 bar\";\"isothermal against 1 bar to 2 bar; isobaric to 200 °C\";\"Q, Btu\""},
     {"\"N2\";\"25 °C; 5 bar\";\"T, °F\";\"adiabatic to 9 bar(g)\"", "GAS.END", "\"N2\";\"25 °C; 5 bar\";\"adiabatic to 9 bar(g)\";\"T, °F\""},
     {"\"N2\";\"2 kg/s; T1 = 25 °C; P1 = 1 bar; P2 = 9 bar\";\"shaft power, kW\";\"2 stages; isentropic 78 %; cool to 40 °C\"", "GAS.STAGES", "\"N2\";\"2 kg/s; T1 = 25 °C; P1 = 1 bar; P2 = 9 bar\";\"2 stages; isentropic 78 %; cool to 40 °C\";\"shaft power, kW\""},
+    {"\"air\";\"V = 50 L; P1 = 1 bar; T1 = 20 °C; P2 = 200 bar; T line = 30 °C; P line = 250 bar\";\"m added, kg\";\"fill\"", "GAS.FILL", "\"air\";\"V = 50 L; P1 = 1 bar; T1 = 20 °C; P2 = 200 bar; T line = 30 °C; P line = 250 bar\";\"m added, kg\""},
+    {"\"air\";\"V = 50 L; P1 = 9 bar; T1 = 20 °C; P2 = 4 bar\";\"T2, °C\";\"vent\"", "GAS.VENT", "\"air\";\"V = 50 L; P1 = 9 bar; T1 = 20 °C; P2 = 4 bar\";\"T2, °C\""},
 };
 /* clang-format on */
 
