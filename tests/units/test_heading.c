@@ -1,7 +1,6 @@
 /* Headings. What a heading means is common practice on calculation sheets; no row comes from the code under test. */
 #include <stdio.h>
 #include <string.h>
-#include <time.h>
 
 #include <gasleaf/heading.h>
 
@@ -368,18 +367,6 @@ static void noise_is_survived(void)
     check_true("NUL", !gas_heading_parse("P1\0, bar", 8, NULL, &heading, &fault));
 }
 
-static void a_known_heading_is_quick(void)
-{
-    struct timespec start, end;
-    struct gas_heading heading;
-    clock_gettime(CLOCK_MONOTONIC, &start);
-    for (int i = 0; i < 100000; i++)
-        gas_heading_parse("Inlet pressure (psig)", 21, NULL, &heading, NULL);
-    clock_gettime(CLOCK_MONOTONIC, &end);
-    double each = ((double)(end.tv_sec - start.tv_sec) * 1e9 + (double)(end.tv_nsec - start.tv_nsec)) / 1e5;
-    check_true("a heading in the cache costs less than 3 microseconds", each < 3000.0);
-}
-
 const struct test_suite suite_heading = {"heading",
                                          (const struct test_case[]){{"understood", headings_are_understood},
                                                                     {"refused", what_is_not_a_heading_is_refused},
@@ -387,5 +374,4 @@ const struct test_suite suite_heading = {"heading",
                                                                     {"symbols", every_symbol_is_understood},
                                                                     {"references", references_reach_the_unit},
                                                                     {"noise", noise_is_survived},
-                                                                    {"speed", a_known_heading_is_quick},
                                                                     {0}}};

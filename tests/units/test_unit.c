@@ -3,7 +3,6 @@
 #include <stdio.h>
 #include <stdlib.h>
 #include <string.h>
-#include <time.h>
 #include <unistd.h>
 
 #include <gasleaf/gas.h>
@@ -357,19 +356,6 @@ static void noise_is_survived(void)
     check_true("10000 letters", !gas_unit_parse(text, 10000, NULL, &unit, &fault));
 }
 
-static void a_known_text_is_quick(void)
-{
-    struct timespec start, end;
-    struct gas_unit unit;
-    check_true("kJ/(kg K)", parse("kJ/(kg K)", &unit));
-    clock_gettime(CLOCK_MONOTONIC, &start);
-    for (int i = 0; i < 100000; i++)
-        gas_unit_parse("kJ/(kg K)", 9, NULL, &unit, NULL);
-    clock_gettime(CLOCK_MONOTONIC, &end);
-    double each = ((double)(end.tv_sec - start.tv_sec) * 1e9 + (double)(end.tv_nsec - start.tv_nsec)) / 1e5;
-    check_true("a text in the cache costs less than 2 microseconds", each < 2000.0); /* 60 ns on an idle machine */
-}
-
 const struct test_suite suite_unit = {"unit",
                                       (const struct test_case[]){{"GNU units", gnu_units_agree},
                                                                  {"coverage", every_row_is_compared},
@@ -382,5 +368,4 @@ const struct test_suite suite_unit = {"unit",
                                                                  {"SI", every_dimension_has_an_SI_unit},
                                                                  {"compatible", only_like_units_convert},
                                                                  {"noise", noise_is_survived},
-                                                                 {"speed", a_known_text_is_quick},
                                                                  {0}}};
