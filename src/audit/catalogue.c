@@ -185,6 +185,22 @@ static const struct gas_function rows[] = {
       CHECKED_LEGS, HEADINGS, OPTIONS},
      "GAS.WORKING(\"N2\";\"7 bar(g); 35 °C; 12 m3\";\"m, kg\")", "step"},
 
+    {"GAS.Z", "z", gas_fn_z,
+     "Compressibility factor, estimated by Lee and Kesler's correlation, for mixtures with their own mixing rule",
+     {THE_GAS, TEMPERATURE,
+      {"pressure", "Pressure in Pa absolute, or in the pressure unit; a text may carry its own unit", false, GAS_PARAMETER_ANY},
+      TEMPERATURE_UNIT,
+      {"pressure unit", "Unit of pressures that are bare numbers, such as bar(g); left out: Pa", true, GAS_PARAMETER_ANY}},
+     "GAS.Z(\"n-butane\";510;25;\"K\";\"bar\")", "0.873"},
+
+    {"GAS.VALID", "valid", gas_fn_valid,
+     "A sentence: is the ideal gas good here, by how much is it off, is the gas near its dew point, is the estimate rough",
+     {THE_GAS, TEMPERATURE,
+      {"pressure", "Pressure in Pa absolute, or in the pressure unit; a text may carry its own unit", false, GAS_PARAMETER_ANY},
+      TEMPERATURE_UNIT,
+      {"pressure unit", "Unit of pressures that are bare numbers, such as bar(g); left out: Pa", true, GAS_PARAMETER_ANY}},
+     "GAS.VALID(\"N2\";\"20 °C\";\"8 bar\")", "Good within 1 %"},
+
     {"GAS.GIVEN", "given", gas_fn_given,
      "A block of givens from scattered cells: heading, value, heading, value and so on",
      {{"heading", "Quantity and unit of the value that follows, such as P1, bar(g)", false, GAS_PARAMETER_ANY},

@@ -105,7 +105,8 @@ static bool read_part(struct gas_recipe *recipe, struct gas_piece part, struct g
     struct gas_component component;
     struct gas_marks marks;
     struct gas_piece name;
-    if (gas_species_find(part.at, part.length)) /* "R 22" is a name, not 22 parts of R */
+    bool split = amount_last(part, &name, &component, &marks) && gas_species_find(name.at, name.length);
+    if (!split && gas_species_find(part.at, part.length)) /* "R 22" is a name, not 22 parts of R; "H2O 2" is water */
         return refuse_part(part, refusal);
     if (!amount_last(part, &name, &component, &marks) && !amount_first(part, &name, &component, &marks))
         return refuse_part(part, refusal);

@@ -35,6 +35,7 @@ static const struct text_row texts[] = {
     {"carbon dioxide 40 + nitrogen 60", "CO2", 0.4, 1e-15, "names with spaces"},
     {"1-butene 5 + nitrogen 95", "C4H8", 0.05, 1e-14, "names with digits"},
     {"5 1-butene + 95 nitrogen", "C4H8", 0.05, 1e-14, "names with digits"},
+    {"air 98 + H2O 2", "H2O", 0.02, 1e-15, "2 parts of water, no hydrogen peroxide"},
     {"air 90 + CH4 10", "CH4", 0.1, 1e-15, "air as one part"},
     {"N2 78.9 + O2 21.5", "N2", 78.9 / 100.4, 1e-14, "within 0.5 %: scaled"},
     {"N2 99.5", "N2", 1, 0, "one part"},
