@@ -191,7 +191,7 @@ static const struct gas_function rows[] = {
       {"pressure", "Pressure in Pa absolute, or in the pressure unit; a text may carry its own unit", false, GAS_PARAMETER_ANY},
       TEMPERATURE_UNIT,
       {"pressure unit", "Unit of pressures that are bare numbers, such as bar(g); left out: Pa", true, GAS_PARAMETER_ANY}},
-     "GAS.Z(\"n-butane\";510;25;\"K\";\"bar\")", "0.873"},
+     "GAS.Z(\"n-butane\";510;25;\"K\";\"bar\")", "0.87"},
 
     {"GAS.VALID", "valid", gas_fn_valid,
      "A sentence: is the ideal gas good here, by how much is it off, is the gas near its dew point, is the estimate rough",
