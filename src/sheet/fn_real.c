@@ -70,9 +70,10 @@ static bool read_spot(struct real_call *real, size_t row, size_t column, struct 
     double Tr = spot->reading[T].si / real->critical.T;
     if (Tr < TR_LEAST)
         return gas_refuse(&real->refusal, "temperature",
-                          "%s is %.2g of the critical temperature of %s, %.4g K; the correlation starts at 0.3, where "
-                          "next to nothing is a gas.",
-                          spot->T, Tr, real->choice->label, real->critical.T);
+                          "%s is %s of the critical temperature of %s, %s K; the correlation starts at 0.3, where next "
+                          "to nothing is a gas.",
+                          spot->T, gas_shown_to(Tr, 2).text, real->choice->label,
+                          gas_shown_to(real->critical.T, 4).text);
     spot->condensing = gas_condensing_of(real->choice, spot->reading[T].si, spot->reading[P].si);
     return true;
 }
@@ -102,12 +103,12 @@ static bool Z_of(struct real_call *real, const struct spot *spot, double *Z)
     if (result.status == GAS_OK)
         return true;
     bool hot = result.argument == 1;
+    double times = hot ? spot->reading[T].si / real->critical.T : spot->reading[P].si / real->critical.P;
     return gas_refuse(&real->refusal, hot ? "temperature" : "pressure",
-                      "%s is %.3g times the critical %s of %s, %.4g %s; the correlation ends at %g.",
-                      hot ? spot->T : spot->P,
-                      hot ? spot->reading[T].si / real->critical.T : spot->reading[P].si / real->critical.P,
-                      hot ? "temperature" : "pressure", real->choice->label,
-                      hot ? real->critical.T : real->critical.P / 1e5, hot ? "K" : "bar", hot ? TR_MOST : PR_MOST);
+                      "%s is %s times the critical %s of %s, %s %s; the correlation ends at %s.",
+                      hot ? spot->T : spot->P, gas_shown_to(times, 3).text, hot ? "temperature" : "pressure",
+                      real->choice->label, gas_shown_to(hot ? real->critical.T : real->critical.P / 1e5, 4).text,
+                      hot ? "K" : "bar", hot ? "4" : "10");
 }
 
 static void answer_Z(struct real_call *real, struct gas_call *call, size_t row, size_t column)
@@ -150,8 +151,8 @@ static void add_verdict(struct text *text, double Z, bool hot)
     if (error < 5e-5)
         add(text, "%s: Z is 1 within 0.005 %%", verdict);
     else
-        add(text, "%s: Z is about %.*f, the ideal density %s %% too %s", verdict, error < 0.0095 ? 4 : 3, Z, off,
-            Z < 1 ? "low" : "high");
+        add(text, "%s: Z is about %s, the ideal density %s %% too %s", verdict,
+            gas_shown_to(Z, (error < 0.0095 ? 4 : 3) + (Z >= 1)).text, off, Z < 1 ? "low" : "high");
     add(text, hot ? " (hotter than the correlation reaches: the figure of its edge, 4 times the critical temperature)."
                   : ".");
 }
@@ -223,8 +224,8 @@ static bool judge(struct real_call *real, const struct spot *spot, struct text *
         return true;
     }
     if (Pr > PR_MOST) {
-        add(text, "Not good: %s is %.3g times the critical pressure, beyond the correlation (10); no estimate.",
-            spot->P, Pr);
+        add(text, "Not good: %s is %s times the critical pressure, beyond the correlation (10); no estimate.", spot->P,
+            gas_shown_to(Pr, 3).text);
         return true;
     }
     struct gas_result Z =
