@@ -157,7 +157,7 @@ static const struct gas_species gases[] = {
      .element = {{"N", 1.56168}, {"O", 0.41958}, {"Ar", 0.00934}, {"C", 0.000314}}, .molar_mass = 28.9644e-3,
      HEAT(air, "g 9/95: Mole%:N2 78.084,O2 20.9476,Ar .9365,CO2 .0319.Gordon,1982.Reac"),
      BOILS(78.903, LEMMON_2000_BUBBLE), DIPOLE(0.0, BY_SYMMETRY),
-     CRITICAL(132.5306, LEMMON_2000, 3786000, LEMMON_2000, NAN, NONE)},
+     CRITICAL(132.5306, LEMMON_2000, 3786000, LEMMON_2000, 0.0335, FROM_MEMORY)},
     {.name = "nitrogen", .formula = "N2", .cas = "7727-37-9", .aliases = "dinitrogen|R-728|GN2",
      .element = {{"N", 2}}, HEAT(nitrogen, "tpis78: Ref-Elm. Gurvich,1978 pt1 p280 pt2 p207."),
      BOILS(77.35, POLING_5), DIPOLE(0.0, BY_SYMMETRY),
