@@ -13,7 +13,7 @@
 /* A publication. Rows of other tables cite one by its key, so a row can only cite a source that exists; a key reads
  * well enough to be printed beside a figure. */
 struct gas_source {
-    const char *key;      /* "NASA-TP-2002-211556", "Perry 8th ed. (2008) sec. 2" */
+    const char *key;      /* "NASA/TP-2002-211556", "Perry 8th ed. (2008) sec. 2" */
     const char *citation; /* authors, title, publisher, year */
 };
 

@@ -3,7 +3,7 @@
 #define DATA_SOURCES_H
 
 #define NONE                ""
-#define NASA_GLENN          "NASA-TP-2002-211556"
+#define NASA_GLENN          "NASA/TP-2002-211556"
 #define ATOMIC_WEIGHTS      "IUPAC atomic weights 2021"
 #define ATOMIC_MASSES       "AME2020"
 #define US_ATMOSPHERE       "US Standard Atmosphere 1976"

@@ -39,10 +39,11 @@ bool gas_refuse_constant(const struct gas_form_case *form_case, const char *lett
     if (!letter[1])
         shown[0] = gas_ascii_upper(letter[0]);
     if (form_case->card->intervals > 1)
-        return gas_refuse(form_case->card->refusal, WHAT, "constant %s is missing in interval %zu; %s is %s.", shown,
-                          form_case->interval + 1, form->shown, form->equation);
-    return gas_refuse(form_case->card->refusal, WHAT, "constant %s is missing; %s is %s. Write 0 if it has none.",
-                      shown, form->shown, form->equation);
+        return gas_refuse(form_case->card->refusal, WHAT, "constant %s is missing in interval %zu; the form %s is %s.",
+                          shown, form_case->interval + 1, form->shown, form->equation);
+    return gas_refuse(form_case->card->refusal, WHAT,
+                      "constant %s is missing; the form %s is %s. Write 0 where it has none.", shown, form->shown,
+                      form->equation);
 }
 
 /* The constant with a value in this interval; NULL, refused when it is needed. */

@@ -237,9 +237,13 @@ static const struct gas_form forms[] = {
 /* clang-format on */
 
 static const struct gas_form written = {
-    .shown = "the form", .names = "", .equation = "as written", .spare = "", .build = build_written};
-static const struct gas_form written_over_R = {
-    .shown = "the form", .names = "", .equation = "as written", .spare = "", .build = build_written, .over_R = true};
+    .shown = "on the card", .names = "", .equation = "as written there", .spare = "", .build = build_written};
+static const struct gas_form written_over_R = {.shown = "on the card",
+                                               .names = "",
+                                               .equation = "as written there",
+                                               .spare = "",
+                                               .build = build_written,
+                                               .over_R = true};
 
 const struct gas_form *gas_forms(size_t *count)
 {

@@ -164,6 +164,8 @@ bool gas_cp_unit_read(struct gas_piece text, struct gas_cp_unit *unit, struct ga
     text = gas_piece_trim(text);
     if (known_unit(text, unit, &fault))
         return true;
+    if (text.length > 1 && text.at[0] == 'T' && text.at[1] >= '0' && text.at[1] <= '9')
+        return gas_refuse(refusal, "cp formula", "T%c is not known; write T^%c for a power.", text.at[1], text.at[1]);
     if (fault.status != GAS_UNIT_OK)
         return gas_refuse_unit(refusal, "cp unit", &fault);
     return gas_refuse(refusal, "cp unit",

@@ -17,6 +17,15 @@ static void put_row(struct gas_call *call, size_t row, const char *label, double
     gas_put_text(call, row, 3, source);
 }
 
+/* A text beside its label; a long one stands in the last column, where it has room. */
+static void put_text_row(struct gas_call *call, size_t row, const char *label, const char *text, const char *wide)
+{
+    gas_put_text(call, row, 0, label);
+    gas_put_text(call, row, 1, text);
+    gas_put_text(call, row, 2, "");
+    gas_put_text(call, row, 3, wide);
+}
+
 static double mass_fraction(const struct gas_choice *choice, size_t part)
 {
     double M = 0;
@@ -25,35 +34,64 @@ static double mass_fraction(const struct gas_choice *choice, size_t part)
     return choice->part[part].x * choice->part[part].molar_mass / M;
 }
 
+static void put_fact(struct gas_call *call, size_t row, const struct gas_fact *fact)
+{
+    if (!fact->text)
+        put_row(call, row, fact->label, fact->figure, fact->unit, fact->source);
+    else if (fact->wide)
+        put_text_row(call, row, fact->label, "", fact->text);
+    else
+        put_text_row(call, row, fact->label, fact->text, fact->source);
+}
+
+static void put_part(struct gas_call *call, size_t row, const char *symbol, const char *name, double percent,
+                     const char *unit)
+{
+    char label[120];
+    snprintf(label, sizeof label, "%s %s", symbol, name);
+    put_row(call, row, label, percent, unit, "composition");
+}
+
+/* A publication in full, behind the key that stands beside the figures. */
+static void put_citation(struct gas_call *call, size_t row, const struct gas_source *source)
+{
+    char text[600];
+    snprintf(text, sizeof text, "%s: %s", source->key, source->citation);
+    put_text_row(call, row, "source", "", text);
+}
+
 static void answer_card(struct gas_call *call, const struct gas_choice *choice, const struct gas_facts *facts)
 {
     const size_t parts = choice->part_count > 1 ? choice->part_count : 0;
     size_t row = 0;
-    if (!gas_answer_block(call, 1 + facts->count + 2 * parts, 4))
+    if (!gas_answer_block(call, 1 + facts->count + 2 * parts + facts->cited, 4))
         return;
     static const char *const heading[] = {"label", "value", "unit", "source"};
     for (size_t i = 0; i < 4; i++)
         gas_put_text(call, 0, i, heading[i]);
-    for (size_t i = 0; i < facts->count; i++) {
-        const struct gas_fact *fact = &facts->fact[i];
-        put_row(call, ++row, fact->label, fact->figure, fact->unit, fact->source);
-        if (fact->text)
-            gas_put_text(call, row, 1, fact->text);
-    }
+    for (size_t i = 0; i < facts->count; i++)
+        put_fact(call, ++row, &facts->fact[i]);
     for (size_t i = 0; i < parts; i++)
-        put_row(call, ++row, choice->part[i].label, 100 * choice->part[i].x, "mol %", "composition");
+        put_part(call, ++row, "x", choice->part[i].label, 100 * choice->part[i].x, "mol %");
     for (size_t i = 0; i < parts; i++)
-        put_row(call, ++row, choice->part[i].label, 100 * mass_fraction(choice, i), "wt %", "composition");
+        put_part(call, ++row, "w", choice->part[i].label, 100 * mass_fraction(choice, i), "wt %");
+    for (size_t i = 0; i < facts->cited; i++)
+        put_citation(call, ++row, facts->citation[i]);
 }
 
-/* "x N2", "w oxygen": the mole and the mass fraction of a part. */
-static bool answer_fraction(struct gas_call *call, const struct gas_choice *choice, struct gas_piece item)
+/* "x N2", "w oxygen, %": the mole and the mass fraction of a part. */
+static bool answer_fraction(struct gas_call *call, const struct gas_choice *choice, struct gas_piece item,
+                            struct gas_piece unit)
 {
     bool mole = gas_piece_take(&item, "x"), mass = !mole && gas_piece_take(&item, "w");
-    const struct gas_species *species = mole || mass ? gas_species_find(item.at, item.length) : NULL;
-    for (size_t i = 0; species && i < choice->part_count; i++)
+    const struct gas_species *species = mole || mass ? gas_name_find(item.at, item.length) : NULL;
+    char folded[40];
+    bool percent = gas_listed(gas_fold(folded, sizeof folded, unit), mole ? "%|mol%|vol%" : "%|wt%");
+    if (!species || (unit.length && !percent))
+        return false;
+    for (size_t i = 0; i < choice->part_count; i++)
         if (choice->part[i].species == species) {
-            gas_answer_number(call, mole ? choice->part[i].x : mass_fraction(choice, i));
+            gas_answer_number(call, (percent ? 100 : 1) * (mole ? choice->part[i].x : mass_fraction(choice, i)));
             return true;
         }
     return false;
@@ -69,6 +107,23 @@ static const struct gas_fact *find_fact(const struct gas_facts *facts, struct ga
     return NULL;
 }
 
+/* "source": of the heat capacity; "source of Tc": of any figure. */
+static bool answer_source(struct gas_call *call, const struct gas_choice *choice, const struct gas_facts *facts,
+                          struct gas_piece item)
+{
+    if (!gas_piece_take(&item, "source") && !gas_piece_take(&item, "sources"))
+        return false;
+    if (item.length && !gas_piece_take(&item, "of"))
+        return false;
+    const struct gas_fact *fact = find_fact(facts, item);
+    if (item.length && !fact)
+        return false;
+    const struct gas_source *source = fact ? gas_source_find(fact->source) : NULL;
+    bool heat = !fact || strncmp(fact->label, "cp", 2) == 0;
+    gas_answer_text(call, source ? source->citation : heat ? choice->source : fact->source);
+    return true;
+}
+
 static bool answer_fact(struct gas_call *call, const struct gas_choice *choice, const struct gas_fact *fact,
                         struct gas_piece unit_text, struct gas_refusal *refusal)
 {
@@ -79,6 +134,8 @@ static bool answer_fact(struct gas_call *call, const struct gas_choice *choice, 
         gas_answer_text(call, fact->text);
         return true;
     }
+    if (unit_text.length == strlen(fact->unit) && memcmp(unit_text.at, fact->unit, unit_text.length) == 0)
+        unit_text.length = 0; /* as the card shows it, "debye" too */
     if (unit_text.length && !gas_unit_parse(unit_text.at, unit_text.length, NULL, &unit, &fault))
         return gas_refuse_unit(refusal, "item", &fault);
     if (unit.dimension == GAS_DIM_SPECIFIC_ENTROPY && fact->dimension == GAS_DIM_MOLAR_ENTROPY)
@@ -92,26 +149,38 @@ static bool answer_fact(struct gas_call *call, const struct gas_choice *choice, 
     return true;
 }
 
+/* The lines that this card has. */
+static bool refuse_item(struct gas_refusal *refusal, const struct gas_choice *choice, const struct gas_facts *facts,
+                        struct gas_piece item)
+{
+    char shown[80], list[300] = "";
+    size_t used = 0;
+    for (size_t i = 0; i < facts->count && used + 40 < sizeof list; i++)
+        used += (size_t)snprintf(list + used, sizeof list - used, "%s%s", i ? ", " : "", facts->fact[i].label);
+    gas_quoted(shown, sizeof shown, item.at, item.length);
+    return gas_refuse(refusal, "item", "%s is not on the card of %.60s; its lines are %s%s.", shown, choice->label,
+                      list, choice->part_count > 1 ? ", x and w with a component" : "");
+}
+
 static bool answer_item(struct gas_call *call, const struct gas_choice *choice, const struct gas_facts *facts,
                         struct gas_piece item, struct gas_refusal *refusal)
 {
-    struct gas_piece unit = {"", 0}, name = item;
+    const struct gas_piece no_unit = {"", 0};
     const struct gas_fact *fact = find_fact(facts, item);
-    const char *comma = memchr(item.at, ',', item.length);
-    char shown[80];
-    if (!fact && comma) {
-        name = gas_piece_trim((struct gas_piece){item.at, (size_t)(comma - item.at)});
-        unit = gas_piece_trim((struct gas_piece){comma + 1, item.length - (size_t)(comma - item.at) - 1});
-        fact = find_fact(facts, name);
-    }
+    const char *comma = memrchr(item.at, ',', item.length);
+    if (fact)
+        return answer_fact(call, choice, fact, no_unit, refusal);
+    if (answer_source(call, choice, facts, item) || answer_fraction(call, choice, item, no_unit))
+        return true;
+    if (!comma)
+        return refuse_item(refusal, choice, facts, item);
+    const size_t front = (size_t)(comma - item.at);
+    struct gas_piece name = gas_piece_trim((struct gas_piece){item.at, front});
+    struct gas_piece unit = gas_piece_trim((struct gas_piece){comma + 1, item.length - front - 1});
+    fact = find_fact(facts, name);
     if (fact)
         return answer_fact(call, choice, fact, unit, refusal);
-    if (answer_fraction(call, choice, item))
-        return true;
-    return gas_refuse(refusal, "item",
-                      "%s is not on the card of %s; ask for name, formula, CAS, M, R, cp, cv, gamma, from, to, Tc, Pc, "
-                      "omega, Tb, dipole, source, or of a mixture x N2 (mole) or w N2 (mass fraction).",
-                      gas_quoted(shown, sizeof shown, item.at, item.length), choice->label);
+    return answer_fraction(call, choice, name, unit) || refuse_item(refusal, choice, facts, item);
 }
 
 static bool read_single_text(const struct gas_block *argument, const char *what, struct gas_piece *text,

@@ -6,6 +6,8 @@
 #include <stdlib.h>
 #include <string.h>
 
+#include <gasleaf/heat.h>
+
 #include "sheet/gas_rule.h"
 
 #define WHAT "gas card"
@@ -13,15 +15,29 @@
 /* Rows that only a card has: "name" may also head a mixture. */
 static bool only_on_cards(enum gas_card_item item)
 {
-    return item >= GAS_CARD_M && item <= GAS_CARD_RULE;
+    return (item >= GAS_CARD_M && item <= GAS_CARD_RULE) || item == GAS_CARD_MOLE_PART || item == GAS_CARD_MASS_PART;
+}
+
+static const struct gas_species *species_in(const struct gas_cell *cell)
+{
+    return cell->kind == GAS_CELL_TEXT ? gas_name_find(cell->text, cell->length) : NULL;
+}
+
+/* "name | N2": of a card, unless further components stand beside it. */
+static bool names_gas(const struct gas_block *block, size_t row, enum gas_card_item item)
+{
+    return (item == GAS_CARD_NAME || item == GAS_CARD_FORMULA || item == GAS_CARD_CAS) &&
+           species_in(gas_cell_at(block, row, 1)) && !(block->columns > 2 && species_in(gas_cell_at(block, row, 2)));
 }
 
 bool gas_is_card(const struct gas_block *block)
 {
     for (size_t row = 0; row < block->rows && block->columns > 1; row++) {
         const struct gas_cell *cell = gas_cell_at(block, row, 0);
-        if (cell->kind == GAS_CELL_TEXT &&
-            only_on_cards(gas_card_label_read((struct gas_piece){cell->text, cell->length}).item))
+        if (cell->kind != GAS_CELL_TEXT)
+            continue;
+        enum gas_card_item item = gas_card_label_read((struct gas_piece){cell->text, cell->length}).item;
+        if (only_on_cards(item) || names_gas(block, row, item))
             return true;
     }
     return false;
@@ -79,7 +95,7 @@ static bool interval_range(const struct gas_card *card, size_t i, double *from, 
     if (!has_from && !has_to && card->intervals == 1)
         return true;
     if (!has_from || !has_to)
-        return gas_refuse(card->refusal, WHAT, "interval %zu has no \"%s\"; give both ends of the temperature range.",
+        return gas_refuse(card->refusal, WHAT, "column %zu of its values has no \"%s\"; give both ends of the range.",
                           i + 1, has_from ? "to" : "from");
     if (!read_level(card, "from", card->from[i], card->from_unit, from) ||
         !read_level(card, "to", card->to[i], card->to_unit, to))
@@ -247,9 +263,19 @@ static bool build_row_cp(const struct gas_card *card, struct gas_draft *draft)
            gas_rules_apply(&rules, draft);
 }
 
+static bool has_row_cp(const struct gas_card *card)
+{
+    return !isnan(card->cp_value) || card->cp.length || !isnan(card->k);
+}
+
+static bool has_own_heat(const struct gas_card *card)
+{
+    return has_row_cp(card) || card->constants || card->form.length;
+}
+
 static bool build_heat(struct gas_card *card, struct gas_draft *draft, const struct gas_species *species)
 {
-    bool row_cp = !isnan(card->cp_value) || card->cp.length || !isnan(card->k);
+    const bool row_cp = has_row_cp(card);
     const struct gas_form *form = gas_form_find(card->form);
     if (row_cp && (card->constants || (card->form.length && !(form && strcmp(form->shown, "constant") == 0))))
         return gas_refuse(card->refusal, WHAT,
@@ -261,7 +287,7 @@ static bool build_heat(struct gas_card *card, struct gas_draft *draft, const str
     if (species) {
         draft->gas.interval = species->interval;
         draft->gas.interval_count = species->interval_count;
-        draft->source = gas_species_source_words(species);
+        gas_draft_source(draft, species);
     }
     return true;
 }
@@ -274,39 +300,85 @@ static const char *copy_piece(struct gas_draft *draft, struct gas_piece piece, c
     return copy ? copy : "";
 }
 
-static bool set_part(struct gas_draft *draft)
+static bool set_part(struct gas_draft *draft, const struct gas_species *species)
 {
     struct gas_part *part = gas_arena_take(draft->arena, 1, sizeof *part);
     if (!part)
         return gas_refuse_memory(draft->refusal);
-    *part = (struct gas_part){NULL, draft->label, 1, draft->gas.molar_mass};
+    *part = (struct gas_part){species, draft->label, 1, draft->gas.molar_mass};
     draft->part = part;
     draft->part_count = 1;
     return true;
 }
 
-static const struct gas_species *species_of(const struct gas_card *card)
+static const struct gas_species *find(struct gas_piece name)
+{
+    return name.length ? gas_name_find(name.at, name.length) : NULL;
+}
+
+/* The gas of the tables that the card speaks of, if any. The name goes before the formula, which isomers share. */
+static bool species_of(const struct gas_card *card, const struct gas_species **species)
+{
+    const struct gas_species *by_cas = find(card->cas), *by_name = find(card->name), *by_formula = find(card->formula);
+    *species = by_cas ? by_cas : by_name ? by_name : by_formula;
+    const struct gas_species *first = *species;
+    bool one = (!by_name || strcmp(first->formula, by_name->formula) == 0) &&
+               (!by_formula || strcmp(first->formula, by_formula->formula) == 0);
+    return one || gas_refuse(card->refusal, WHAT,
+                             "its rows name, formula and CAS number speak of %s and %s; correct one of them.",
+                             first->name, by_formula ? by_formula->name : by_name->name);
+}
+
+/* A print of GAS.CARD shows cp at one temperature: it has to be that of the gas which the card describes. */
+static bool agrees_with_print(const struct gas_card *card, const struct gas_draft *draft)
+{
+    struct gas_cp_unit unit = {.factor = 1};
+    double factor;
+    struct gas_result cp = gas_cp(&draft->gas, 298.15);
+    if (isnan(card->cp_at_25))
+        return true;
+    if (draft->gas.interval_count == 0)
+        return gas_refuse(card->refusal, WHAT,
+                          "it shows cp at 25 °C, but not the constants behind it; use the card that has them, or write "
+                          "the label cp for a constant.");
+    if ((card->cp_at_25_unit.length && !gas_cp_unit_read(card->cp_at_25_unit, &unit, card->refusal)) ||
+        !gas_cp_unit_factor(&unit, draft->gas.R, draft->gas.molar_mass, &factor, card->refusal))
+        return false;
+    if (cp.status || fabs(factor * card->cp_at_25 - cp.value) <= 0.01 * cp.value)
+        return true;
+    return gas_refuse(card->refusal, WHAT,
+                      "cp at 25 °C is %s J/(mol K) on it, while its heat capacity gives %s; write the label cp for a "
+                      "constant, or delete the row.",
+                      gas_shown_to(factor * card->cp_at_25, 5).text, gas_shown_to(cp.value, 5).text);
+}
+
+/* The composition on the card, by mole where both bases are printed. */
+static bool build_mixture(struct gas_card *card, struct gas_draft *draft)
+{
+    struct gas_recipe *recipe = card->by_mole.count ? &card->by_mole : &card->by_mass;
+    return recipe->count == 0 || gas_recipe_finish(recipe, draft);
+}
+
+static bool build_card(struct gas_draft *draft, struct gas_card *card)
 {
     const struct gas_species *species = NULL;
-    if (card->formula.length)
-        species = gas_species_find(card->formula.at, card->formula.length);
-    if (!species && card->name.length)
-        species = gas_species_find(card->name.at, card->name.length);
-    return species;
+    if (!build_mixture(card, draft) || (draft->part_count == 0 && !species_of(card, &species)))
+        return false;
+    if (card->name.length || draft->part_count == 0)
+        draft->label = copy_piece(draft, card->name.length ? card->name : card->formula, "the gas of the card");
+    if (has_own_heat(card))
+        draft->source = copy_piece(draft, card->source, "as given on the gas card"), draft->source_key = "";
+    return settle_constants(card, draft, species) && build_heat(card, draft, species) &&
+           (draft->part_count > 0 || set_part(draft, has_own_heat(card) ? NULL : species));
 }
 
 static bool read_card(struct gas_draft *draft, struct gas_card *card, const struct gas_block *block)
 {
-    if (!gas_card_read(card, block))
-        return false;
-    const struct gas_species *species = species_of(card);
-    draft->label = copy_piece(draft, card->name.length ? card->name : card->formula, "the gas of the card");
-    draft->source = copy_piece(draft, card->source, "as given on the gas card");
-    if (!settle_constants(card, draft, species) || !build_heat(card, draft, species))
+    if (!gas_card_read(card, block) || !build_card(draft, card))
         return false;
     if (!(draft->gas.molar_mass > 0))
         return gas_refuse(draft->refusal, WHAT, "the molar mass is missing; add a row M, such as 28.01 g/mol.");
-    return set_part(draft) && (card->rule.length == 0 || gas_draft_rules(draft, card->rule));
+    return (card->rule.length == 0 || gas_draft_rules(draft, card->rule)) && agrees_with_print(card, draft);
 }
 
 bool gas_draft_card(struct gas_draft *draft, const struct gas_block *block)

@@ -10,6 +10,7 @@
 
 #include "sheet/cp_build.h"
 #include "sheet/gas_draft.h"
+#include "sheet/gas_mixture.h"
 
 enum { GAS_CARD_INTERVALS = 8, GAS_CARD_CONSTANTS = 48, GAS_CARD_LABEL = 40 };
 
@@ -17,6 +18,7 @@ enum gas_card_item {
     GAS_CARD_UNKNOWN,
     GAS_CARD_NAME,
     GAS_CARD_FORMULA,
+    GAS_CARD_CAS,
     GAS_CARD_M,
     GAS_CARD_FORM,
     GAS_CARD_CP_UNIT,
@@ -30,7 +32,10 @@ enum gas_card_item {
     GAS_CARD_K,
     GAS_CARD_RULE,
     GAS_CARD_SOURCE,
-    GAS_CARD_REMARK, /* a heading row, a note: read over */
+    GAS_CARD_CP_AT_25,  /* printed by GAS.CARD: compared with what the card gives */
+    GAS_CARD_MOLE_PART, /* "x methane" */
+    GAS_CARD_MASS_PART, /* "w methane" */
+    GAS_CARD_REMARK,    /* a heading row, a note, a figure of GAS.CARD that follows from others: read over */
     GAS_CARD_CONSTANT
 };
 
@@ -40,6 +45,7 @@ struct gas_card_label {
     char letter[GAS_CARD_LABEL];
     double factor;         /* value times this is the constant: 1e-3 under "10^3 B" */
     struct gas_piece unit; /* in the label itself: "M, g/mol" */
+    struct gas_piece part; /* the component in "x methane" */
 };
 
 struct gas_card_label gas_card_label_read(struct gas_piece text);
@@ -53,9 +59,12 @@ struct gas_constant {
 
 struct gas_card {
     struct gas_refusal *refusal;
-    struct gas_piece name, formula, form, rule, source;
-    struct gas_piece cp, cp_text_unit; /* a row cp: figure or formula */
-    double cp_value, k;                /* NAN: none */
+    struct gas_piece name, formula, cas, form, rule, source;
+    struct gas_recipe by_mole, by_mass; /* the composition, where it has one */
+    struct gas_piece cp, cp_text_unit;  /* a row cp: figure or formula */
+    double cp_value, k;                 /* NAN: none */
+    double cp_at_25;                    /* as printed; NAN: none */
+    struct gas_piece cp_at_25_unit;
     double M, R, R_specific, R_of_fit; /* SI; 0: none */
     bool cp_unit_said, T_unit_said;
     struct gas_cp_unit cp_unit;

@@ -12,7 +12,8 @@ static const struct {
     const char *labels; /* folded */
 } known[] = {
     {GAS_CARD_NAME,     "name|gas|gasname|substance|species|compound|fluid"},
-    {GAS_CARD_FORMULA,  "formula|chemicalformula|cas|casnumber|casno"},
+    {GAS_CARD_FORMULA,  "formula|chemicalformula"},
+    {GAS_CARD_CAS,      "cas|casnumber|casno|casrn"},
     {GAS_CARD_M,        "m|mw|mm|mr|molarmass|molmass|molecularmass|molecularweight|molweight|molwt|relativemolarmass|"
                         "relativemolecularmass|molarweight"},
     {GAS_CARD_FORM,     "form|cpform|formofcp|heatcapacityform|formofheatcapacity|heatcapacity|equation|cpequation|"
@@ -30,9 +31,12 @@ static const struct {
     {GAS_CARD_CP,       "cp|cpconstant|constantcp|cp(t)"},
     {GAS_CARD_K,        "k|gamma|kappa|cp/cv|ratioofheatcapacities|heatcapacityratio|isentropicexponent|\u03b3|\u03ba"},
     {GAS_CARD_RULE,     "rule|rules"},
-    {GAS_CARD_SOURCE,   "source|sources|reference|references|ref|from source|datasource"},
+    {GAS_CARD_SOURCE,   "source|sources|reference|references|ref|fromsource|datasource"},
+    {GAS_CARD_CP_AT_25, "cpat25°c"},
     {GAS_CARD_REMARK,   "label|item|quantity|property|constant|constants|note|notes|remark|remarks|comment|comments|date|"
-                        "checked|checkedby|by|madeby|revision|interval|intervals"},
+                        "checked|checkedby|by|madeby|revision|interval|intervals|"
+                        "cpat25°c,permass|cvat25°c|gammaat25°c|datafrom|datato|noteoncp|tc|criticaltemperature|pc|"
+                        "criticalpressure|omega|acentricfactor|boilingpoint|dipolemoment"},
 };
 /* clang-format on */
 
@@ -117,6 +121,17 @@ static struct gas_piece without_unit(struct gas_piece text, struct gas_piece *un
     return gas_piece_trim((struct gas_piece){text.at, cut});
 }
 
+/* "x methane" and "w methane": the mole and the mass fraction of a component. */
+static bool read_part(struct gas_piece text, struct gas_card_label *label)
+{
+    bool mole = gas_piece_take(&text, "x");
+    if ((!mole && !gas_piece_take(&text, "w")) || !gas_name_find(text.at, text.length))
+        return false;
+    label->item = mole ? GAS_CARD_MOLE_PART : GAS_CARD_MASS_PART;
+    label->part = text;
+    return true;
+}
+
 struct gas_card_label gas_card_label_read(struct gas_piece text)
 {
     struct gas_card_label label = {.factor = 1};
@@ -129,6 +144,8 @@ struct gas_card_label gas_card_label_read(struct gas_piece text)
             snprintf(folded, sizeof folded, "%s", folded[3] == '0' ? "cp0" : "cpinf");
         if (label.item == GAS_CARD_UNKNOWN && read_constant(folded, &label))
             label.item = GAS_CARD_CONSTANT;
+        else if (label.item == GAS_CARD_UNKNOWN)
+            read_part(text, &label);
         if (label.item != GAS_CARD_UNKNOWN)
             return label;
         text = without_unit(text, &label.unit);

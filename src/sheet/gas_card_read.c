@@ -163,6 +163,35 @@ static bool read_text(struct row *row, struct gas_piece *kept)
     return true;
 }
 
+static bool read_cp_at_25(struct row *row)
+{
+    struct gas_card *card = row->card;
+    if (!read_number(row, 0, &card->cp_at_25))
+        return false;
+    card->cp_at_25_unit = row->unit;
+    return true;
+}
+
+static bool read_part(struct row *row)
+{
+    const struct gas_cell *cell = value_cell(row, 0);
+    const bool by_mass = row->label.item == GAS_CARD_MASS_PART;
+    struct gas_recipe *recipe = by_mass ? &row->card->by_mass : &row->card->by_mole;
+    struct gas_component component = {.amount = cell->number};
+    struct gas_marks marks = {0};
+    if (cell->kind == GAS_CELL_TEXT && !gas_amount_read(text_of(cell), &component, &marks))
+        return refuse_row(row, "needs a fraction as its value, such as 0.21 or 21 %.");
+    if (cell->kind == GAS_CELL_EMPTY || (!component.rest && component.amount == 0))
+        return true;
+    if (row->unit.length && !gas_marks_read(row->unit, &marks))
+        return refuse_row(row, "has a unit that is not one of a fraction; write mol % or wt %.");
+    if (marks.basis && by_mass != (marks.basis == GAS_BASIS_MASS))
+        return refuse_row(row, "has the unit of the other basis; x is by mole and w by mass.");
+    marks.basis = by_mass ? GAS_BASIS_MASS : GAS_BASIS_MOLE;
+    component.ppm = marks.ppm;
+    return gas_recipe_add(recipe, row->label.part, component, &marks, row->card->refusal);
+}
+
 static bool read_row(struct row *row)
 {
     struct gas_card *card = row->card;
@@ -172,6 +201,8 @@ static bool read_row(struct row *row)
         return card->name.length ? true : read_text(row, &card->name);
     case GAS_CARD_FORMULA:
         return card->formula.length ? true : read_text(row, &card->formula);
+    case GAS_CARD_CAS:
+        return card->cas.length ? true : read_text(row, &card->cas);
     case GAS_CARD_M:
         return read_M(row);
     case GAS_CARD_FORM:
@@ -198,13 +229,18 @@ static bool read_row(struct row *row)
         return read_text(row, &card->rule);
     case GAS_CARD_SOURCE:
         return card->source.length ? true : read_text(row, &card->source);
+    case GAS_CARD_CP_AT_25:
+        return read_cp_at_25(row);
+    case GAS_CARD_MOLE_PART:
+    case GAS_CARD_MASS_PART:
+        return read_part(row);
     case GAS_CARD_REMARK:
         return true;
     case GAS_CARD_CONSTANT:
         return read_constant(row);
     default:
         return refuse_row(row, "is not a label known on a gas card; those are name, M, form, cp unit, T unit, the "
-                               "constants, from, to, cp, k, R, rule, source and note.");
+                               "constants, from, to, cp, k, R, rule, x with a component, source and note.");
     }
 }
 
@@ -263,7 +299,7 @@ bool gas_card_read(struct gas_card *card, const struct gas_block *block)
     size_t values = value_columns(block);
     for (size_t i = 0; i < GAS_CARD_INTERVALS; i++)
         card->from[i] = card->to[i] = NAN;
-    card->cp_value = card->k = NAN;
+    card->cp_value = card->k = card->cp_at_25 = NAN;
     card->T_unit = gas_T_kelvin;
     if (!accept_shape(card, block, values))
         return false;

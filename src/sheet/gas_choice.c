@@ -46,7 +46,7 @@ static void feed(struct key *key, const void *bytes, size_t length)
         memcpy(key->copy + key->length, byte, length);
     if (key->against)
         key->differs = key->differs || memcmp(key->against + key->length, byte, length) != 0;
-    else
+    else if (!key->copy)
         for (size_t i = 0; i < length; i++)
             key->hash = (key->hash ^ byte[i]) * 1099511628211U; /* FNV-1a */
     key->length += length;
@@ -54,7 +54,9 @@ static void feed(struct key *key, const void *bytes, size_t length)
 
 static void feed_block(struct key *key, const struct gas_block *block)
 {
-    const size_t shape[] = {block->rows, block->columns};
+    /* at most GAS_RANGE_MOST cells: two bytes each */
+    const unsigned char shape[] = {block->rows & 0xff, block->rows >> 8 & 0xff, block->columns & 0xff,
+                                   block->columns >> 8 & 0xff};
     feed(key, shape, sizeof shape);
     for (size_t i = 0; i < block->rows * block->columns; i++) {
         const struct gas_cell *cell = &block->cell[i];
@@ -109,7 +111,12 @@ static void drop(struct kept *kept)
 
 void gas_choice_release(const struct gas_choice *choice)
 {
-    drop((struct kept *)(uintptr_t)choice);
+    /* the choice is the first member of what is kept; it was lent as const, but its counter is not */
+    const union {
+        const struct gas_choice *lent;
+        struct kept *kept;
+    } whole = {choice};
+    drop(whole.kept);
 }
 
 /* Into the place of the one asked for longest ago; when somebody else was quicker with the same gas, theirs is used. */
@@ -176,13 +183,20 @@ static struct kept *make(const struct gas_block *block, const struct key *key, s
                               .gas = {.R = GAS_R, .molar_mass = NAN},
                               .label = "",
                               .rule = "",
-                              .source = ""};
+                              .source = "",
+                              .source_key = ""};
     if (!read_block(&draft, block) || !gas_draft_check(&draft) || refusal->made) {
         gas_arena_free(&made->arena);
         free(made);
         return NULL;
     }
-    made->shown = (struct gas_choice){draft.gas, draft.label, draft.rule, draft.part_count, draft.part, draft.source};
+    made->shown = (struct gas_choice){.gas = draft.gas,
+                                      .label = draft.label,
+                                      .rule = draft.rule,
+                                      .part_count = draft.part_count,
+                                      .part = draft.part,
+                                      .source = draft.source,
+                                      .source_key = draft.source_key};
     atomic_init(&made->uses, 1);
     return made;
 }

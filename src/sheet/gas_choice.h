@@ -14,7 +14,7 @@
 #include "sheet/sentence.h"
 
 struct gas_part {
-    const struct gas_species *species; /* NULL for a part that came from a card */
+    const struct gas_species *species; /* NULL for a part whose heat capacity came from a card */
     const char *label;
     double x;          /* mole fraction, adds to 1 */
     double molar_mass; /* kg/mol */
@@ -26,7 +26,8 @@ struct gas_choice {
     const char *rule;  /* the words after '|' as understood: "cp = 1.04 kJ/kg-K"; "" without */
     size_t part_count; /* 1 for a species; parts of nested mixtures are merged */
     const struct gas_part *part;
-    const char *source; /* where the heat capacity comes from, in words */
+    const char *source;     /* where the heat capacity comes from, in words */
+    const char *source_key; /* its key in the table of sources; "" when it was given with the gas */
 };
 
 /* gas_choose - NULL after a refusal. Give every choice back with gas_choice_release. */

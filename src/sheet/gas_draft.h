@@ -22,7 +22,7 @@ struct gas_draft {
     struct gas gas; /* molar_mass is NAN until it is known */
     size_t part_count;
     const struct gas_part *part;
-    const char *label, *rule, *source;
+    const char *label, *rule, *source, *source_key;
     bool to_be_checked; /* the heat capacity was typed, not taken from the tables */
 };
 
@@ -31,7 +31,14 @@ bool gas_draft_name(struct gas_draft *draft, struct gas_piece name);
 void gas_draft_species(struct gas_draft *draft, const struct gas_species *species);
 /* "nitrogn" is not known; nearest are ...: always false. */
 bool gas_refuse_name(struct gas_refusal *refusal, struct gas_piece name);
-const char *gas_species_source_words(const struct gas_species *species);
+/* The heat capacity is that of the tables: its source goes with it. */
+void gas_draft_source(struct gas_draft *draft, const struct gas_species *species);
+/* gas_name_find - gas_species_find, and the ways of saying the same: "nitrogen gas", "Freon 22", "CO2 (g)". */
+const struct gas_species *gas_name_find(const char *text, size_t length);
+
+/* gas_blend.c: "natural gas", "C4", "sulphur" are names of the trade for no one gas: refused with an example of what to
+ * write, and true. False, and nothing refused, for any other name. */
+bool gas_refuse_blend(struct gas_refusal *refusal, struct gas_piece name);
 
 /* gas_mixture.c: a name, or a mixture such as "N2 79 + O2 21"; a range component | fraction. */
 bool gas_draft_text(struct gas_draft *draft, struct gas_piece text);

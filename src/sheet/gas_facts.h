@@ -6,7 +6,7 @@
 
 #include "sheet/gas_choice.h"
 
-enum { GAS_FACTS = 20 };
+enum { GAS_FACTS = 20, GAS_CITED = 8 };
 
 struct gas_fact {
     const char *label;
@@ -14,13 +14,16 @@ struct gas_fact {
     const char *text;  /* NULL: a figure */
     double figure;     /* SI */
     enum gas_dimension dimension;
-    const char *unit; /* of the figure, as shown */
-    const char *source;
+    const char *unit;   /* of the figure, as shown */
+    const char *source; /* the key of a publication, or words */
+    bool wide;          /* a text too long for the column of the figures */
 };
 
 struct gas_facts {
     size_t count;
     struct gas_fact fact[GAS_FACTS];
+    size_t cited; /* the publications behind them, each once */
+    const struct gas_source *citation[GAS_CITED];
 };
 
 /* gas_facts_of - unknown figures are left out. Texts belong to the choice and to the tables. */

@@ -40,7 +40,7 @@ static bool accept_marks(struct gas_recipe *recipe, const struct gas_marks *mark
 bool gas_recipe_add(struct gas_recipe *recipe, struct gas_piece name, struct gas_component component,
                     const struct gas_marks *marks, struct gas_refusal *refusal)
 {
-    component.species = gas_species_find(name.at, name.length);
+    component.species = gas_name_find(name.at, name.length);
     if (!component.species)
         return gas_refuse_name(refusal, name);
     for (size_t i = 0; i < recipe->count; i++)
@@ -77,6 +77,13 @@ static bool refuse_sum(struct gas_refusal *refusal, double sum, bool marked, boo
                       figure, percent);
 }
 
+static bool refuse_total(struct gas_refusal *refusal, double total, double sum)
+{
+    return gas_refuse(refusal, "gas",
+                      "the total of the mixture says %s and its parts add up to %s; correct one of them.",
+                      gas_shown(total).text, gas_shown(sum).text);
+}
+
 /* Parts per million become parts of the whole, the rest its figure; then the sum is looked at. */
 static bool settle_amounts(struct gas_recipe *recipe, struct gas_refusal *refusal)
 {
@@ -102,6 +109,8 @@ static bool settle_amounts(struct gas_recipe *recipe, struct gas_refusal *refusa
         return refuse_sum(refusal, sum, recipe->percent, rest != NULL);
     if (rest)
         rest->amount = whole - sum;
+    if (recipe->total > 0 && fabs(recipe->total - whole) > SUM_TOLERANCE * whole)
+        return refuse_total(refusal, recipe->total, rest ? whole : sum);
     return true;
 }
 

@@ -27,6 +27,8 @@ struct gas_recipe {
     struct gas_component component[GAS_PARTS_MOST];
     enum gas_basis basis;
     bool percent;
+    double total;     /* of a row total, as written; 0: none */
+    const char *line; /* "row" or "column" of a range, for sentences */
 };
 
 /* gas_marks_read - "%", "wt%", "mol %", "by volume", "ppm": all of the text must be marks. */

@@ -119,6 +119,6 @@ bool gas_draft_sum(struct gas_draft *draft, const struct gas_part *part, size_t 
     draft->gas.molar_mass = M;
     draft->part = part;
     draft->part_count = count;
-    draft->source = gas_species_source_words(part[0].species);
+    gas_draft_source(draft, part[0].species);
     return sum_heat(draft, gas, part, count);
 }

@@ -85,6 +85,15 @@ static bool amount_first(struct gas_piece part, struct gas_piece *name, struct g
     return name->length && (marked || used == token || (unsigned char)part.at[used] == 0xc2);
 }
 
+/* A comma with a space behind it is no decimal comma. */
+static bool has_comma_between(struct gas_piece text)
+{
+    for (size_t i = 1; i + 1 < text.length; i++)
+        if (text.at[i] == ',' && text.at[i + 1] == ' ')
+            return true;
+    return false;
+}
+
 static bool refuse_part(struct gas_piece part, struct gas_refusal *refusal)
 {
     char shown[80];
@@ -93,7 +102,11 @@ static bool refuse_part(struct gas_piece part, struct gas_refusal *refusal)
     gas_quoted(shown, sizeof shown, part.at, part.length);
     if (part.length == 0)
         return gas_refuse(refusal, "gas", "a part of the mixture is blank; write name and fraction, such as N2 79.");
-    if (gas_species_find(part.at, part.length))
+    if (gas_refuse_blend(refusal, part))
+        return false;
+    if (has_comma_between(part))
+        return gas_refuse(refusal, "gas", "%s has a comma between parts; write + there, such as N2 79 + O2 21.", shown);
+    if (gas_name_find(part.at, part.length))
         return gas_refuse(refusal, "gas", "%s has no fraction; write one behind the name, or \"rest\".", shown);
     if (gas_number_parse(part.at, part.length, &number, &used) && used == part.length)
         return gas_refuse(refusal, "gas", "%s has no name; write name and fraction, such as N2 79.", shown);
@@ -105,18 +118,46 @@ static bool read_part(struct gas_recipe *recipe, struct gas_piece part, struct g
     struct gas_component component;
     struct gas_marks marks;
     struct gas_piece name;
-    bool split = amount_last(part, &name, &component, &marks) && gas_species_find(name.at, name.length);
-    if (!split && gas_species_find(part.at, part.length)) /* "R 22" is a name, not 22 parts of R; "H2O 2" is water */
+    bool split = amount_last(part, &name, &component, &marks) && gas_name_find(name.at, name.length);
+    if (!split && gas_name_find(part.at, part.length)) /* "R 22" is a name, not 22 parts of R; "H2O 2" is water */
         return refuse_part(part, refusal);
     if (!amount_last(part, &name, &component, &marks) && !amount_first(part, &name, &component, &marks))
         return refuse_part(part, refusal);
     return gas_recipe_add(recipe, name, component, &marks, refusal);
 }
 
+/* One part alone, "N2 100 %": read as a mixture so that its figure is checked. */
+static bool has_amount(struct gas_piece text)
+{
+    struct gas_component component;
+    struct gas_marks marks;
+    struct gas_piece name;
+    return (amount_last(text, &name, &component, &marks) || amount_first(text, &name, &component, &marks)) &&
+           gas_name_find(name.at, name.length);
+}
+
+/* "O2 + N2": gases, and no figure anywhere. */
+static bool only_names(struct gas_piece text)
+{
+    size_t parts = 0;
+    while (text.length) {
+        struct gas_piece part = take_part(&text);
+        if (part.length && (!gas_name_find(part.at, part.length) || has_amount(part)))
+            return false;
+        parts += part.length > 0;
+    }
+    return parts > 1;
+}
+
 static bool read_mixture(struct gas_draft *draft, struct gas_piece text)
 {
     struct gas_recipe recipe = {0};
     struct gas_piece rest = text;
+    char shown[80];
+    if (only_names(text))
+        return gas_refuse(draft->refusal, "gas",
+                          "%s names gases without their fractions; write one behind each name, such as N2 79 + O2 21.",
+                          gas_quoted(shown, sizeof shown, text.at, text.length));
     while (rest.length) {
         struct gas_piece part = take_part(&rest);
         bool plus_follows = rest.at[-1] == '+';
@@ -130,22 +171,16 @@ static bool read_mixture(struct gas_draft *draft, struct gas_piece text)
     return gas_recipe_finish(&recipe, draft);
 }
 
-/* One part alone, "N2 100 %": read as a mixture so that its figure is checked. */
-static bool has_amount(struct gas_piece text)
-{
-    struct gas_component component;
-    struct gas_marks marks;
-    struct gas_piece name;
-    return (amount_last(text, &name, &component, &marks) || amount_first(text, &name, &component, &marks)) &&
-           gas_species_find(name.at, name.length);
-}
-
 bool gas_draft_text(struct gas_draft *draft, struct gas_piece text)
 {
-    if (gas_species_find(text.at, text.length))
+    if (gas_name_find(text.at, text.length))
         return gas_draft_name(draft, text);
+    if (gas_refuse_blend(draft->refusal, text))
+        return false;
     for (size_t i = 0; i < text.length; i++)
         if (separates(text, i))
             return read_mixture(draft, text);
-    return has_amount(text) ? read_mixture(draft, text) : gas_draft_name(draft, text);
+    if (has_amount(text))
+        return read_mixture(draft, text);
+    return has_comma_between(text) ? refuse_part(text, draft->refusal) : gas_draft_name(draft, text);
 }

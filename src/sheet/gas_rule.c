@@ -49,20 +49,21 @@ static bool read_figure(struct gas_rules *rules, const char *name, struct gas_pi
 
 static bool read_k(struct gas_rules *rules, struct gas_piece text)
 {
-    struct gas_unit unit;
+    struct gas_unit unit = {0};
     if (!one_cp(rules, GAS_CP_FROM_K) || !read_figure(rules, "k", text, &rules->k, &unit))
         return false;
     if (unit.text[0])
         return gas_refuse(rules->refusal, WHAT, "k is a ratio and has no unit.");
     if (!(rules->k > 1 && rules->k <= 2))
-        return gas_refuse(rules->refusal, WHAT, "k = %s cannot be cp/cv; it lies above 1 and not above 5/3 for a gas.",
+        return gas_refuse(rules->refusal, WHAT,
+                          "k = %s is no ratio cp/cv of a gas; those lie above 1 and at most at 5/3.",
                           gas_shown(rules->k).text);
     return true;
 }
 
 static bool read_M(struct gas_rules *rules, struct gas_piece text)
 {
-    struct gas_unit unit;
+    struct gas_unit unit = {0};
     double M;
     if (!once(rules, &rules->M_said, "M") || !read_figure(rules, "M", text, &M, &unit))
         return false;
@@ -84,7 +85,7 @@ bool gas_molar_mass_read(double figure, const struct gas_unit *unit, double *M, 
 
 static bool read_R(struct gas_rules *rules, struct gas_piece text)
 {
-    struct gas_unit unit;
+    struct gas_unit unit = {0};
     double figure;
     return once(rules, &rules->R_said, "R") && read_figure(rules, "R", text, &figure, &unit) &&
            gas_constant_read(figure, &unit, &rules->R, &rules->R_specific, rules->refusal);
@@ -277,6 +278,6 @@ bool gas_draft_rules(struct gas_draft *draft, struct gas_piece text)
         return gas_refuse_memory(draft->refusal);
     draft->rule = copy;
     if (rules.source)
-        draft->source = "as given with the gas";
+        draft->source = "as given with the gas", draft->source_key = "";
     return true;
 }

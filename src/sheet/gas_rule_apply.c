@@ -92,6 +92,8 @@ bool gas_constants_apply(struct gas_draft *draft, double M, double universal, do
         return true;
     }
     draft->gas.R = specific * M;
+    if (fabs(draft->gas.R - GAS_R) <= 1e-12 * GAS_R) /* R/M as GAS.CARD prints it */
+        draft->gas.R = GAS_R;
     if (fabs(draft->gas.R - GAS_R) > GAS_R_TOLERANCE * GAS_R)
         return gas_refuse(draft->refusal, "R",
                           "R and M together give %s J/(mol K), more than 1 %% away from 8.31446 J/(mol K); "

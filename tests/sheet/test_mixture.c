@@ -89,7 +89,9 @@ static const struct refused_row refused[] = {
     {"N2 79 +", "blank"},
     {"N2 79 + + O2 21", "blank"},
     {"+ N2 79", "blank"},
-    {"N2 + O2", "no fraction"},
+    {"N2 + O2", "without their fractions"},
+    {"N2 79, O2 21", "write +"},
+    {"natural gas 90 + N2 10", "CH4 92"},
     {"N2 1e999 + O2 21", "Check gas"},
     {"N2 seventy + O2 30", "cannot be read"},
     {";", "no parts"},
@@ -115,9 +117,37 @@ static void ranges_are_read(void)
         {"N2;60 wt%~CO2;40 wt%", (60 / 28.014) / (60 / 28.014 + 40 / 44.009)},
         {"N2;0,79~O2;rest", 0.79},
         {"N2;79~O2;21~He;0", 0.79},
+        {"N2;79~O2;21~total;100", 0.79},
+        {"mol %;~N2;79~O2;21", 0.79},
     };
     for (size_t i = 0; i < sizeof rows / sizeof *rows; i++) {
         const struct gas_choice *choice = case_block(2, rows[i].typed);
+        if (choice)
+            check_close(rows[i].typed, fraction_of(choice, "N2"), rows[i].x_N2, 2e-5, 0);
+        gas_choice_release(choice);
+    }
+}
+
+/* The same mixtures turned on their side, and with a column of units. */
+static void ranges_across_are_read(void)
+{
+    static const struct {
+        size_t columns;
+        const char *typed;
+        double x_N2;
+    } rows[] = {
+        {2, "N2;O2~79;21", 0.79},
+        {3, "N2;O2;Ar~78;21;1", 0.78},
+        {3, "gas;N2;O2~mol %;79;21", 0.79},
+        {4, "gas;N2;O2;total~mol %;79;21;100", 0.79},
+        {3, "gas;N2;CO2~wt %;60;40", (60 / 28.014) / (60 / 28.014 + 40 / 44.009)},
+        {2, "N2;O2~0.79;rest", 0.79},
+        {3, "N2;79;mol %~O2;21;mol %", 0.79},
+        {3, "component;fraction;unit~N2;60;wt %~CO2;40;wt %", (60 / 28.014) / (60 / 28.014 + 40 / 44.009)},
+        {2, "N2;O2~79;21~mol %;mol %", 0.79},
+    };
+    for (size_t i = 0; i < sizeof rows / sizeof *rows; i++) {
+        const struct gas_choice *choice = case_block(rows[i].columns, rows[i].typed);
         if (choice)
             check_close(rows[i].typed, fraction_of(choice, "N2"), rows[i].x_N2, 2e-5, 0);
         gas_choice_release(choice);
@@ -133,6 +163,13 @@ static void wrong_ranges_are_refused(void)
     case_block_refused(2, "N2;79~nitrogn;21", "nitrogen (N2)");
     case_block_refused(2, "mass;mol %~N2;79~O2;21", "both a mass and a mole");
     case_block_refused(2, "N2;79~O2;-1", "below zero");
+    case_block_refused(2, "N2;79~O2;21~total;98", "total of the mixture says 98");
+    case_block_refused(2, "N2;79~;21", "row 2 of the mixture has no component");
+    case_block_refused(3, "N2;79;bar~O2;21;", "\"bar\" beside a fraction");
+    case_block_refused(3, "N2;79;5~O2;21;", "second number");
+    case_block_refused(3, "N2;79;mol %~O2;21;wt %", "one basis");
+    case_block_refused(3, "N2;O2;CO~78;21;x", "column 3");
+    case_block_refused(1, "N2~O2", "2 rows and 1 column;");
     case_block_refused(2, "~;", "no parts");
     case_block_refused(4, "N2;79;;~O2;21;;", "4 columns");
     case_block_refused(2, "N2;79~Check T1: 12 K is too cold.;21", "Check T1: 12 K");
@@ -195,6 +232,7 @@ const struct test_suite suite_mixture = {"mixture",
                                          (const struct test_case[]){{"texts", texts_are_read},
                                                                     {"wrong texts", wrong_texts_are_refused},
                                                                     {"ranges", ranges_are_read},
+                                                                    {"ranges across", ranges_across_are_read},
                                                                     {"wrong ranges", wrong_ranges_are_refused},
                                                                     {"heat", heat_is_the_sum_of_the_parts},
                                                                     {"range", the_range_is_the_shared_one},
