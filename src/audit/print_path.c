@@ -82,7 +82,7 @@ static void print_leg(struct print *print, const struct gas_path_case *path, siz
     const struct gas_change *change = &path->change[index];
     const struct process_words *words = &processes[leg->process];
     const struct gas_typed_legs *typed = print->job->legs;
-    bool flow = print->job->options.system == GAS_FLOW, wired = leg->process == GAS_ADIABATIC;
+    bool flow = print->job->options.system == GAS_FLOW, by_cp = leg->process == GAS_ADIABATIC;
     bool machine = leg->process == GAS_POLYTROPIC && isnan(leg->n);
     snprintf(quantity, sizeof quantity, "T%zu, end of leg %zu", index + 2, index + 1);
     struct line *line = print_step(print, quantity, end_words(leg, formula), change->end.T, "K",
@@ -95,7 +95,7 @@ static void print_leg(struct print *print, const struct gas_path_case *path, siz
                  machine ? "W = dH = n times the integral of cp dT"
                  : flow  ? words->flow
                          : words->closed,
-                 change->W, wired || machine);
+                 change->W, by_cp || machine);
     print_energy(print, path, index, "Q", machine ? "Q = 0" : words->heat, change->Q, words->cp && change->Q != 0);
 }
 

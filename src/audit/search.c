@@ -202,7 +202,9 @@ static void name_best(struct hunt *hunt)
 {
     struct audited *row = hunt->row;
     for (size_t i = 0; i < hunt->kept && row->count < NAMED; i++) {
-        bool named = false;
+        /* one rounded constant is enough: two that do the same say nothing more */
+        bool named = row->count && is_rounding(hunt->audit, row->explanation[0].part[0]) &&
+                     row->explanation[0].part[1] < 0 && hunt->best[i].part[1] >= 0;
         for (size_t k = 0; k < row->count; k++)
             named = named || contains(&hunt->best[i], &row->explanation[k]);
         if (!named)
@@ -231,28 +233,52 @@ static bool read_case(const struct audit *audit, size_t index, struct desk_case 
     return desk_read(audit->desk, index, truth, &refusal);
 }
 
-/* Does an explanation of one case fit every case that differs? */
-static bool holds(struct hunt *hunt, const struct explanation *explanation)
+/* How well an explanation fits every case that differs: the product of its fits, 0 when there is one that it does not
+ * fit. A slip that was really made fits each within half a unit; one that comes near does not for long. */
+static double holds(struct hunt *hunt, const struct explanation *explanation)
 {
     struct audit *audit = hunt->audit;
     struct desk_case *truth = &hunt->truth;
-    for (size_t i = 0; i < audit->rows; i++)
-        if (differs(&audit->row[i]) &&
-            !(read_case(audit, i, truth) && fit(&audit->row[i], audit_figure(audit, truth, explanation->part)) > 0))
-            return false;
-    return true;
+    double product = 1;
+    for (size_t i = 0; i < audit->rows && product > 0; i++)
+        if (differs(&audit->row[i]))
+            product *=
+                read_case(audit, i, truth) ? fit(&audit->row[i], audit_figure(audit, truth, explanation->part)) : 0;
+    return product;
 }
 
-/* Explanations of the first case that differs, those that hold for all of them. */
+/* Without those that only add something to one before them. */
+static size_t leave_out_longer(struct explanation *list, size_t count)
+{
+    size_t kept = 0;
+    for (size_t i = 0; i < count; i++) {
+        bool longer = false;
+        for (size_t k = 0; k < kept; k++)
+            longer = longer || contains(&list[i], &list[k]);
+        if (!longer)
+            list[kept++] = list[i];
+    }
+    return kept;
+}
+
+/* Explanations of the first case that differs, those that hold for all of them, likeliest first. */
 static size_t find_common(struct hunt *hunt, struct explanation common[NAMED])
 {
     size_t count = 0;
-    for (size_t i = 0; i < hunt->kept && count < NAMED; i++)
-        if (holds(hunt, &hunt->best[i])) {
-            common[count] = hunt->best[i];
-            common[count++].everywhere = true;
-        }
-    return count;
+    for (size_t i = 0; i < hunt->kept; i++) {
+        struct explanation new = hunt->best[i];
+        new.score = holds(hunt, &new) * likelihood(hunt->audit, new.part);
+        new.everywhere = true;
+        if (!(new.score > 0))
+            continue;
+        size_t place = count < NAMED ? count++ : NAMED;
+        for (; place > 0 && common[place - 1].score < new.score; place--)
+            if (place < NAMED)
+                common[place] = common[place - 1];
+        if (place < NAMED)
+            common[place] = new;
+    }
+    return leave_out_longer(common, count);
 }
 
 /* No slip holds for all: those that fit many cases are likelier than those that fit one. */

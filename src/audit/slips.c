@@ -18,7 +18,7 @@
     READ(id, REFERENCE, EVERYWHERE, likelihood, "reference conditions " name, "referred to " name, "answer referred to " name, read_reference, index)
 #define SIZE(id, likelihood, name, factor) \
     READ(id, FACTOR, GIVENS, likelihood, name, name, name, read_factor, factor), \
-    READ(id " answer", FACTOR, WANTED, likelihood, "answer " name, "answer " name, "answer " name, read_factor, 1 / (factor))
+    READ(id " answer", FACTOR, WANTED, likelihood, "answer " name, "answer " name, "answer " name, read_factor, 1. / (factor))
 
 /* THE table of slips. Likelihoods: common practice. */
 static const struct slip table[] = {

@@ -33,13 +33,13 @@ double verdict_deviation(const struct audited *row)
     return row->truth == 0 ? NAN : 100 * (row->legacy.figure - row->truth) / fabs(row->truth);
 }
 
-void verdict_slips(struct audit *audit, size_t row, const struct explanation *explanation, char *buffer, size_t size)
+void verdict_slips(struct audit *audit, size_t index, const struct explanation *explanation, char *buffer, size_t size)
 {
     struct desk_case truth;
     struct gas_refusal refusal = {.made = true};
     struct writer writer = {buffer, size};
     buffer[0] = '\0';
-    if (!desk_read(audit->desk, row, &truth, &refusal))
+    if (!desk_read(audit->desk, index, &truth, &refusal))
         return;
     for (size_t i = 0; i < TOGETHER && explanation->part[i] >= 0; i++) {
         char words[200];
@@ -85,7 +85,15 @@ static void write_explanations(struct writer *writer, struct audit *audit, size_
     write_words(writer, ".");
 }
 
-static void write_against(struct writer *writer, struct audit *audit, const struct audited *row)
+static void write_pair(struct writer *writer, const struct audit *audit, const struct audited *row)
+{
+    write_figure(writer, row, row->legacy.figure);
+    write_words(writer, " against ");
+    write_figure(writer, row, row->truth);
+    write_unit(writer, audit);
+}
+
+static void write_difference(struct writer *writer, const struct audit *audit, const struct audited *row)
 {
     char percent[40];
     double deviation = verdict_deviation(row);
@@ -94,11 +102,19 @@ static void write_against(struct writer *writer, struct audit *audit, const stru
         write_words(writer, "differs: ");
     else
         write_words(writer, "differs by %s%s %%: ", deviation > 0 ? "+" : "", percent);
-    write_figure(writer, row, row->legacy.figure);
-    write_words(writer, " against ");
+    write_pair(writer, audit, row);
+    write_words(writer, ". ");
+}
+
+static void write_agreement(struct writer *writer, const struct audit *audit, const struct audited *row)
+{
+    write_words(writer, "agrees: ");
     write_figure(writer, row, row->truth);
     write_unit(writer, audit);
-    write_words(writer, ". ");
+    if (row->legacy.digits == 1)
+        write_words(writer, " (within its own digit)");
+    else
+        write_words(writer, " (within its own %d digits)", row->legacy.digits);
 }
 
 void verdict_text(struct audit *audit, size_t index, char *buffer, size_t size)
@@ -114,28 +130,21 @@ void verdict_text(struct audit *audit, size_t index, char *buffer, size_t size)
         write_words(&writer, "no figure to check");
         break;
     case AUDIT_AGREES:
-        write_words(&writer, "agrees: ");
-        write_figure(&writer, row, row->truth);
-        write_unit(&writer, audit);
-        write_words(&writer, row->legacy.digits == 1 ? " (within its own digit)" : " (within its own %d digits)",
-                    row->legacy.digits);
+        write_agreement(&writer, audit, row);
         break;
     case AUDIT_ROUNDING:
         write_words(&writer, "rounded constant, not an error: ");
-        write_figure(&writer, row, row->legacy.figure);
-        write_words(&writer, " against ");
-        write_figure(&writer, row, row->truth);
-        write_unit(&writer, audit);
+        write_pair(&writer, audit, row);
         write_words(&writer, ": ");
         write_explanations(&writer, audit, index);
         break;
     case AUDIT_EXPLAINED:
-        write_against(&writer, audit, row);
+        write_difference(&writer, audit, row);
         write_words(&writer, row->explanation[0].part[1] < 0 ? "Likely: " : "Possibly, together: ");
         write_explanations(&writer, audit, index);
         break;
     case AUDIT_DIFFERS:
-        write_against(&writer, audit, row);
+        write_difference(&writer, audit, row);
         write_words(&writer, "No known slip gives this figure.");
         break;
     }
