@@ -185,6 +185,13 @@ static const struct gas_function rows[] = {
       CHECKED_LEGS, HEADINGS, OPTIONS},
      "GAS.WORKING(\"N2\";\"7 bar(g); 35 °C; 12 m3\";\"m, kg\")", "step"},
 
+    {"GAS.MIX", "mix", gas_fn_mix,
+     "Streams or vessel contents mixed without heat: temperature, pressure, amounts, composition, entropy made",
+     {{"streams", "Range with the heading row gas, P, T and one of m, n, V (vessels) or a flow (streams), then a row each", false, GAS_PARAMETER_ANY},
+      {"wanted", "Headings of what is asked: T, P, n, m, V, v, rho, M, S made; left out: a card with the composition", true, GAS_PARAMETER_ANY},
+      {"options", "Text of options: outlet 2 bar for streams (left out: the lowest inlet pressure); barometer 0.98 bar", true, GAS_PARAMETER_ANY}},
+     "GAS.MIX({\"gas\";\"P, bar\";\"T, K\";\"n, mol\"|\"Ar\";1;300;1|\"He\";1;400;3};\"T, K\")", "375.0"},
+
     {"GAS.Z", "z", gas_fn_z,
      "Compressibility factor, estimated by Lee and Kesler's correlation, for mixtures with their own mixing rule",
      {THE_GAS, TEMPERATURE,

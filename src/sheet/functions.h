@@ -28,6 +28,7 @@ gas_entry gas_fn_fill;    /* fn_vessel.c */
 gas_entry gas_fn_vent;    /* fn_vessel.c */
 gas_entry gas_fn_z;       /* fn_real.c */
 gas_entry gas_fn_valid;   /* fn_real.c */
+gas_entry gas_fn_mix;     /* fn_mix.c */
 gas_entry gas_fn_faults;  /* fn_desk.c */
 gas_entry gas_fn_given;   /* fn_desk.c */
 gas_entry gas_fn_solve;   /* fn_solve.c */
