@@ -31,7 +31,7 @@ static void product_sides(const struct run *run, const struct gas_step *check, d
     double side[2] = {1, 1};
     for (int s = 0; s < 1 + row->pair; s++)
         for (int i = 0; i < row->count; i++) {
-            int variable = row->factor[i].variable, exponent = row->factor[i].exponent;
+            int variable = (int)row->factor[i].variable, exponent = (int)row->factor[i].exponent;
             double x = of(run, s == 0 ? check->state_a : check->state_b, (enum gas_variable)variable);
             if (row->pair && run->plan->shared[variable])
                 continue;

@@ -83,7 +83,7 @@ static void follow_steps(const struct gas_plan *plan, struct slopes *slopes)
         const struct gas_step *step = &plan->step[i];
         int target = plan->slot[step->target_state][step->target];
         struct relation_term term[2 * RELATION_FACTORS];
-        double slope[2 * RELATION_FACTORS], own = 1;
+        double slope[2 * RELATION_FACTORS] = {0}, own = 1;
         int count = relation_slopes(plan, step, term, slope);
         for (int k = 0; k < count && !known[target]; k++)
             own = term[k].slot == target ? slope[k] : own;

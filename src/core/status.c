@@ -1,7 +1,7 @@
 #include <gasleaf/status.h>
 
 static const char *const words[] = {
-#define WORDS(name, class, text) [GAS_##name] = text,
+#define WORDS(name, class, text) [GAS_##name] = (text),
     GAS_STATUS_LIST(WORDS)
 #undef WORDS
 };

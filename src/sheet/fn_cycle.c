@@ -108,7 +108,7 @@ static bool answer_cycle(struct gas_path_call *path, struct gas_call *call)
     if (!gas_answer_block(call, wanted->down ? wanted->columns : 1, wanted->down ? 1 : wanted->columns))
         return true;
     for (size_t i = 0; i < wanted->columns; i++) {
-        double si;
+        double si = NAN;
         if (!cycle_quantity(path, &solved, &cycle, &wanted->heading[i], &si, &path->refusal))
             return false;
         gas_put_number(call, wanted->down ? i : 0, wanted->down ? 0 : i,

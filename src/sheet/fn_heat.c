@@ -152,8 +152,8 @@ static void refuse_result(struct heat_call *heat, const struct gas_result *resul
 
 static void answer_cell(struct heat_call *heat, struct gas_call *call, size_t row, size_t column)
 {
-    struct gas_reading reading[INPUTS];
-    double figure[INPUTS];
+    struct gas_reading reading[INPUTS] = {0};
+    double figure[INPUTS] = {0};
     heat->refusal.made = false;
     for (size_t i = 0; i < heat->inputs; i++) {
         if (!gas_input_read(&heat->input[i], row, column, &reading[i], &heat->refusal))

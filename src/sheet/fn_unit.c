@@ -107,7 +107,7 @@ static bool convert(const struct gas_cell *cell, const struct side *from, const 
 void gas_fn_unit(struct gas_call *call)
 {
     struct gas_refusal refusal = {0};
-    struct side from, to;
+    struct side from = {0}, to = {0};
     double barometer = GAS_ATMOSPHERE;
     const struct gas_block *value = gas_argument(call, 0);
     if (gas_omitted(value))

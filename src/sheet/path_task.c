@@ -45,6 +45,15 @@ bool gas_path_open(struct gas_job *job, struct gas_typed_legs *legs, const struc
     return gas_job_tell_extent(job, refusal);
 }
 
+/* The figures a leg can have, one after the other. */
+enum { FIGURES = 5 };
+static const struct gas_leg_figure *figure_at(const struct gas_typed_leg *leg, size_t index)
+{
+    const struct gas_leg_figure *const figures[FIGURES] = {&leg->value, &leg->second, &leg->n, &leg->efficiency,
+                                                           &leg->outside};
+    return figures[index];
+}
+
 static bool column_is_there(const struct gas_job *job, const struct gas_typed_leg *leg, size_t number,
                             const struct gas_leg_figure *figure, struct gas_refusal *refusal)
 {
@@ -64,9 +73,8 @@ static bool columns_are_there(const struct gas_job *job, struct gas_refusal *ref
     const struct gas_typed_legs *legs = legs_of(job);
     for (size_t i = 0; i < legs->count; i++) {
         const struct gas_typed_leg *leg = &legs->leg[i];
-        const struct gas_leg_figure *figures[] = {&leg->value, &leg->second, &leg->n, &leg->efficiency, &leg->outside};
-        for (size_t k = 0; k < sizeof figures / sizeof *figures; k++)
-            if (!column_is_there(job, leg, i + 1, figures[k], refusal))
+        for (size_t k = 0; k < FIGURES; k++)
+            if (!column_is_there(job, leg, i + 1, figure_at(leg, k), refusal))
                 return false;
     }
     return true;
@@ -181,14 +189,13 @@ static bool refuse_figure(const struct gas_job *job, const struct gas_case *figu
 /* Is a given column the figure of some leg? */
 static bool used_by_legs(const struct gas_typed_legs *legs, const struct gas_heading *heading)
 {
-    for (size_t i = 0; i < legs->count; i++) {
-        const struct gas_typed_leg *leg = &legs->leg[i];
-        const struct gas_leg_figure *figures[] = {&leg->value, &leg->second, &leg->n, &leg->efficiency, &leg->outside};
-        for (size_t k = 0; k < sizeof figures / sizeof *figures; k++)
-            if (figures[k]->kind == GAS_FIGURE_COLUMN && figures[k]->symbol == heading->symbol &&
-                figures[k]->state == heading->state)
+    for (size_t i = 0; i < legs->count; i++)
+        for (size_t k = 0; k < FIGURES; k++) {
+            const struct gas_leg_figure *figure = figure_at(&legs->leg[i], k);
+            if (figure->kind == GAS_FIGURE_COLUMN && figure->symbol == heading->symbol &&
+                figure->state == heading->state)
                 return true;
-    }
+        }
     return false;
 }
 

@@ -52,7 +52,8 @@ bool gas_refuse(struct gas_refusal *refusal, const char *what, const char *forma
     size_t room = sizeof refusal->text - (size_t)used;
     va_list values;
     va_start(values, format);
-    int needed = vsnprintf(refusal->text + used, room, format, values);
+    int needed =
+        vsnprintf(refusal->text + used, room, format, values); /* NOLINT(clang-analyzer-valist.*): started above */
     va_end(values);
     if (needed >= 0 && (size_t)needed >= room)
         end_early(refusal->text, sizeof refusal->text);

@@ -56,11 +56,17 @@ static uint64_t hash_text(const char *text, size_t length)
     return hash ^ hash >> 29;
 }
 
+static bool same_references(const struct gas_references *a, const struct gas_references *b)
+{
+    return a->normal_T == b->normal_T && a->normal_P == b->normal_P && a->standard_T == b->standard_T &&
+           a->standard_P == b->standard_P && a->scf_T == b->scf_T && a->scf_P == b->scf_P;
+}
+
 static bool same(const struct entry *entry, uint64_t hash, const char *text, size_t length,
                  const struct gas_references *references)
 {
     return entry->hash == hash && entry->length == length && memcmp(entry->text, text, length) == 0 &&
-           memcmp(&entry->references, references, sizeof *references) == 0;
+           same_references(&entry->references, references);
 }
 
 static bool fits(size_t length, size_t size)
