@@ -39,7 +39,7 @@ TEST_SRC    := $(wildcard tests/support/*.c) $(filter-out tests/fuzz/test_%,$(wi
 GLUE_SRC    := $(wildcard tests/support/*.c) $(wildcard tests/glue/*.c) $(filter-out %/main.c,$(call sources,generate))
 suites = $(patsubst test_%.c,suite_%,$(filter test_%,$(notdir $(1))))
 
-.PHONY: audit-report bench all check test demo deps generate install lint valgrind clean help glue tools sdk checks
+.PHONY: audit-report bench all check test demo deps generate install lint valgrind fuzz sanitize races clean help glue tools sdk checks
 all: $(OXT) ## build the extension, build/gasleaf.oxt
 
 help: ## print the targets
@@ -191,6 +191,17 @@ valgrind: $(BUILD)/tests/run $(BUILD)/tests/glue-run $(ADDIN) ## the suites and 
 	@tests/tools/deps.sh $(LINT_PACKAGES)
 	GASLEAF_ADDIN=$(ADDIN) $(MEMCHECK) $(BUILD)/tests/glue-run $(SUITE)
 	$(MEMCHECK) $(BUILD)/tests/run $(SUITE)
+
+# Each in a build directory of its own, without the warnings that the instrumented code alone gives. MOST_CALLS: how many calls the fuzzing makes.
+MOST_CALLS ?= 200000
+fuzz: $(BUILD)/tests/run ## call the functions MOST_CALLS times with arguments made from seeds
+	GASLEAF_FUZZ=$(MOST_CALLS) $(BUILD)/tests/run fuzz
+
+sanitize: ## the suites under the address and undefined-behaviour sanitizers
+	$(MAKE) BUILD=$(BUILD)/sanitize CC="$(CC) -fsanitize=address,undefined -fno-sanitize-recover=all" WARN="-std=c11 -w" check
+
+races: ## the fuzzing in several threads under the thread sanitizer
+	$(MAKE) BUILD=$(BUILD)/races CC="$(CC) -fsanitize=thread" WARN="-std=c11 -w" SUITE=fuzz check
 
 clean: ## remove what was built
 	rm -rf $(BUILD)

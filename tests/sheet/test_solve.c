@@ -263,7 +263,8 @@ static void sentences_say_what_to_do(void)
         const struct sentence_row *row = &sentences[i];
         const struct gas_cell *cell = answer_of(row->id, row->formula, row->row, row->column, &arena);
         if (cell && check_true(row->id, cell->kind == GAS_CELL_TEXT)) {
-            bool part = strncmp(row->sentence, "...", 3) == 0 || strchr(row->sentence, '\0')[-1] == ' ';
+            size_t length = strlen(row->sentence);
+            bool part = strncmp(row->sentence, "...", 3) == 0 || (length && row->sentence[length - 1] == ' ');
             if (part)
                 check_contains(row->id, cell->text, row->sentence + (row->sentence[0] == '.' ? 3 : 0));
             else
