@@ -26,7 +26,7 @@ static const char *bad_text(const char *text, size_t length)
         if ((*at == 0xE0 && at[1] < 0xA0) || (*at == 0xED && at[1] > 0x9F) || (*at == 0xF0 && at[1] < 0x90) ||
             (*at == 0xF4 && at[1] > 0x8F))
             return "text is not UTF-8";
-        if ((*at < ' ' && *at != '\n') || *at == 0x7F || (*at == 0xC2 && at[1] < 0xA0))
+        if ((*at < ' ' && *at != '\n' && *at != '\t') || *at == 0x7F || (*at == 0xC2 && at[1] < 0xA0))
             return "text holds a control character";
         at += bytes;
     }
@@ -44,14 +44,10 @@ static bool is_word(const char *text, const char *at, size_t length)
 static const char *bad_words(const char *text)
 {
     static const char *const words[] = {"nan", "-nan", "inf", "-inf", "NAN", "INF"};
-    static const char *const marks[] = {"(null)", "%s", "%g", "%d", "%z", "%%", "  ", ": :", "e+0", "e-0"};
+    static const char *const marks[] = {"(null)", "%s", "%g", "%d", "%z", "%%", ": :", "e+0", "e-0"};
     char plain[2000];
-    size_t used = 0, quotes = 0;
+    size_t used = 0;
     bool quoted = false;
-    for (const char *at = text; *at; at++)
-        quotes += *at == '"';
-    if (quotes % 2 || quotes > 4) /* the user's text has quotes of its own */
-        return NULL;
     for (const char *at = text; *at && used + 1 < sizeof plain; at++) {
         quoted = *at == '"' ? !quoted : quoted;
         if (!quoted)
@@ -68,7 +64,17 @@ static const char *bad_words(const char *text)
     return NULL;
 }
 
-static const char *bad_sentence(const struct gas_cell *cell)
+/* Quotes in the user's own words: what is quoted cannot be told. */
+static bool has_quotes(const struct gas_call *call)
+{
+    for (size_t a = 0; a < call->count; a++)
+        for (size_t i = 0; i < call->argument[a].rows * call->argument[a].columns; i++)
+            if (call->argument[a].cell[i].kind == GAS_CELL_TEXT && strchr(call->argument[a].cell[i].text, '"'))
+                return true;
+    return false;
+}
+
+static const char *bad_sentence(const struct gas_call *call, const struct gas_cell *cell)
 {
     if (cell->length >= SENTENCE_MOST)
         return "sentence is too long";
@@ -76,7 +82,7 @@ static const char *bad_sentence(const struct gas_cell *cell)
         return "sentence is too short";
     if (cell->text[cell->length - 1] != '.')
         return "sentence does not end with a full stop";
-    return bad_words(cell->text);
+    return has_quotes(call) ? NULL : bad_words(cell->text);
 }
 
 /* A text that came in may go out as it is. */
@@ -104,7 +110,7 @@ static const char *bad_cell(const struct gas_call *call, const struct gas_cell *
             return NULL;
         if (bad_text(cell->text, cell->length))
             return bad_text(cell->text, cell->length);
-        return gas_cell_is_sentence(cell) ? bad_sentence(cell) : strncmp(cell->text, "check", 5) ? NULL : "check";
+        return gas_cell_is_sentence(cell) ? bad_sentence(call, cell) : strncmp(cell->text, "check", 5) ? NULL : "check";
     case GAS_CELL_EMPTY:
     case GAS_CELL_NOT_AVAILABLE:
         return NULL;
@@ -114,14 +120,16 @@ static const char *bad_cell(const struct gas_call *call, const struct gas_cell *
     }
 }
 
-const char *fuzz_fault(const struct gas_call *call)
+const char *fuzz_fault(const struct gas_call *call, size_t *cell)
 {
     const struct gas_block *answer = &call->answer;
     const char *fault = NULL;
     if (answer->rows == 0 || answer->columns == 0 || !answer->cell)
         return "no answer";
-    for (size_t i = 0; i < answer->rows * answer->columns && !fault; i++)
+    for (size_t i = 0; i < answer->rows * answer->columns && !fault; i++) {
+        *cell = i;
         fault = bad_cell(call, &answer->cell[i]);
+    }
     return fault;
 }
 

@@ -29,8 +29,8 @@ struct gas_block fuzz_block(struct fuzz *fuzz, const char *parameter);
 uint64_t fuzz_bits(struct fuzz *fuzz);
 size_t fuzz_below(struct fuzz *fuzz, size_t limit);
 
-/* fuzz_fault - what is wrong with an answer of a call, NULL when nothing is. */
-const char *fuzz_fault(const struct gas_call *call);
+/* fuzz_fault - what is wrong with an answer of a call and in which cell, NULL when nothing is. */
+const char *fuzz_fault(const struct gas_call *call, size_t *cell);
 
 /* fuzz_hash - a number that tells answers apart. */
 uint64_t fuzz_hash(const struct gas_block *answer);

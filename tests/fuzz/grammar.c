@@ -220,6 +220,8 @@ static struct gas_cell text_cell(struct fuzz *fuzz, const char *const *texts)
 {
     const char *text = pick(fuzz, texts);
     size_t length = strlen(text);
+    if (strncmp(text, "Check ", 6) == 0) /* passed on as it is */
+        return (struct gas_cell){GAS_CELL_TEXT, 0, text, length};
     for (size_t turns = fuzz_below(fuzz, 3) == 0 ? 1 + fuzz_below(fuzz, 3) : 0; turns && text; turns--)
         text = mutate(fuzz, text, &length);
     if (text && fuzz_below(fuzz, 16) == 0)

@@ -38,10 +38,10 @@ static uint64_t hash_of(uint64_t seed, struct gas_arena *arena)
     return run(seed, arena, &call) ? fuzz_hash(&call.answer) : 0;
 }
 
-static void show(const struct gas_function *function, const struct gas_call *call)
+static void show(const struct gas_function *function, const struct gas_call *call, size_t first)
 {
     fuzz_show(stdout, function, call);
-    for (size_t i = 0; i < call->answer.rows * call->answer.columns && i < 20; i++) {
+    for (size_t i = first; i < call->answer.rows * call->answer.columns && i < first + 20; i++) {
         const struct gas_cell *cell = &call->answer.cell[i];
         printf("  %s%.17g\n", cell->kind == GAS_CELL_TEXT ? cell->text : "", cell->number);
     }
@@ -67,13 +67,14 @@ static void answers_are_fit(void)
         double begin = seconds();
         const struct gas_function *function = run(seed, &arena, &call);
         double took = seconds() - begin;
-        const char *fault = function ? fuzz_fault(&call) : "out of memory";
+        size_t where = 0;
+        const char *fault = function ? fuzz_fault(&call, &where) : "out of memory";
         if (took > slowest) {
             slowest = took;
             slow_seed = seed;
         }
         if (function && ((fault && faults++ < 20) || calls == 1))
-            show(function, &call);
+            show(function, &call, where);
         figures += function && !fault && call.answer.cell[0].kind == GAS_CELL_NUMBER;
         snprintf(id, sizeof id, "seed %zu, %s: %s", seed, function ? function->sheet_name : "", fault ? fault : "fit");
         check_true(id, !fault);
