@@ -62,7 +62,8 @@
     X(P_OUTSIDE,     "P outside",    "outside pressure",       PRESSURE)                   \
     X(STAGE_COUNT,   "stages",       "number of stages",       NUMBER)                     \
     X(Z,             "Z",            "compressibility factor", NUMBER)                     \
-    X(BAROMETER,     "barometer",    "barometer",              PRESSURE)
+    X(BAROMETER,     "barometer",    "barometer",              PRESSURE)                   \
+    X(ALTITUDE,      "altitude",     "altitude of the site",   LENGTH)
 /* clang-format on */
 
 enum gas_symbol {
@@ -113,6 +114,7 @@ struct gas_heading_fault {
  *              "V, Nm3" is an amount: symbol N. "n [-]" is the exponent, a bare "n" the amount. "m3" and "MW" are
  *              units; "m2" is the mass at state 2. "T in K" names the unit, "T in, K" the inlet. A basis in words
  *              ("Gauge pressure, bar") becomes the basis of the unit, whose text then shows it: "bar(g)".
+ *              "±m, %" keeps the symbol of its label; its unit is a plain number.
  *   Check      tests/units/test_heading.c
  */
 bool gas_heading_parse(const char *text, size_t length, const struct gas_references *references,

@@ -89,7 +89,9 @@ static void find_sites(struct desk *desk)
     desk->sites = 0;
     for (size_t i = 0; i < job->table.columns; i++) {
         const struct gas_heading *heading = &job->table.heading[i];
-        if (!heading->tolerance && heading->symbol != GAS_SYM_BAROMETER)
+        bool figure = heading->state != GAS_CONSTANT && heading->symbol != GAS_SYM_BAROMETER &&
+                      heading->symbol != GAS_SYM_ALTITUDE;
+        if (!heading->tolerance && figure)
             add_site(desk,
                      (struct site){SITE_GIVEN, (int)i, LEG_VALUE, heading->symbol, heading->state, &heading->unit});
     }

@@ -33,6 +33,7 @@ static const struct card_row {
     {"J/mol",       GAS_SYM_DH,         false, true},
     {"J/(mol·K)",   GAS_SYM_DS,         false, true},
     {"kg/kmol",     GAS_SYM_M_MOLAR,    false, true},
+    {"bar",         GAS_SYM_BAROMETER,  false, true},
 };
 /* clang-format on */
 enum { CARD_KINDS = sizeof card_rows / sizeof *card_rows, CARD_ROWS = (GAS_STATES + 1) * CARD_KINDS };
@@ -41,6 +42,7 @@ struct card {
     struct gas_job *job;
     struct gas_plan plan;
     bool heat;        /* a heat capacity is known */
+    bool spread;      /* a plus-minus is given: one more column */
     const char *time; /* what stands below the line in a flow: "h" */
     size_t rows;
     struct gas_heading row[CARD_ROWS];
@@ -95,6 +97,15 @@ static bool card_heading(const struct card *card, const struct card_row *row, in
     return like || default_unit(card, row, &heading->unit);
 }
 
+/* Does a reading stand on the barometer? */
+static bool reads_gauge(const struct gas_job *job)
+{
+    for (size_t i = 0; i < job->table.columns; i++)
+        if (job->table.heading[i].unit.basis != GAS_ABSOLUTE)
+            return true;
+    return false;
+}
+
 static bool follows(const struct card *card, const struct gas_heading *heading)
 {
     const struct gas_plan *plan = &card->plan;
@@ -112,6 +123,8 @@ static bool follows(const struct card *card, const struct gas_heading *heading)
                gas_plan_finds(plan, GAS_VAR_P, 1) && gas_plan_finds(plan, GAS_VAR_P, plan->states);
     case GAS_SYM_M_MOLAR:
         return true;
+    case GAS_SYM_BAROMETER:
+        return reads_gauge(card->job);
     case GAS_SYM_H_SPECIFIC:
     case GAS_SYM_U_SPECIFIC:
     case GAS_SYM_S_SPECIFIC:
@@ -155,6 +168,20 @@ static void lay_out(struct card *card)
     }
 }
 
+/* The plus-minus of a row, blank where it has none. */
+static void answer_spread(struct card *card, struct gas_call *call, size_t index, const struct gas_row *row)
+{
+    struct gas_job *job = card->job;
+    struct gas_refusal refusal = {0};
+    enum gas_variable variable;
+    double answer;
+    job->wanted.heading[0].tolerance = true;
+    gas_put_text(call, index + 1, 3, "");
+    if (gas_variable_of(&card->row[index], &variable) && gas_job_prepare(job, call->arena, &refusal) &&
+        gas_job_run(job, row, &answer, &refusal))
+        gas_put_number(call, index + 1, 3, answer);
+}
+
 /* One row of the card: the task is run for that heading alone, so that a figure outside the data spoils no other. */
 static void answer_row(struct card *card, struct gas_call *call, size_t index, const struct gas_row *row)
 {
@@ -171,6 +198,8 @@ static void answer_row(struct card *card, struct gas_call *call, size_t index, c
         gas_put_not_available(call, index + 1, 1);
     else
         gas_put_text(call, index + 1, 1, refusal.text);
+    if (card->spread)
+        answer_spread(card, call, index, row);
 }
 
 /* The givens must hold together before anything is shown of them. */
@@ -189,6 +218,8 @@ static bool open_card(struct card *card, struct gas_arena *arena, struct gas_row
         return false;
     card->plan = *plan;
     card->heat = job->gas.interval_count > 0;
+    for (size_t i = 0; i < job->table.columns; i++)
+        card->spread = card->spread || job->table.heading[i].tolerance;
     card->time = time_of(job);
     lay_out(card);
     return true;
@@ -204,11 +235,13 @@ static bool answer_card(struct gas_job *job, struct gas_call *call, struct gas_r
     card->job = job;
     if (!open_card(card, call->arena, &row, refusal))
         return false;
-    if (!gas_answer_block(call, card->rows + 1, 3))
+    if (!gas_answer_block(call, card->rows + 1, card->spread ? 4 : 3))
         return true;
     gas_put_text(call, 0, 0, "quantity");
     gas_put_text(call, 0, 1, "value");
     gas_put_text(call, 0, 2, "unit");
+    if (card->spread)
+        gas_put_text(call, 0, 3, "±");
     for (size_t i = 0; i < card->rows; i++)
         answer_row(card, call, i, &row);
     return true;

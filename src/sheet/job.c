@@ -3,6 +3,8 @@
 #include <math.h>
 #include <string.h>
 
+#include <gasleaf/species.h>
+
 /* -- totals and flows ---------------------------------------------------------------------------------------------- */
 
 /* clang-format off */
@@ -54,10 +56,12 @@ double gas_job_from_molar(const struct gas_job *job, enum gas_dimension molar, d
     return NAN;
 }
 
-/* A conductance is in W/K too, but no flow of anything. */
+/* A conductance is in W/K too, but no flow of anything; "V constant" is either. */
 static enum gas_extent heading_extent(const struct gas_heading *heading)
 {
-    return heading->symbol == GAS_SYM_UA ? GAS_EXTENT_NONE : gas_dimension_extent(heading->unit.dimension);
+    return heading->symbol == GAS_SYM_UA || heading->state == GAS_CONSTANT
+               ? GAS_EXTENT_NONE
+               : gas_dimension_extent(heading->unit.dimension);
 }
 
 static bool refuse_mixed(struct gas_refusal *refusal, const struct gas_heading *first, const struct gas_heading *second,
@@ -129,6 +133,8 @@ static bool options_belong(const struct gas_job *job, struct gas_refusal *refusa
         return gas_refuse(refusal, "options",
                           "isothermal, adiabatic and heat lost are options of FILL and VENT; in %s write a process.",
                           job->task->name);
+    if (job->options.open && !job->task->open)
+        return gas_refuse(refusal, "options", "open is an option of SOLVE; %s does not take it.", job->task->name);
     return !job->options.outlet_said ||
            gas_refuse(refusal, "options", "outlet is an option of MIX; %s does not take it.", job->task->name);
 }
@@ -138,7 +144,7 @@ bool gas_job_read(struct gas_job *job, const struct gas_job_arguments *arguments
     job->choice = NULL;
     job->own = NULL;
     job->extent = GAS_EXTENT_NONE;
-    job->barometer_column = -1;
+    job->barometer_column = job->altitude_column = -1;
     if (!gas_options_read(arguments->options, &job->options, refusal) || !options_belong(job, refusal))
         return false;
     job->choice = gas_choose(arguments->gas, refusal);
@@ -152,6 +158,9 @@ bool gas_job_read(struct gas_job *job, const struct gas_job_arguments *arguments
 bool gas_job_prepare(struct gas_job *job, struct gas_arena *arena, struct gas_refusal *refusal)
 {
     job->barometer_column = gas_job_column(job, GAS_SYM_BAROMETER, 0);
+    job->altitude_column = gas_job_column(job, GAS_SYM_ALTITUDE, 0);
+    if (job->barometer_column >= 0 && job->altitude_column >= 0)
+        return gas_refuse(refusal, "given", "the barometer is given twice, itself and by the altitude; leave one out.");
     return gas_job_tell_extent(job, refusal) && extent_of_wanted(job, refusal) &&
            job->task->prepare(job, arena, refusal);
 }
@@ -181,12 +190,23 @@ int gas_job_column(const struct gas_job *job, enum gas_symbol symbol, int state)
 
 int gas_job_tolerance_column(const struct gas_job *job, enum gas_symbol symbol, int state)
 {
+    int shared = -1;
     for (size_t i = 0; i < job->table.columns; i++) {
         const struct gas_heading *heading = &job->table.heading[i];
-        if (heading->symbol == symbol && heading->state == state && heading->tolerance)
+        if (heading->symbol != symbol || !heading->tolerance)
+            continue;
+        if (heading->state == state)
             return (int)i;
+        if (heading->state == 0)
+            shared = (int)i;
     }
-    return -1;
+    return shared;
+}
+
+bool gas_heading_is_share(const struct gas_heading *heading)
+{
+    return heading->tolerance && heading->unit.dimension == GAS_DIM_NUMBER &&
+           gas_symbol_dimension(heading->symbol) != GAS_DIM_NUMBER;
 }
 
 /* -- one case ------------------------------------------------------------------------------------------------------ */
@@ -207,6 +227,24 @@ static double to_si(const struct gas_job *job, const struct gas_case *figures, c
     return sign_of(job, heading) * gas_unit_to_si(&heading->unit, figure, figures->barometer);
 }
 
+static bool read_altitude(const struct gas_job *job, const struct gas_row *row, struct gas_case *figures,
+                          struct gas_refusal *refusal)
+{
+    char shown[80];
+    int column = job->altitude_column;
+    if (column < 0 || !(row->given >> column & 1))
+        return true;
+    const struct gas_unit *unit = &job->table.heading[column].unit;
+    struct gas_result P = gas_standard_atmosphere_pressure(gas_unit_to_si(unit, row->figure[column], 0));
+    if (P.status != GAS_OK)
+        return gas_refuse(refusal, "altitude",
+                          "%s is outside the standard atmosphere (-500 to 20000 m); give the "
+                          "barometer itself.",
+                          gas_figure(shown, sizeof shown, row->figure[column], unit));
+    figures->barometer = P.value;
+    return true;
+}
+
 /* The barometer read with this case, where the table has a column for it. */
 static bool read_barometer(const struct gas_job *job, const struct gas_row *row, struct gas_case *figures,
                            struct gas_refusal *refusal)
@@ -215,7 +253,7 @@ static bool read_barometer(const struct gas_job *job, const struct gas_row *row,
     int column = job->barometer_column;
     figures->barometer = job->options.barometer;
     if (column < 0 || !(row->given >> column & 1))
-        return true;
+        return read_altitude(job, row, figures, refusal);
     const struct gas_unit *unit = &job->table.heading[column].unit;
     double P = gas_unit_to_si(unit, row->figure[column], job->options.barometer);
     if (!(P >= GAS_BAROMETER_LEAST && P <= GAS_BAROMETER_MOST) || unit->basis != GAS_ABSOLUTE)
@@ -244,7 +282,7 @@ bool gas_job_case(const struct gas_job *job, const struct gas_row *row, struct g
     for (size_t i = 0; i < job->table.columns; i++) {
         const struct gas_heading *heading = &job->table.heading[i];
         figures->si[i] = NAN;
-        if (!(row->given >> i & 1))
+        if (!(row->given >> i & 1) || heading->state == GAS_CONSTANT)
             continue;
         double si = figures->si[i] = to_si(job, figures, heading, row->figure[i]);
         bool usual = si > 0 && si <= 1e300; /* nothing to complain about: no text is made */

@@ -27,10 +27,10 @@
 enum gas_extent { GAS_EXTENT_NONE, GAS_EXTENT_TOTAL, GAS_EXTENT_FLOW };
 
 /* One case in SI. si[i] belongs to table.heading[i]: absolute Pa, K, W and Q into the gas, plus-minus columns as
- * differences; NAN where not given. */
+ * differences or, in %, as shares of the figure; NAN where not given and of what is constant. */
 struct gas_case {
     const struct gas_row *row; /* as the user gave it: for sentences */
-    double barometer;          /* Pa: of the options, or of the case's own barometer column */
+    double barometer;          /* Pa: of the options, or of the case's own barometer or altitude */
     double si[GAS_COLUMNS];
 };
 
@@ -39,6 +39,7 @@ struct gas_job;
 struct gas_task {
     const char *name;   /* of the worksheet function, "SOLVE": for sentences */
     bool mixed_extents; /* totals may stand beside flows (a vessel's V and a line's flow) */
+    bool open;          /* the option `open` means something here; elsewhere it is refused */
     bool wall;          /* the options of a vessel's wall mean something here; elsewhere they are refused */
     /* prepare - once per call and after a change of headings: refuse givens and wanted that are not of this task,
      * compile the rest into job->own (from the arena). */
@@ -58,6 +59,7 @@ struct gas_job {
     struct gas_wanted wanted; /* columns may be 0: the function decides what that means */
     enum gas_extent extent;   /* of the givens */
     int barometer_column;     /* of `given`, -1: none */
+    int altitude_column;      /* the same in another dress: the barometer of the standard atmosphere there */
     const void *legs;         /* what else the function was given, set by it before gas_job_open; NULL for SOLVE */
     void *own;                /* the task's own */
 };
@@ -101,9 +103,13 @@ void gas_job_answer(const struct gas_job *job, struct gas_call *call);
 void gas_job_refused(struct gas_call *call, const struct gas_options *options, const struct gas_refusal *refusal);
 
 /* gas_job_column - the column of `given` that holds a symbol in a state (0: unnumbered), -1 when there is none.
- * Plus-minus columns are passed over; gas_job_tolerance_column finds only them. */
+ * Plus-minus columns are passed over; gas_job_tolerance_column finds only them. An unnumbered plus-minus is that of
+ * every reading of its symbol. */
 int gas_job_column(const struct gas_job *job, enum gas_symbol symbol, int state);
 int gas_job_tolerance_column(const struct gas_job *job, enum gas_symbol symbol, int state);
+
+/* gas_heading_is_share - a plus-minus in %: a share of the figure it belongs to. */
+bool gas_heading_is_share(const struct gas_heading *heading);
 
 /*
  * gas_job_from_molar - a figure per mole in the dimension a heading asks for: J/mol to J/kg, or to J or W with the

@@ -6,7 +6,7 @@
 #include <gasleaf/heat.h>
 
 /* How one wanted heading is answered from the solver's values. */
-enum answer_kind { VARIABLE, UNCERTAINTY, CP, CV, GAMMA, MOLAR_MASS, CHANGE_U, CHANGE_H, CHANGE_S };
+enum answer_kind { VARIABLE, UNCERTAINTY, CP, CV, GAMMA, MOLAR_MASS, CHANGE_U, CHANGE_H, CHANGE_S, BAROMETER };
 
 struct answer {
     enum answer_kind kind;
@@ -39,31 +39,96 @@ static size_t need(struct solve *solve, enum gas_variable variable, int state)
     return solve->needs++;
 }
 
-static bool accept_givens(const struct gas_job *job, struct gas_refusal *refusal)
+/* The figure that a plus-minus belongs to: in its state or, unnumbered, in any. */
+static const struct gas_heading *spread_of(const struct gas_job *job, const struct gas_heading *spread)
+{
+    for (size_t i = 0; i < job->table.columns; i++) {
+        const struct gas_heading *heading = &job->table.heading[i];
+        if (heading->symbol == spread->symbol && !heading->tolerance &&
+            (heading->state == spread->state || spread->state == 0))
+            return heading;
+    }
+    return NULL;
+}
+
+static bool share_has_sense(const struct gas_heading *share)
+{
+    switch (share->symbol) {
+    case GAS_SYM_P:
+    case GAS_SYM_V:
+    case GAS_SYM_N:
+    case GAS_SYM_M:
+    case GAS_SYM_V_SPECIFIC:
+    case GAS_SYM_RHO:
+    case GAS_SYM_BAROMETER:
+        return true;
+    default:
+        return false;
+    }
+}
+
+static bool refuse_share(const struct gas_heading *share, const char *what, struct gas_refusal *refusal)
+{
+    char shown[80];
+    const char *symbol = gas_symbol_text(share->symbol);
+    return gas_refuse(refusal, what,
+                      "%s has no sense in %%, its zero is arbitrary; write it with a unit, such as \"±%s%s\".",
+                      gas_quoted(shown, sizeof shown, share->text, strlen(share->text)), symbol,
+                      share->symbol == GAS_SYM_T ? ", K" : ", kJ/kg");
+}
+
+static bool accept_spread(const struct gas_job *job, const struct gas_heading *spread, struct gas_refusal *refusal)
 {
     char shown[80];
     enum gas_variable variable;
-    for (size_t i = 0; i < job->table.columns; i++) {
-        const struct gas_heading *heading = &job->table.heading[i];
-        gas_quoted(shown, sizeof shown, heading->text, strlen(heading->text));
-        if (heading->tolerance && gas_job_column(job, heading->symbol, heading->state) < 0)
-            return gas_refuse(refusal, "given", "%s is the plus-minus of a figure that is not given; give that too.",
-                              shown);
-        if (heading->tolerance || gas_variable_of(heading, &variable) || (int)i == job->barometer_column)
-            continue;
-        if (heading->symbol == GAS_SYM_W || heading->symbol == GAS_SYM_Q)
-            return gas_refuse(refusal, "given",
-                              "%s belongs to a process, not to a state; use PATH or WORK with a leg \"with %s = ...\".",
-                              shown, gas_symbol_text(heading->symbol));
-        if (heading->symbol == GAS_SYM_NONE)
-            return gas_refuse(refusal, "given",
-                              "%s does not say which quantity it is; write its symbol, such as \"H = "
-                              "12 kJ\".",
-                              shown);
+    const struct gas_heading *heading = spread_of(job, spread);
+    gas_quoted(shown, sizeof shown, spread->text, strlen(spread->text));
+    if (gas_heading_is_share(spread) && !share_has_sense(spread))
+        return refuse_share(spread, "given", refusal);
+    if (spread->symbol == GAS_SYM_BAROMETER)
+        return true;
+    if (!heading)
+        return gas_refuse(refusal, "given", "%s is the plus-minus of a figure that is not given; give that too.",
+                          shown);
+    if (!gas_variable_of(heading, &variable))
+        return gas_refuse(refusal, "given",
+                          "%s is not used; a plus-minus is taken of P, T, V, n, m, v, rho, h, u, s, "
+                          "H, U, S and the barometer.",
+                          shown);
+    return true;
+}
+
+static bool refuse_given(const struct gas_heading *heading, struct gas_refusal *refusal)
+{
+    char shown[80];
+    gas_quoted(shown, sizeof shown, heading->text, strlen(heading->text));
+    switch (heading->symbol) {
+    case GAS_SYM_W:
+    case GAS_SYM_Q:
+        return gas_refuse(refusal, "given",
+                          "%s belongs to a process, not to a state; use PATH or WORK with a leg \"with %s = ...\".",
+                          shown, gas_symbol_text(heading->symbol));
+    case GAS_SYM_NONE:
+        return gas_refuse(refusal, "given",
+                          "%s does not say which quantity it is; write its symbol, such as \"H = 12 kJ\".", shown);
+    default:
         return gas_refuse(refusal, "given",
                           "%s is not a quantity of a state; SOLVE takes P, T, V, n, m, v, rho, h, u, s, "
                           "H, U and S.",
                           shown);
+    }
+}
+
+static bool accept_givens(const struct gas_job *job, struct gas_refusal *refusal)
+{
+    enum gas_variable variable;
+    for (size_t i = 0; i < job->table.columns; i++) {
+        const struct gas_heading *heading = &job->table.heading[i];
+        bool time = heading->symbol == GAS_SYM_TIME && !job->table.one_case; /* of a reading: changes nothing */
+        if (heading->tolerance ? !accept_spread(job, heading, refusal)
+                               : !gas_variable_of(heading, &variable) && (int)i != job->barometer_column &&
+                                     (int)i != job->altitude_column && !time && !refuse_given(heading, refusal))
+            return false;
     }
     return true;
 }
@@ -114,9 +179,9 @@ static bool want_change(struct solve *solve, const struct gas_job *job, struct a
         answer->P2 = need(solve, GAS_VAR_P, answer->state);
     }
     answer->total = gas_dimension_extent(heading->unit.dimension) != GAS_EXTENT_NONE;
-    if (answer->total && amount_is_numbered(job))
+    if (answer->total && (job->options.open || amount_is_numbered(job)))
         return gas_refuse(refusal, "wanted",
-                          "%s is for one amount of gas, but amounts of single states are given; ask "
+                          "%s is for one amount of gas, but each state has its own here; ask "
                           "for it per mass or mole, such as %s, kJ/kg.",
                           gas_symbol_text(heading->symbol), gas_symbol_text(heading->symbol));
     if (answer->total)
@@ -148,6 +213,24 @@ static bool refuse_wanted(const struct gas_heading *heading, struct gas_refusal 
     }
 }
 
+/* "±m, %" names its variable by the symbol alone. */
+static bool want_share(struct solve *solve, struct answer *answer, const struct gas_heading *heading,
+                       struct gas_refusal *refusal)
+{
+    static const struct {
+        enum gas_symbol symbol;
+        enum gas_variable variable;
+    } shares[] = {{GAS_SYM_P, GAS_VAR_P},    {GAS_SYM_V, GAS_VAR_V},     {GAS_SYM_N, GAS_VAR_N},
+                  {GAS_SYM_M, GAS_VAR_MASS}, {GAS_SYM_RHO, GAS_VAR_RHO}, {GAS_SYM_V_SPECIFIC, GAS_VAR_V_MOLAR}};
+    for (size_t i = 0; i < sizeof shares / sizeof *shares; i++)
+        if (shares[i].symbol == heading->symbol) {
+            answer->kind = UNCERTAINTY;
+            answer->need = need(solve, shares[i].variable, heading->state);
+            return true;
+        }
+    return refuse_share(heading, "wanted", refusal);
+}
+
 static bool want(struct solve *solve, const struct gas_job *job, struct answer *answer,
                  const struct gas_heading *heading, struct gas_refusal *refusal)
 {
@@ -157,6 +240,8 @@ static bool want(struct solve *solve, const struct gas_job *job, struct answer *
         answer->need = need(solve, variable, heading->state);
         return true;
     }
+    if (gas_heading_is_share(heading))
+        return want_share(solve, answer, heading, refusal);
     if (heading->tolerance)
         return gas_refuse(refusal, "wanted",
                           "an uncertainty is found for P, T, V, n, m, v, rho, h, u, s, H, U and S only.");
@@ -168,6 +253,9 @@ static bool want(struct solve *solve, const struct gas_job *job, struct answer *
     case GAS_SYM_M_MOLAR:
         answer->kind = MOLAR_MASS;
         return true;
+    case GAS_SYM_BAROMETER:
+        answer->kind = BAROMETER;
+        return true;
     case GAS_SYM_DU:
     case GAS_SYM_DH:
     case GAS_SYM_DS:
@@ -175,6 +263,19 @@ static bool want(struct solve *solve, const struct gas_job *job, struct answer *
     default:
         return refuse_wanted(heading, refusal);
     }
+}
+
+/* Whoever asks for m1 and m2 numbers the amounts, as by giving them. */
+static enum gas_amounts amounts_of(const struct gas_job *job)
+{
+    enum gas_variable variable;
+    if (job->options.open)
+        return GAS_AMOUNTS_OPEN;
+    for (size_t i = 0; i < job->wanted.columns; i++)
+        if (job->wanted.heading[i].state > 0 && gas_variable_of(&job->wanted.heading[i], &variable) &&
+            (variable == GAS_VAR_N || variable == GAS_VAR_MASS))
+            return GAS_AMOUNTS_ASKED;
+    return GAS_AMOUNTS_SAME;
 }
 
 static bool prepare(struct gas_job *job, struct gas_arena *arena, struct gas_refusal *refusal)
@@ -190,6 +291,8 @@ static bool prepare(struct gas_job *job, struct gas_arena *arena, struct gas_ref
         if (!want(solve, job, &solve->answer[i], &job->wanted.heading[i], refusal))
             return false;
     solve->solver = gas_solver_open(job, 0, solve->need, solve->needs, arena, refusal);
+    if (solve->solver)
+        gas_solver_amounts(solve->solver, amounts_of(job));
     return solve->solver != NULL;
 }
 
@@ -248,8 +351,10 @@ static bool run(const struct gas_job *job, const struct gas_case *figures, doubl
             answers[i] = value[answer->need];
         else if (answer->kind == MOLAR_MASS)
             answers[i] = job->gas.molar_mass;
+        else if (answer->kind == BAROMETER)
+            answers[i] = figures->barometer;
         else if (answer->kind == UNCERTAINTY)
-            good = gas_solver_uncertainty(solve->solver, job, figures, answer->need, &answers[i], refusal);
+            good = gas_solver_uncertainty(solve->solver, job, figures, answer->need, heading, &answers[i], refusal);
         else if (answer->kind <= GAMMA)
             good = heat_capacity(job, answer, heading, value[answer->T1], &answers[i], refusal);
         else
@@ -260,4 +365,4 @@ static bool run(const struct gas_job *job, const struct gas_case *figures, doubl
     return true;
 }
 
-const struct gas_task gas_task_solve = {.name = "SOLVE", .prepare = prepare, .run = run};
+const struct gas_task gas_task_solve = {.name = "SOLVE", .open = true, .prepare = prepare, .run = run};

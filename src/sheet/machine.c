@@ -7,7 +7,7 @@
 
 static bool admitted(const struct gas_heading *heading, const struct gas_admitted *list, size_t count)
 {
-    for (size_t i = 0; i < count; i++)
+    for (size_t i = 0; i < count && heading->state != GAS_CONSTANT; i++)
         if (list[i].symbol == heading->symbol && (list[i].states >> heading->state & 1))
             return true;
     return false;
@@ -19,7 +19,8 @@ bool gas_admit_givens(const struct gas_job *job, const struct gas_admitted *list
     char shown[GAS_SHOWN];
     for (size_t i = 0; i < job->table.columns; i++) {
         const struct gas_heading *heading = &job->table.heading[i];
-        bool taken = admitted(heading, list, count) || (int)i == job->barometer_column || (also >> i & 1);
+        bool taken = admitted(heading, list, count) || (int)i == job->barometer_column ||
+                     (int)i == job->altitude_column || (also >> i & 1);
         if (taken && !heading->tolerance)
             continue;
         gas_quoted(shown, sizeof shown, heading->text, strlen(heading->text));

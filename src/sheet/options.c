@@ -84,6 +84,7 @@ static bool read_conditions(struct reader *reader, double *T, double *P)
 static bool read_barometer(struct reader *reader)
 {
     double P = NAN;
+    reader->options->barometer = 0; /* a gauge reading of the barometer itself is none: refused below */
     if (!read_figure(reader, reader->rest, GAS_DIM_PRESSURE, &P))
         return false;
     if (!(P >= GAS_BAROMETER_LEAST && P <= GAS_BAROMETER_MOST))
@@ -126,8 +127,15 @@ static bool read_flow(struct reader *reader)
     return true;
 }
 
+static bool read_open(struct reader *reader)
+{
+    reader->options->open = true;
+    return true;
+}
+
 static bool read_closed(struct reader *reader)
 {
+    reader->options->open = false;
     reader->options->system = GAS_CLOSED;
     return true;
 }
@@ -228,10 +236,12 @@ static const struct option {
 } table[] = {
     {"barometer at", true,  "barometer at 2400 m",     read_altitude},
     {"barometer",    true,  "barometer 0.98 bar",      read_barometer},
+    {"altitude",     true,  "altitude 2400 m",         read_altitude},
     {"work by gas",  false, "work by gas",             read_work_by},
     {"work on gas",  false, "work on gas",             read_work_on},
     {"flow",         false, "flow",                    read_flow},
     {"closed",       false, "closed",                  read_closed},
+    {"open",         false, "open",                    read_open},
     {"datum",        true,  "datum 0 °C, 1 atm",       read_datum},
     {"agree",        true,  "agree 0.5 %",             read_agree},
     {"normal",       true,  "normal 0 °C, 1 bar",      read_normal},
@@ -298,11 +308,26 @@ static bool in_pieces(const struct gas_block *block, size_t row)
     return false;
 }
 
+/* "barometer, mbar" | 980: a heading and its figure. */
+static bool unit_in_label(const struct gas_block *block, size_t row, char *text, size_t size)
+{
+    char number[40];
+    const struct gas_cell *label = gas_cell_at(block, row, 0), *figure = gas_cell_at(block, row, 1);
+    const char *comma = label->kind == GAS_CELL_TEXT ? strchr(label->text, ',') : NULL;
+    if (!comma || figure->kind != GAS_CELL_NUMBER)
+        return false;
+    gas_number_format(number, sizeof number, figure->number, 15);
+    snprintf(text, size, "%.*s %s %s", (int)(comma - label->text), label->text, number, comma + 1);
+    return true;
+}
+
 static bool read_row_of_pieces(const struct gas_block *block, size_t row, struct gas_options *options,
                                struct gas_refusal *refusal)
 {
     char text[160];
     size_t used = 0;
+    if (unit_in_label(block, row, text, sizeof text))
+        return read_text((struct gas_piece){text, strlen(text)}, options, refusal);
     for (size_t i = 0; i < block->columns && used < sizeof text; i++) {
         const struct gas_cell *cell = gas_cell_at(block, row, i);
         char number[40] = "";

@@ -1,6 +1,6 @@
 /*
- * options.h - the options text: "barometer 0.98 bar; work by gas; flow; datum 0 degC; agree 0.5 %; hard errors; digits
- * 4".
+ * options.h - the options text: "barometer 0.98 bar; work by gas; flow; open; datum 0 degC; agree 0.5 %; hard errors;
+ * digits 4".
  */
 #ifndef SHEET_OPTIONS_H
 #define SHEET_OPTIONS_H
@@ -19,6 +19,7 @@
 struct gas_options {
     double barometer;                 /* Pa */
     enum gas_system system;           /* GAS_CLOSED, or GAS_FLOW after `flow` */
+    bool open;                        /* the amount of gas differs from state to state: gas came in or went out */
     bool work_by_gas;                 /* W is shown positive out of the gas */
     bool hard_errors;                 /* #N/A in place of a sentence */
     struct gas_datum datum;           /* h = s = 0 */

@@ -102,18 +102,66 @@ struct gas_solver *gas_solver_open(const struct gas_job *job, int highest_state,
 
 /* -- plans --------------------------------------------------------------------------------------------------------- */
 
-static bool make_plan(const struct gas_solver *solver, const struct gas_job *job, uint32_t mask,
-                      struct solver_entry *entry)
+struct gas_result solver_make(struct gas_plan *plan, const struct gas_known *known, size_t count, int states, bool open)
 {
-    entry->mask = mask;
+    return open ? gas_plan_make_open(plan, known, count, states) : gas_plan_make(plan, known, count, states);
+}
+
+void gas_solver_amounts(struct gas_solver *solver, enum gas_amounts amounts)
+{
+    solver->amounts = amounts;
+}
+
+/* "T constant; T1 = 25 degC": the one figure given for it holds in every state, and the constant has done its work. */
+static void merge_constant(struct solver_entry *entry, size_t constant)
+{
+    size_t figures = 0, last = 0;
+    for (size_t i = 0; i < entry->count; i++)
+        if (i != constant && entry->known[i].variable == entry->known[constant].variable) {
+            figures++;
+            last = i;
+        }
+    if (figures != 1)
+        return;
+    entry->known[last].state = 0;
+    entry->count--;
+    for (size_t i = constant; i < entry->count; i++) {
+        entry->known[i] = entry->known[i + 1];
+        entry->column[i] = entry->column[i + 1];
+    }
+}
+
+static void take_knowns(const struct gas_solver *solver, uint32_t mask, struct solver_entry *entry)
+{
     entry->count = 0;
-    entry->refusal.made = false;
     for (size_t i = 0; i < solver->columns; i++)
         if (mask >> i & 1) {
             entry->known[entry->count] = solver->column[i].known;
             entry->column[entry->count++] = (unsigned char)i;
         }
-    struct gas_result made = gas_plan_make(&entry->plan, entry->known, entry->count, solver->states);
+    for (size_t i = entry->count; i-- > 0;)
+        if (entry->known[i].state == GAS_CONSTANT)
+            merge_constant(entry, i);
+}
+
+static bool finds_all(const struct gas_solver *solver, const struct gas_plan *plan)
+{
+    for (size_t i = 0; i < solver->required; i++)
+        if (!gas_plan_finds(plan, solver->must[i].variable, solver->must[i].state))
+            return false;
+    return true;
+}
+
+static bool make_plan(const struct gas_solver *solver, const struct gas_job *job, uint32_t mask,
+                      struct solver_entry *entry)
+{
+    entry->mask = mask;
+    entry->refusal.made = false;
+    take_knowns(solver, mask, entry);
+    bool open = solver->amounts != GAS_AMOUNTS_SAME;
+    struct gas_result made = solver_make(&entry->plan, entry->known, entry->count, solver->states, open);
+    if (made.status == GAS_OK && solver->amounts == GAS_AMOUNTS_ASKED && !finds_all(solver, &entry->plan))
+        made = solver_make(&entry->plan, entry->known, entry->count, solver->states, false);
     return made.status == GAS_OK || solver_refuse_knowns(job, entry, made, &entry->refusal);
 }
 
@@ -133,7 +181,7 @@ static void make_entry(const struct gas_solver *solver, const struct gas_job *jo
     gas_plan_trim(&entry->plan, keep, solver->needs);
 }
 
-static struct solver_entry *entry_for(struct gas_solver *solver, const struct gas_job *job, uint32_t given)
+struct solver_entry *solver_entry_for(struct gas_solver *solver, const struct gas_job *job, uint32_t given)
 {
     uint32_t mask = given & solver->used;
     if (solver->entries && solver->entry[solver->last].mask == mask)
@@ -153,7 +201,7 @@ static struct solver_entry *entry_for(struct gas_solver *solver, const struct ga
 
 /* -- running ------------------------------------------------------------------------------------------------------- */
 
-static void in_order(const struct solver_entry *entry, const struct gas_case *figures, double *ordered)
+void solver_in_order(const struct solver_entry *entry, const struct gas_case *figures, double *ordered)
 {
     for (size_t i = 0; i < entry->count; i++)
         ordered[i] = figures->si[entry->column[i]];
@@ -164,10 +212,10 @@ bool gas_solver_run(struct gas_solver *solver, const struct gas_job *job, const 
 {
     struct gas_values found;
     double ordered[GAS_COLUMNS];
-    const struct solver_entry *entry = entry_for(solver, job, figures->row->given);
+    const struct solver_entry *entry = solver_entry_for(solver, job, figures->row->given);
     if (entry->refusal.made)
         return gas_refuse_sentence(refusal, entry->refusal.text);
-    in_order(entry, figures, ordered);
+    solver_in_order(entry, figures, ordered);
     struct gas_result result = gas_plan_run(&entry->plan, &job->gas, &job->options.datum, job->options.agree, ordered,
                                             entry->count, solver->must, solver->required, &found);
     if (result.status != GAS_OK)
@@ -178,32 +226,6 @@ bool gas_solver_run(struct gas_solver *solver, const struct gas_job *job, const 
                 ? gas_plan_value(&entry->plan, &found, solver->need[i].known.variable, solver->need[i].known.state)
                 : NAN;
     return true;
-}
-
-bool gas_solver_uncertainty(struct gas_solver *solver, const struct gas_job *job, const struct gas_case *figures,
-                            size_t need, double *value, struct gas_refusal *refusal)
-{
-    double ordered[GAS_COLUMNS], spread[GAS_COLUMNS];
-    bool any = false;
-    const struct solver_entry *entry = entry_for(solver, job, figures->row->given);
-    if (entry->refusal.made)
-        return gas_refuse_sentence(refusal, entry->refusal.text);
-    in_order(entry, figures, ordered);
-    for (size_t i = 0; i < entry->count; i++) {
-        int column = solver->column[entry->column[i]].tolerance;
-        spread[i] = column >= 0 ? figures->si[column] : NAN;
-        any = any || !isnan(spread[i]);
-    }
-    if (!any)
-        return gas_refuse(refusal, "wanted",
-                          "an uncertainty needs those of the givens; add columns such as \"±P1, bar\".");
-    struct gas_result result = gas_plan_uncertainty(&entry->plan, &job->gas, &job->options.datum, ordered, spread,
-                                                    entry->count, solver->need[need].known, NULL);
-    *value = result.value;
-    return result.status == GAS_OK ||
-           gas_refuse(refusal, "wanted",
-                      "the uncertainty cannot be found; the figures less or more their plus-minus "
-                      "leave what is possible.");
 }
 
 const struct gas_plan *gas_solver_plan(struct gas_solver *solver, const struct gas_job *job,
@@ -220,6 +242,6 @@ const struct gas_plan *gas_solver_plan(struct gas_solver *solver, const struct g
         gas_refuse_sentence(refusal, solver->whole->refusal.text);
         return NULL;
     }
-    in_order(solver->whole, figures, ordered);
+    solver_in_order(solver->whole, figures, ordered);
     return &solver->whole->plan;
 }

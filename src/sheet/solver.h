@@ -39,9 +39,25 @@ struct gas_solver *gas_solver_open(const struct gas_job *job, int highest_state,
 bool gas_solver_run(struct gas_solver *solver, const struct gas_job *job, const struct gas_case *figures,
                     double *values, struct gas_refusal *refusal);
 
-/* gas_solver_uncertainty - standard uncertainty of needs[i] from the plus-minus columns. */
+/* Is the amount of gas the same in every state? */
+enum gas_amounts {
+    GAS_AMOUNTS_SAME,
+    GAS_AMOUNTS_ASKED, /* m1 or n2 is asked for: of each state where that leads there, else the same */
+    GAS_AMOUNTS_OPEN   /* of each state */
+};
+
+/* gas_solver_amounts - said before the first run; GAS_AMOUNTS_SAME when it is not. */
+void gas_solver_amounts(struct gas_solver *solver, enum gas_amounts amounts);
+
+/*
+ * gas_solver_uncertainty - standard uncertainty (SI) of needs[need] as `wanted` shows it, from the plus-minus columns.
+ *
+ *   Notes      The readings are independent, but for the barometer: its own uncertainty is in every gauge and vacuum
+ *              reading of the case at once, and in a wanted gauge pressure. A wanted share (±m, %) is of the value.
+ *   Source     JCGM 100:2008, 5.1.2; 5.2.2 for what readings have in common
+ */
 bool gas_solver_uncertainty(struct gas_solver *solver, const struct gas_job *job, const struct gas_case *figures,
-                            size_t need, double *value, struct gas_refusal *refusal);
+                            size_t need, const struct gas_heading *wanted, double *value, struct gas_refusal *refusal);
 
 /* gas_solver_plan - the plan for a pattern of given columns, untrimmed, for a working; and the SI figures in its order.
  * NULL after a refusal. */

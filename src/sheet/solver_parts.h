@@ -27,6 +27,7 @@ struct gas_solver {
     } column[GAS_COLUMNS];
     uint32_t used; /* set of columns that are state variables */
     int states;    /* highest state asked about */
+    enum gas_amounts amounts;
     size_t needs;
     struct gas_need need[GAS_NEEDS];
     size_t required; /* needs that are not optional, in order */
@@ -36,6 +37,16 @@ struct gas_solver {
     struct solver_entry *whole; /* an untrimmed one, for gas_solver_plan; NULL until asked */
     struct gas_arena *arena;
 };
+
+/* The entry for a pattern of given columns, made when it is new. */
+struct solver_entry *solver_entry_for(struct gas_solver *solver, const struct gas_job *job, uint32_t given);
+
+/* The SI figures of a case in the order of the knowns. */
+void solver_in_order(const struct solver_entry *entry, const struct gas_case *figures, double *ordered);
+
+/* The plan of an entry's knowns, after a change of them; open: amounts are of each state. */
+struct gas_result solver_make(struct gas_plan *plan, const struct gas_known *known, size_t count, int states,
+                              bool open);
 
 /* Why a required variable does not follow, and what would do. */
 bool solver_refuse_missing(const struct solver_entry *entry, struct gas_known wanted, struct gas_refusal *refusal);

@@ -14,6 +14,8 @@ static const char *variable_name(char buffer[GAS_NAME_TEXT], struct gas_known kn
     const char *symbol = gas_variable_symbol(known.variable);
     if (known.state > 0)
         snprintf(buffer, GAS_NAME_TEXT, "%s%d", symbol, known.state);
+    else if (known.state == GAS_CONSTANT)
+        snprintf(buffer, GAS_NAME_TEXT, "a constant %s", symbol);
     else
         snprintf(buffer, GAS_NAME_TEXT, "%s", symbol);
     return buffer;
@@ -76,7 +78,7 @@ static size_t missing_pair(const struct solver_entry *entry, struct gas_known wa
     for (size_t i = 0; i < sizeof first / sizeof *first; i++) {
         known[entry->count] = (struct gas_known){first[i], wanted.state};
         if (same_thing(known[entry->count], wanted) || gas_plan_finds(&entry->plan, first[i], wanted.state) ||
-            gas_plan_make(&trial, known, entry->count + 1, entry->plan.states).status != GAS_OK)
+            solver_make(&trial, known, entry->count + 1, entry->plan.states, entry->plan.open).status != GAS_OK)
             continue;
         pair[0] = known[entry->count];
         if (missing_one(&trial, wanted, true, &pair[1], 1))
@@ -136,6 +138,11 @@ bool solver_refuse_knowns(const struct gas_job *job, const struct solver_entry *
     const char *text = job->table.heading[entry->column[second]].text;
     struct gas_known bare = {entry->known[second].variable, 0};
     gas_quoted(shown, sizeof shown, text, strlen(text));
+    for (size_t i = 0; i < entry->count; i++)
+        if (entry->known[i].variable == bare.variable && entry->known[i].state == GAS_CONSTANT)
+            return gas_refuse(refusal, "given",
+                              "%s is said to be constant, but given for more than one state; leave the others out.",
+                              variable_name(other, bare));
     if (entry->known[second].state == 0)
         return gas_refuse(refusal, "given",
                           "%s holds in every state, but %s is given for one state as well; number it "
@@ -197,14 +204,25 @@ static double given_figure(const struct solver_entry *entry, const struct gas_ca
 {
     double si = NAN;
     for (size_t i = 0; i < entry->count; i++)
-        if (entry->known[i].variable == known.variable &&
+        if (entry->known[i].variable == known.variable && entry->known[i].state != GAS_CONSTANT &&
             (entry->known[i].state == known.state || entry->known[i].state == 0 || known.state == 0))
             si = figures->si[entry->column[i]];
     return si;
 }
 
+/* What to do about a balance that fails. Between two states of one vessel gas may have been let out. */
+static const char *remedy(const struct solver_entry *entry, const struct gas_step *check)
+{
+    bool told = !entry->plan.shared[GAS_VAR_N];
+    for (size_t i = 0; i < entry->count; i++)
+        told = told || entry->known[i].variable == GAS_VAR_N || entry->known[i].variable == GAS_VAR_MASS;
+    return check->state_b == 0 || told ? "correct one or leave one out"
+                                       : "correct one, leave one out, or add the option \"open\" where gas came in or "
+                                         "went out between them";
+}
+
 /* Both sides in SI, where no single figure can be named. */
-static bool refuse_sides(const struct gas_values *values, const char *balance, const char *allowed,
+static bool refuse_sides(const struct gas_values *values, const char *balance, const char *allowed, const char *todo,
                          struct gas_refusal *refusal)
 {
     char left[40], right[40], apart[40];
@@ -213,8 +231,8 @@ static bool refuse_sides(const struct gas_values *values, const char *balance, c
     gas_number_format(apart, sizeof apart, fabs(values->left / values->right - 1) * 100, 3);
     return gas_refuse(refusal, "given",
                       "the figures disagree in %s: %s on the left, %s on the right (SI), %s %% apart where %s %% is "
-                      "allowed; correct one or leave one out.",
-                      balance, left, right, apart, allowed);
+                      "allowed; %s.",
+                      balance, left, right, apart, allowed, todo);
 }
 
 static bool refuse_contradiction(const struct gas_solver *solver, const struct gas_job *job,
@@ -225,22 +243,22 @@ static bool refuse_contradiction(const struct gas_solver *solver, const struct g
     struct gas_known doubted = {(enum gas_variable)check->target, check->target_state};
     char name[GAS_NAME_TEXT], given[80], other[80], apart[40], allowed[40], balance[GAS_STEP_TEXT];
     double si = given_figure(entry, figures, doubted);
+    const char *todo = remedy(entry, check);
     gas_step_balance_text(&entry->plan, check, balance, sizeof balance);
     gas_number_format(allowed, sizeof allowed, job->options.agree * 100, 3);
     if (isnan(si) || isnan(values->balanced))
-        return refuse_sides(values, balance, allowed, refusal);
+        return refuse_sides(values, balance, allowed, todo, refusal);
     figure_of(given, solver, job, figures, doubted, si);
     figure_of(other, solver, job, figures, doubted, values->balanced);
     variable_name(name, doubted);
     if (!(si > 0 && values->balanced > 0))
-        return gas_refuse(refusal, "given",
-                          "%s is given as %s, but the other figures make it %s (%s); correct one or leave one out.",
-                          name, given, other, balance);
+        return gas_refuse(refusal, "given", "%s is given as %s, but the other figures make it %s (%s); %s.", name,
+                          given, other, balance, todo);
     gas_number_format(apart, sizeof apart, fabs(si / values->balanced - 1) * 100, 3);
     return gas_refuse(refusal, "given",
                       "%s is given as %s, but the other figures make it %s (%s): %s %% apart where %s %% is allowed; "
-                      "correct one or leave one out.",
-                      name, given, other, balance, apart, allowed);
+                      "%s.",
+                      name, given, other, balance, apart, allowed, todo);
 }
 
 /* -- outside the data ---------------------------------------------------------------------------------------------- */

@@ -5,6 +5,10 @@
 #include <string.h>
 #include <strings.h>
 
+#include <gasleaf/species.h>
+#include <gasleaf/state.h>
+
+#include "sheet/item.h"
 #include "sheet/piece.h"
 #include "sheet/table_form.h"
 
@@ -21,12 +25,14 @@ struct opening {
     struct gas_table *table;
     struct gas_refusal *refusal;
     const char *what; /* the argument that the headings stand in */
+    size_t lines;     /* columns (or rows) of figures that are named so far, with those passed over */
 };
 
 static bool same_quantity(const struct gas_heading *a, const struct gas_heading *b)
 {
-    return a->symbol == b->symbol && a->state == b->state && a->tolerance == b->tolerance &&
-           a->unit.dimension == b->unit.dimension;
+    bool same = a->symbol == b->symbol && a->state == b->state && a->tolerance == b->tolerance;
+    bool share = a->unit.dimension == GAS_DIM_NUMBER || b->unit.dimension == GAS_DIM_NUMBER;
+    return same && (a->unit.dimension == b->unit.dimension || (a->tolerance && share));
 }
 
 static bool add(struct opening *opening, const struct gas_heading *heading, double figure)
@@ -43,27 +49,16 @@ static bool add(struct opening *opening, const struct gas_heading *heading, doub
                               gas_quoted(first, sizeof first, table->heading[i].text, strlen(table->heading[i].text)),
                               gas_quoted(second, sizeof second, heading->text, strlen(heading->text)));
     table->heading[table->columns] = *heading;
+    table->line[table->columns] = (unsigned short)opening->lines;
     table->figure[table->columns++] = figure;
     return true;
-}
-
-/* "7 kg" is a figure; as a unit it would mean seven of them. */
-static bool refuse_figure(const char *what, const char *text, size_t length, struct gas_refusal *refusal)
-{
-    char shown[80];
-    double figure;
-    size_t used;
-    if (!gas_number_parse(text, length, &figure, &used))
-        return true;
-    return gas_refuse(refusal, what, "%s is a figure where a heading such as \"m, kg\" is due.",
-                      gas_quoted(shown, sizeof shown, text, length));
 }
 
 static bool add_heading(struct opening *opening, const char *text, size_t length)
 {
     struct gas_heading heading;
     struct gas_heading_fault fault;
-    if (!refuse_figure(opening->what, text, length, opening->refusal))
+    if (!gas_refuse_figure(opening->what, text, length, opening->refusal))
         return false;
     if (!gas_heading_parse(text, length, &opening->table->references, &heading, &fault))
         return gas_refuse_heading(opening->refusal, opening->what, text, length, &fault);
@@ -72,12 +67,13 @@ static bool add_heading(struct opening *opening, const char *text, size_t length
 
 static bool add_item(struct opening *opening, const char *text, size_t length)
 {
-    struct gas_heading heading;
-    struct gas_heading_fault fault;
-    double figure;
-    if (!gas_given_parse(text, length, &opening->table->references, &heading, &figure, &fault))
-        return gas_refuse_heading(opening->refusal, opening->what, text, length, &fault);
-    return add(opening, &heading, figure);
+    struct gas_item item;
+    if (!gas_item_read(text, length, &opening->table->references, opening->what, &item, opening->refusal))
+        return false;
+    for (size_t i = 0; i < item.count; i++)
+        if (!add(opening, &item.heading[i], item.figure[i]))
+            return false;
+    return true;
 }
 
 static bool add_items(struct opening *opening, struct gas_piece rest)
@@ -88,54 +84,26 @@ static bool add_items(struct opening *opening, struct gas_piece rest)
     return true;
 }
 
-/* "7 bar(g)" in a cell under a heading in psi: its own unit, turned to the heading's. */
-static bool figure_with_unit(const struct gas_table *table, const struct gas_heading *heading, struct gas_piece text,
-                             double *figure, struct gas_refusal *refusal)
+/* Must a value with a unit be read as an item of its own? Without a unit in the heading, and where its unit has another
+ * basis: a gauge reading under an absolute heading waits for its barometer. */
+static bool own_unit(const struct gas_heading *heading, const struct gas_cell *value)
 {
-    char name[GAS_NAME_TEXT], shown[80];
-    struct gas_unit unit;
-    struct gas_unit_fault fault;
-    gas_quantity_name(name, heading->symbol, heading->state);
-    if (!gas_unit_parse(text.at, text.length, &table->references, &unit, &fault))
-        return gas_refuse_unit(refusal, name, &fault);
-    if (unit.dimension != heading->unit.dimension)
-        return gas_refuse(refusal, name, "%s is the unit of %s, but its heading asks for %s.",
-                          gas_quoted(shown, sizeof shown, text.at, text.length), gas_dimension_words(unit.dimension),
-                          gas_dimension_words(heading->unit.dimension));
-    if (heading->tolerance)
-        *figure = gas_unit_difference_from_si(&heading->unit, gas_unit_difference_to_si(&unit, *figure));
-    else
-        *figure = gas_unit_from_si(&heading->unit, gas_unit_to_si(&unit, *figure, table->barometer), table->barometer);
-    return true;
-}
-
-static bool cell_figure(const struct gas_table *table, const struct gas_heading *heading, const struct gas_cell *cell,
-                        double *figure, struct gas_refusal *refusal)
-{
-    char name[GAS_NAME_TEXT], shown[80];
+    double figure;
     size_t used;
-    if (cell->kind == GAS_CELL_NUMBER) {
-        *figure = cell->number;
+    struct gas_unit unit;
+    if (!heading->has_unit)
         return true;
-    }
-    gas_quantity_name(name, heading->symbol, heading->state);
-    if (cell->kind != GAS_CELL_TEXT)
-        return gas_refuse(refusal, name, "its cell holds an error; mend that cell first.");
-    if (gas_cell_is_sentence(cell))
-        return gas_refuse_sentence(refusal, cell->text);
-    struct gas_piece text = gas_piece_trim((struct gas_piece){cell->text, cell->length});
-    if (!gas_number_parse(text.at, text.length, figure, &used))
-        return gas_refuse(refusal, name, "%s is not a number; write a figure, or leave the cell blank.",
-                          gas_quoted(shown, sizeof shown, text.at, text.length));
-    struct gas_piece unit = gas_piece_trim((struct gas_piece){text.at + used, text.length - used});
-    return unit.length == 0 || figure_with_unit(table, heading, unit, figure, refusal);
+    struct gas_piece text = gas_piece_trim((struct gas_piece){value->text, value->length});
+    return !heading->tolerance && gas_number_parse(text.at, text.length, &figure, &used) && used < text.length &&
+           gas_unit_parse(text.at + used, text.length - used, NULL, &unit, NULL) &&
+           unit.dimension == heading->unit.dimension && unit.basis != heading->unit.basis;
 }
 
 /* heading | value and label | value | unit, one row. The heading text is put together before it is read. */
 static bool add_pair(struct opening *opening, const struct gas_cell *label, const struct gas_cell *value,
                      const struct gas_cell *unit)
 {
-    char text[3 * GAS_HEADING_TEXT];
+    char text[3 * GAS_HEADING_TEXT], name[GAS_NAME_TEXT];
     bool unit_cell = unit && !gas_cell_blank(unit);
     if (gas_cell_blank(value))
         return true;
@@ -146,28 +114,32 @@ static bool add_pair(struct opening *opening, const struct gas_cell *label, cons
     if (gas_cell_is_sentence(value))
         return gas_refuse_sentence(opening->refusal, value->text);
     snprintf(text, sizeof text, "%s%s%s", label->text, unit_cell ? ", " : "", unit_cell ? unit->text : "");
+    if (value->kind == GAS_CELL_TEXT && gas_word_constant(value->text, value->length)) {
+        size_t used = strlen(text);
+        snprintf(text + used, sizeof text - used, " = constant");
+        return add_item(opening, text, strlen(text));
+    }
     if (!add_heading(opening, text, strlen(text)))
         return false;
     struct gas_table *table = opening->table;
     size_t last = table->columns - 1;
-    if (table->heading[last].has_unit || value->kind != GAS_CELL_TEXT)
-        return cell_figure(table, &table->heading[last], value, &table->figure[last], opening->refusal);
-    table->columns--; /* the unit stands with the value: "P1" | "7 bar(g)" */
-    snprintf(text, sizeof text, "%s = %s", label->text, value->text);
-    return add_item(opening, text, strlen(text));
-}
-
-static bool is_title(const struct gas_cell *value)
-{
-    struct gas_piece text = {value->text, value->length};
-    return value->kind == GAS_CELL_TEXT && gas_piece_take(&text, "value") && text.length == 0;
+    if (value->kind == GAS_CELL_TEXT && own_unit(&table->heading[last], value)) {
+        table->columns--; /* the unit stands with the value: "P1" | "7 bar(g)" */
+        snprintf(text, sizeof text, "%s = %s",
+                 table->heading[last].has_unit
+                     ? gas_quantity_name(name, table->heading[last].symbol, table->heading[last].state)
+                     : label->text,
+                 value->text);
+        return add_item(opening, text, strlen(text));
+    }
+    return gas_table_cell(table, last, 0, value, &table->figure[last], opening->refusal);
 }
 
 static bool read_pairs(struct opening *opening, const struct gas_block *given)
 {
     for (size_t row = 0; row < given->rows; row++) {
         const struct gas_cell *value = gas_cell_at(given, row, 1);
-        if (row == 0 && is_title(value))
+        if (row == 0 && gas_cell_is_title(value))
             continue;
         if (!add_pair(opening, gas_cell_at(given, row, 0), value, given->columns > 2 ? value + 1 : NULL))
             return false;
@@ -187,25 +159,56 @@ static bool read_items(struct opening *opening, const struct gas_block *given)
     return true;
 }
 
-/* Headings from cells that stand side by side or one above another; a single text may hold several. */
-static bool read_headings(struct opening *opening, const struct gas_block *block, size_t count, size_t step)
+/* A heading cell, with the cell of its unit where there is a second line of them (NULL: none). */
+static bool read_heading(struct opening *opening, const struct gas_cell *cell, const struct gas_cell *unit,
+                         struct gas_line figures)
 {
-    for (size_t i = 0; i < count; i++) {
-        const struct gas_cell *cell = &block->cell[i * step];
-        if (gas_cell_is_sentence(cell))
-            return gas_refuse_sentence(opening->refusal, cell->text);
-        if (cell->kind == GAS_CELL_NUMBER)
-            return gas_refuse(opening->refusal, opening->what,
-                              "a heading is a number; give the row (or column) of headings as it stands by the table.");
-        struct gas_piece rest = {cell->text, cell->kind == GAS_CELL_TEXT ? cell->length : 0}, item;
-        if (count > 1 || gas_cell_blank(cell)) {
-            if (!add_heading(opening, rest.at ? rest.at : "", rest.length))
-                return false;
-        } else
-            while (gas_piece_next(&rest, &item))
-                if (!add_heading(opening, item.at, item.length))
-                    return false;
-    }
+    char text[3 * GAS_HEADING_TEXT];
+    if (gas_cell_is_sentence(cell))
+        return gas_refuse_sentence(opening->refusal, cell->text);
+    if (cell->kind == GAS_CELL_NUMBER)
+        return gas_refuse(opening->refusal, opening->what,
+                          "a heading is a number; give the row (or column) of headings as it stands by the table.");
+    bool blank = gas_cell_blank(cell), has_unit = unit && !gas_cell_blank(unit);
+    struct gas_piece name = gas_piece_trim((struct gas_piece){blank ? "" : cell->text, blank ? 0 : cell->length});
+    bool pass = blank ? !has_unit && !gas_line_figures(figures) : gas_passed_over(name);
+    snprintf(text, sizeof text, "%.*s%s%s", (int)name.length, name.at, has_unit && !blank ? ", " : "",
+             has_unit ? unit->text : "");
+    if (!pass && !add_heading(opening, text, strlen(text)))
+        return false;
+    opening->lines++;
+    return true;
+}
+
+/* Several headings in one text. */
+static bool read_heading_text(struct opening *opening, const struct gas_cell *cell)
+{
+    struct gas_piece rest = {cell->text, cell->length}, item;
+    if (cell->kind != GAS_CELL_TEXT || gas_cell_blank(cell) || gas_cell_is_sentence(cell))
+        return read_heading(opening, cell, NULL, (struct gas_line){0});
+    for (; gas_piece_next(&rest, &item); opening->lines++)
+        if (!gas_passed_over(item) && !add_heading(opening, item.at, item.length))
+            return false;
+    return true;
+}
+
+/* The line of figures below (or beside) heading number i. */
+static struct gas_line line_of(const struct gas_table *table, const struct gas_block *given, size_t i)
+{
+    size_t lines = table->across ? given->rows - table->first_row : given->columns - table->first_column;
+    if (i >= lines)
+        return (struct gas_line){0};
+    return table->across ? gas_line_across(given, table->first_row + i, table->first_column)
+                         : gas_line_down(given, table->first_column + i, table->first_row);
+}
+
+static bool read_headings(struct opening *opening, const struct gas_block *given, struct gas_line names,
+                          const struct gas_cell *units)
+{
+    for (size_t i = 0; i < names.count; i++)
+        if (!read_heading(opening, &names.cell[i * names.step], units ? &units[i * names.step] : NULL,
+                          line_of(opening->table, given, i)))
+            return false;
     return true;
 }
 
@@ -215,8 +218,36 @@ static bool refuse_count(struct opening *opening, const struct gas_block *given,
     const char *kind = beside ? "row" : "column";
     return gas_refuse(opening->refusal, "headings",
                       "there %s %zu heading%s for %zu %s%s of figures; give one for each %s.",
-                      opening->table->columns == 1 ? "is" : "are", opening->table->columns,
-                      opening->table->columns == 1 ? "" : "s", lines, kind, lines == 1 ? "" : "s", kind);
+                      opening->lines == 1 ? "is" : "are", opening->lines, opening->lines == 1 ? "" : "s", lines, kind,
+                      lines == 1 ? "" : "s", kind);
+}
+
+static bool belong_together(const struct gas_cell *name, const struct gas_cell *unit)
+{
+    char text[3 * GAS_HEADING_TEXT];
+    snprintf(text, sizeof text, "%s, %s", name->text ? name->text : "", unit->text ? unit->text : "");
+    return gas_heading_parse(text, strlen(text), NULL, &(struct gas_heading){0}, NULL);
+}
+
+/* Headings beside the table in one or two lines: names, or names and units. Across or down is told here. */
+static bool read_heading_block(struct opening *opening, const struct gas_block *given, const struct gas_block *headings)
+{
+    bool rectangle = headings->rows > 1 && headings->columns > 1;
+    bool units_below = rectangle && headings->rows == 2 && gas_line_of_units(gas_line_across(headings, 1, 0));
+    bool units_beside = rectangle && headings->columns == 2 && gas_line_of_units(gas_line_down(headings, 1, 0));
+    if (gas_single(headings))
+        return read_heading_text(opening, headings->cell);
+    if (units_below && units_beside) /* two by two, and "T1" could be a unit as well */
+        units_below = belong_together(headings->cell, gas_cell_at(headings, 1, 0));
+    if (rectangle && !units_below && !units_beside)
+        return gas_refuse(opening->refusal, "headings",
+                          "they fill %zu rows and %zu columns; give one row or one column of headings, or a second one "
+                          "with the units.",
+                          headings->rows, headings->columns);
+    opening->table->across = headings->rows > 1 && !units_below;
+    struct gas_line names = opening->table->across ? gas_line_down(headings, 0, 0) : gas_line_across(headings, 0, 0);
+    const struct gas_cell *units = !rectangle ? NULL : units_below ? gas_cell_at(headings, 1, 0) : headings->cell + 1;
+    return read_headings(opening, given, names, units);
 }
 
 /* A table of figures with `headings` naming its columns, or its rows. */
@@ -224,17 +255,11 @@ static bool read_with_headings(struct opening *opening, const struct gas_block *
 {
     struct gas_table *table = opening->table;
     opening->what = "headings";
-    if (headings->rows > 1 && headings->columns > 1)
-        return gas_refuse(opening->refusal, "headings",
-                          "they fill %zu rows and %zu columns; give one row or one column of headings.", headings->rows,
-                          headings->columns);
-    if (!read_headings(opening, headings, headings->rows * headings->columns, 1))
+    if (!read_heading_block(opening, given, headings))
         return false;
-    bool fits = table->columns == given->columns;
-    bool fits_beside = table->columns == given->rows;
-    if (headings->rows > 1)
-        table->across = true;
-    else if (gas_single(headings))
+    bool fits = opening->lines == given->columns;
+    bool fits_beside = opening->lines == given->rows;
+    if (gas_single(headings))
         table->across = !fits && fits_beside;
     if (table->across ? !fits_beside : !fits)
         return refuse_count(opening, given, table->across);
@@ -243,16 +268,20 @@ static bool read_with_headings(struct opening *opening, const struct gas_block *
     return true;
 }
 
-/* Headings inside the table itself. */
+/* Headings inside the table itself, perhaps with a line of units after them. */
 static bool read_headed(struct opening *opening, const struct gas_block *given, bool beside)
 {
     struct gas_table *table = opening->table;
+    size_t lines = beside ? given->columns : given->rows;
+    struct gas_line names = beside ? gas_line_down(given, 0, 0) : gas_line_across(given, 0, 0);
+    bool units = lines > 2 && gas_line_of_units(beside ? gas_line_down(given, 1, 0) : gas_line_across(given, 1, 0));
+    size_t first = units ? 2 : 1;
     table->across = beside;
     table->block = given;
-    table->first_row = beside ? 0 : 1;
-    table->first_column = beside ? 1 : 0;
-    table->rows = beside ? given->columns - 1 : given->rows - 1;
-    return read_headings(opening, given, beside ? given->rows : given->columns, beside ? given->columns : 1);
+    table->first_row = beside ? 0 : first;
+    table->first_column = beside ? first : 0;
+    table->rows = lines - first;
+    return read_headings(opening, given, names, units ? gas_cell_at(given, beside ? 0 : 1, beside ? 1 : 0) : NULL);
 }
 
 static bool read_form(struct opening *opening, const struct gas_block *given)
@@ -278,10 +307,22 @@ static bool read_form(struct opening *opening, const struct gas_block *given)
     }
 }
 
+/* "±V, %" beside "V, Nm3": the figure is an amount, so its share is one too. */
+static void share_of_reference_volumes(struct gas_table *table)
+{
+    for (size_t i = 0; i < table->columns; i++) {
+        struct gas_heading *share = &table->heading[i];
+        bool is_share = share->tolerance && share->unit.dimension == GAS_DIM_NUMBER && share->symbol == GAS_SYM_V;
+        for (size_t k = 0; k < table->columns && is_share; k++)
+            if (table->heading[k].unit.reference_volume && table->heading[k].state == share->state)
+                share->symbol = GAS_SYM_N;
+    }
+}
+
 bool gas_table_read(const struct gas_block *given, const struct gas_block *headings, const struct gas_options *options,
                     struct gas_table *table, struct gas_refusal *refusal)
 {
-    struct opening opening = {table, refusal, "given"};
+    struct opening opening = {table, refusal, "given", 0};
     memset(table, 0, sizeof *table);
     table->barometer = options->barometer;
     table->references = options->references;
@@ -289,77 +330,9 @@ bool gas_table_read(const struct gas_block *given, const struct gas_block *headi
         return gas_refuse(refusal, "given", "nothing is given; write figures like \"7 bar(g); 35 °C; 12 m3\".");
     bool good =
         headings && !gas_omitted(headings) ? read_with_headings(&opening, given, headings) : read_form(&opening, given);
+    if (good)
+        share_of_reference_volumes(table);
     if (good && table->columns == 0)
         return gas_refuse(refusal, "given", "it is blank; write figures like \"7 bar(g); 35 °C; 12 m3\".");
     return good;
-}
-
-bool gas_table_row(const struct gas_table *table, size_t row, struct gas_row *figures, struct gas_refusal *refusal)
-{
-    figures->given = 0;
-    for (size_t i = 0; i < table->columns; i++) {
-        double *figure = &figures->figure[i];
-        *figure = table->one_case ? table->figure[i] : NAN;
-        if (!table->one_case) {
-            size_t down = table->first_row + (table->across ? i : row);
-            size_t right = table->first_column + (table->across ? row : i);
-            const struct gas_cell *cell = gas_cell_at(table->block, down, right);
-            if (gas_cell_blank(cell))
-                continue;
-            if (!cell_figure(table, &table->heading[i], cell, figure, refusal))
-                return false;
-        }
-        figures->given |= UINT32_C(1) << i;
-    }
-    return true;
-}
-
-static bool want(struct gas_wanted *wanted, struct gas_piece item, const struct gas_options *options,
-                 struct gas_refusal *refusal)
-{
-    struct gas_heading_fault fault;
-    if (wanted->columns == GAS_COLUMNS)
-        return gas_refuse(refusal, "wanted", "more than %d quantities are wanted; ask for some of them elsewhere.",
-                          GAS_COLUMNS);
-    if (!refuse_figure("wanted", item.at, item.length, refusal))
-        return false;
-    if (!gas_heading_parse(item.at, item.length, &options->references, &wanted->heading[wanted->columns], &fault))
-        return gas_refuse_heading(refusal, "wanted", item.at, item.length, &fault);
-    wanted->columns++;
-    return true;
-}
-
-static bool want_cell(struct gas_wanted *wanted, const struct gas_cell *cell, bool alone,
-                      const struct gas_options *options, struct gas_refusal *refusal)
-{
-    struct gas_piece rest = {cell->text, cell->length}, item;
-    if (gas_cell_is_sentence(cell))
-        return gas_refuse_sentence(refusal, cell->text);
-    if (cell->kind != GAS_CELL_TEXT || gas_cell_blank(cell))
-        return gas_refuse(refusal, "wanted", "%s where a heading such as \"m, kg\" is due.",
-                          cell->kind == GAS_CELL_NUMBER ? "there is a number" : "there is a blank");
-    if (!alone)
-        return want(wanted, gas_piece_trim(rest), options, refusal);
-    while (gas_piece_next(&rest, &item))
-        if (!want(wanted, item, options, refusal))
-            return false;
-    return true;
-}
-
-bool gas_wanted_read(const struct gas_block *argument, const struct gas_options *options, struct gas_wanted *wanted,
-                     struct gas_refusal *refusal)
-{
-    wanted->columns = 0;
-    wanted->down = false;
-    if (!argument || gas_omitted(argument))
-        return true;
-    if (argument->rows > 1 && argument->columns > 1)
-        return gas_refuse(refusal, "wanted",
-                          "it fills %zu rows and %zu columns; give one row or one column of headings.", argument->rows,
-                          argument->columns);
-    wanted->down = argument->rows > 1;
-    for (size_t i = 0; i < argument->rows * argument->columns; i++)
-        if (!want_cell(wanted, &argument->cell[i], gas_single(argument), options, refusal))
-            return false;
-    return true;
 }

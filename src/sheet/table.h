@@ -1,11 +1,12 @@
 /*
  * table.h - the `given` and `wanted` arguments, whatever their form, brought to headings and rows of figures.
  *
- * given:   a text "7 bar(g); 35 degC; 12 m3"
+ * given:   a text "7 bar(g); 35 degC; 12 m3", with "T constant" and "P = 7 ± 0.05 bar(g)"
  *          a block heading | value, or label | value | unit (one case), or a column of such texts
  *          a table of numbers with `headings` beside it: one case per row, or per column when the headings stand in a
  *          column; a blank cell is "not given in this case". Headings may also stand inside the table itself, as its
- *          first row or first column
+ *          first row or first column. The units may have a row (or column) of their own after the names. Lines that
+ *          name no quantity (case, tag, date, remark) are passed over
  * wanted:  a text "m, kg" or "P2, bar(g); V2, m3", or a range of headings
  */
 #ifndef SHEET_TABLE_H
@@ -23,12 +24,13 @@ enum { GAS_COLUMNS = 32 };
 
 struct gas_table {
     size_t columns;
-    struct gas_heading heading[GAS_COLUMNS];
-    size_t rows;                   /* cases, at least 1 */
-    bool across;                   /* the cases stand side by side: so do the answers */
-    bool one_case;                 /* text or block: a single case whose figures are below */
-    double figure[GAS_COLUMNS];    /* of a single case, in the units of the headings; NAN: blank */
-    const struct gas_block *block; /* of a table; headings inside it are left out by the next two */
+    struct gas_heading heading[GAS_COLUMNS]; /* state GAS_CONSTANT: the same in every state, without a figure */
+    unsigned short line[GAS_COLUMNS];        /* where the figures of a column stand in the table, from 0 */
+    size_t rows;                             /* cases, at least 1 */
+    bool across;                             /* the cases stand side by side: so do the answers */
+    bool one_case;                           /* text or block: a single case whose figures are below */
+    double figure[GAS_COLUMNS];              /* of a single case, in the units of the headings; NAN: blank */
+    const struct gas_block *block;           /* of a table; headings inside it are left out by the next two */
     size_t first_row, first_column;
     double barometer; /* Pa, for cells that carry a unit of their own */
     struct gas_references references;

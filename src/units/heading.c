@@ -14,7 +14,8 @@ struct attempt { /* the best answer so far */
     const struct gas_references *references;
     struct gas_heading heading;
     struct gas_heading_fault fault;
-    int rank; /* of the fault: the more of the heading was understood, the higher */
+    bool tolerance; /* a plus-minus stood in front of the heading */
+    int rank;       /* of the fault: the more of the heading was understood, the higher */
 };
 
 static struct piece piece_of(const char *text, size_t length)
@@ -111,6 +112,10 @@ static bool read_symbol(const struct label *label, const struct gas_unit *unit, 
         heading->symbol = symbol_of_dimension(unit->dimension);
         return is_quantity_of_gases(unit->dimension);
     }
+    if (label->tolerance && unit->dimension == GAS_DIM_NUMBER && unit->scale != 1) {
+        heading->symbol = label->quantity->symbol; /* "±m, %": a share of the figure itself */
+        return true;
+    }
     for (const struct reading *reading = label->quantity->readings; reading->symbol != GAS_SYM_NONE; reading++)
         if (reading->dimension == unit->dimension && (!reading->reference_only || unit->reference_volume)) {
             heading->symbol = reading->symbol;
@@ -177,6 +182,7 @@ static bool try_split(struct attempt *attempt, struct piece label_text, struct p
     struct gas_unit unit;
     struct gas_heading_fault fault = {.status = GAS_HEADING_UNKNOWN};
     bool labelled = gas_label_parse(label_text.text, label_text.length, &label);
+    label.tolerance |= attempt->tolerance;
     unit_text = without_parentheses(unit_text);
     if (!labelled) {
         gas_label_nearest(label_text.text, label_text.length, fault.hint, sizeof fault.hint);
@@ -351,8 +357,7 @@ _Static_assert(sizeof(struct outcome) <= CACHE_VALUE, "a heading must fit into t
 static void parse_afresh(struct piece text, const struct gas_references *references, struct outcome *out)
 {
     struct attempt attempt = {.references = references};
-    bool tolerance;
-    struct piece rest = without_sign(text, &tolerance);
+    struct piece rest = without_sign(text, &attempt.tolerance);
     /* a unit alone may stand in brackets of its own: "[bar(g)]" */
     if (rest.length > 2 && rest.text[0] == '[' && rest.text[rest.length - 1] == ']')
         rest = piece_of(rest.text + 1, rest.length - 2);
@@ -360,7 +365,7 @@ static void parse_afresh(struct piece text, const struct gas_references *referen
     *out = (struct outcome){.good = rest.length > 0 && read_heading(&attempt, rest)};
     out->heading = attempt.heading;
     out->fault = attempt.fault;
-    out->heading.tolerance |= tolerance;
+    out->heading.tolerance |= attempt.tolerance;
     gas_copy_text(out->heading.text, sizeof out->heading.text, text.text, text.length);
     if (!out->good && out->fault.status == GAS_HEADING_OK)
         out->fault.status = GAS_HEADING_UNKNOWN;

@@ -92,6 +92,7 @@ const struct quantity gas_quantities[] = {
     Q("",          "stages,number of stages,stage count",                   STAGE_COUNT, NUMBER,      NUMBERS(STAGE_COUNT))
     Q("Z,z",       "compressibility factor,compressibility,z factor",       Z, NUMBER,                NUMBERS(Z))
     Q("",          "barometer,barometric pressure,atmospheric pressure,barometer pressure", BAROMETER, PRESSURE, PRESSURES(BAROMETER))
+    Q("",          "altitude,elevation,site altitude,site elevation,altitude of site,barometer at", ALTITUDE, LENGTH, LIST(R(LENGTH, ALTITUDE)))
 };
 /* clang-format on */
 

@@ -36,6 +36,7 @@ static const struct {
     /* US Standard Atmosphere 1976, eq. (18) and (33a), written out with bc */
     {"barometer at 1000 m", AT(barometer), 89876.28, 1e-7},
     {"barometer at 2500 m", AT(barometer), 74691.76, 1e-7},
+    {"altitude 2500 m", AT(barometer), 74691.76, 1e-7},
     {"barometer at 8202.1 ft", AT(barometer), 74691.76, 1e-5},
     {"agree 0.5 %", AT(agree), 0.005, 1e-14},
     {"agree 0,5%", AT(agree), 0.005, 1e-14},
@@ -81,6 +82,8 @@ static void words(void)
     check_true("flow", read("flow; hard errors", &options, &refusal) && options.system == GAS_FLOW);
     check_true("hard", options.hard_errors);
     check_true("closed", read("flow;closed", &options, &refusal) && options.system == GAS_CLOSED);
+    check_true("open", read("open", &options, &refusal) && options.open);
+    check_true("open, then closed", read("open; closed", &options, &refusal) && !options.open);
     check_true("omitted", gas_options_read(&(struct gas_block){0}, &options, &refusal) && !options.hard_errors);
 }
 
@@ -99,7 +102,7 @@ static void same_references_as_units(void)
 static const struct {
     const char *text, *part;
 } refused[] = {
-    {"barometre 1 bar", "Check options: \"barometre 1 bar\" is not an option; the options are: barometer at 2400 m; barometer 0.98 bar; work by gas"},
+    {"barometre 1 bar", "Check options: \"barometre 1 bar\" is not an option; the options are: barometer at 2400 m; barometer 0.98 bar; altitude 2400 m; work by gas"},
     {"7", "is not an option"},
     {"barometer", "write it like \"barometer 0.98 bar\""},
     {"barometer high", "write it like \"barometer 0.98 bar\""},

@@ -103,6 +103,15 @@ static const struct {
     {"one row, heading inside", "P1, bar(g)|#7|#6", "", "P1 (2 across) 7 | 6"},
     {"plus-minus", "#7|#0.1|#35", "P1, bar(g)|±P1, bar|T1, °C", "P1 ±P1 T1 (1 down) 7 0.1 35"},
     {"plus-minus with its own unit", "#7|10 kPa", "P1, bar(g)|±P1, bar", "P1 ±P1 (1 down) 7 0.1"},
+    {"a row of units", "#7|#35\\#6|#30", "P1|T1\\bar(g)|°C", "P1 T1 (2 down) 7 35 | 6 30"},
+    {"a column of units", "#7|#6\\#35|#30", "P1|bar(g)\\T1|°C", "P1 T1 (2 across) 7 35 | 6 30"},
+    {"a row of units inside", "P1|T1\\bar(g)|°C\\#7|#35", "", "P1 T1 (1 down) 7 35"},
+    {"a column of units inside", "P1|bar(g)|#7\\T1|°C|#35", "", "P1 T1 (1 across) 7 35"},
+    {"a line passed over", "x|#7|#35\\y|#6|#30", "Case|P1, bar(g)|T1, °C", "P1 T1 (2 down) 7 35 | 6 30"},
+    {"a line passed over, across", "#1|#2\\#7|#6\\#35|#30", "No.\\P1, bar(g)\\T1, °C", "P1 T1 (2 across) 7 35 | 6 30"},
+    {"a plus-minus in the text", "P1 = 7 ± 0.05 bar(g); 35 °C ± 1", "", "P1 ±P1 T ±T (1 case) 7 0.05 35 1"},
+    {"a share beside a reference volume", "V = 3 Nm3 ± 2 %", "", "n ±n (1 case) 3 2"},
+    {"a constant", "T constant; P1 = 1 bar", "", "T P1 (1 case) nan 1"},
     {"amounts of several bases", "#7|#2|#3", "m, kg|V1, Nm3|rho, kg/m3", "m n1 rho (1 down) 7 2 3"},
 };
 /* clang-format on */

@@ -188,6 +188,8 @@ static const struct row {
     {"stages", GAS_SYM_STAGE_COUNT, 0, GAS_DIM_NUMBER, NULL, ""},
     {"Z", GAS_SYM_Z, 0, GAS_DIM_NUMBER, NULL, ""},
     {"barometer, mbar", GAS_SYM_BAROMETER, 0, GAS_DIM_PRESSURE, "mbar", ""},
+    {"altitude, m", GAS_SYM_ALTITUDE, 0, GAS_DIM_LENGTH, "m", ""},
+    {"Site elevation (ft)", GAS_SYM_ALTITUDE, 0, GAS_DIM_LENGTH, "ft", ""},
 
     {"±P, bar", GAS_SYM_P, 0, GAS_DIM_PRESSURE, "bar", "t"},
     {"± T1 (K)", GAS_SYM_T, 1, GAS_DIM_TEMPERATURE, "K", "t"},
@@ -195,6 +197,11 @@ static const struct row {
     {"P1 ±, bar", GAS_SYM_P, 1, GAS_DIM_PRESSURE, "bar", "t"},
     {"P1 tolerance, bar", GAS_SYM_P, 1, GAS_DIM_PRESSURE, "bar", "t"},
     {"±, bar", GAS_SYM_P, 0, GAS_DIM_PRESSURE, "bar", "t"},
+    {"±P1, %", GAS_SYM_P, 1, GAS_DIM_NUMBER, "%", "t"},
+    {"+/- V (%)", GAS_SYM_V, 0, GAS_DIM_NUMBER, "%", "t"},
+    {"mass tolerance, %", GAS_SYM_M, 0, GAS_DIM_NUMBER, "%", "t"},
+    {"±n, %", GAS_SYM_N, 0, GAS_DIM_NUMBER, "%", "t"},
+    {"±n, -", GAS_SYM_EXPONENT, 0, GAS_DIM_NUMBER, "-", "t"},
     {"  T1,  K ", GAS_SYM_T, 1, GAS_DIM_TEMPERATURE, "K", ""},
 };
 /* clang-format on */
