@@ -123,14 +123,29 @@ static void print_gas(struct print *print)
 
 /* -- the givens ---------------------------------------------------------------------------------------------------- */
 
+/* "T constant": the same in every state, without a figure. */
+static void print_constant(struct print *print, const struct gas_heading *heading)
+{
+    struct line *line = print_line(print, "given");
+    snprintf(line->quantity, sizeof line->quantity, "%s", gas_symbol_text(heading->symbol));
+    snprintf(line->figures, sizeof line->figures, "the same in every state");
+    snprintf(line->source, sizeof line->source, "given: %.70s", heading->text);
+}
+
 static void print_given(struct print *print, size_t column)
 {
     char shown[80];
     const struct gas_heading *heading = &print->job->table.heading[column];
+    char name[GAS_NAME_TEXT];
     if (!(print->row.given >> column & 1))
         return;
+    if (heading->state == GAS_CONSTANT) {
+        print_constant(print, heading);
+        return;
+    }
     struct line *line = print_line(print, "given");
-    gas_quantity_name(line->quantity, heading->symbol, heading->state);
+    snprintf(line->quantity, sizeof line->quantity, "%s%s", heading->tolerance ? "±" : "",
+             gas_quantity_name(name, heading->symbol, heading->state));
     gas_figure(shown, sizeof shown, print->row.figure[column], &heading->unit);
     bool gauge = is_gauge(heading), level = heading->unit.dimension == GAS_DIM_TEMPERATURE && heading->unit.offset != 0;
     const char *sign = heading->unit.basis == GAS_VACUUM ? "barometer less " : "";

@@ -96,6 +96,19 @@ static bool is_heading(const struct gas_cell *cell)
                                       gas_passed_over((struct gas_piece){cell->text, cell->length}));
 }
 
+/* How many cells of a line are headings that show a unit. */
+static size_t headings_with_unit(struct gas_line line)
+{
+    size_t count = 0;
+    for (size_t i = 0; i < line.count; i++) {
+        const struct gas_cell *cell = &line.cell[i * line.step];
+        struct gas_heading heading;
+        count += gas_cell_is_word(cell) && gas_heading_parse(cell->text, cell->length, NULL, &heading, NULL) &&
+                 heading.has_unit;
+    }
+    return count;
+}
+
 static bool figures_from_column(const struct gas_block *given, size_t column)
 {
     for (size_t i = column; i < given->columns; i++)
@@ -131,7 +144,8 @@ static bool headed(const struct gas_block *given)
         return true;
     bool names = gas_cell_blank(top.cell) || gas_passed_over((struct gas_piece){top.cell->text, top.cell->length});
     return top.cell->kind != GAS_CELL_NUMBER && names && given->columns > 1 && !gas_cell_is_title(top.cell + 1) &&
-           all_words(gas_line_across(given, 0, 1)) && is_heading(top.cell + 1);
+           all_words(gas_line_across(given, 0, 1)) && is_heading(top.cell + 1) &&
+           headings_with_unit(top) >= headings_with_unit(gas_line_down(given, 0, 1)); /* V-1 may be a vessel's name */
 }
 
 enum gas_form gas_form_of(const struct gas_block *given)

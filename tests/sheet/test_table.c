@@ -109,6 +109,7 @@ static const struct {
     {"a column of units inside", "P1|bar(g)|#7\\T1|°C|#35", "", "P1 T1 (1 across) 7 35"},
     {"a line passed over", "x|#7|#35\\y|#6|#30", "Case|P1, bar(g)|T1, °C", "P1 T1 (2 down) 7 35 | 6 30"},
     {"a line passed over, across", "#1|#2\\#7|#6\\#35|#30", "No.\\P1, bar(g)\\T1, °C", "P1 T1 (2 across) 7 35 | 6 30"},
+    {"names across that look like symbols", "case|V-1|V-2\\P1, bar|#7|#6\\T1, K|#300|#310", "", "P1 T1 (2 across) 7 300 | 6 310"},
     {"a plus-minus in the text", "P1 = 7 ± 0.05 bar(g); 35 °C ± 1", "", "P1 ±P1 T ±T (1 case) 7 0.05 35 1"},
     {"a share beside a reference volume", "V = 3 Nm3 ± 2 %", "", "n ±n (1 case) 3 2"},
     {"a constant", "T constant; P1 = 1 bar", "", "T P1 (1 case) nan 1"},
