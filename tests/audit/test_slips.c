@@ -366,8 +366,8 @@ static bool fill_column(size_t injection, struct gas_cell *given, struct gas_cel
     struct sheet sheet, wrong;
     do
         sheet_random(&sheet, SUM_MASS);
-    while (strcmp(sheet.P_unit.text, "bar(g)") || strcmp(sheet.T_unit.text, "°C") ||
-           strcmp(sheet.answer_unit.text, "m, kg"));
+    while (strcmp(sheet.P_unit.text, "bar(g)") != 0 || strcmp(sheet.T_unit.text, "°C") != 0 ||
+           strcmp(sheet.answer_unit.text, "m, kg") != 0);
     sheet.V_unit = (struct sheet_unit){"m3", 1, false};
     sheet.gas = "N2";
     sheet.M = sheet.molar_mass = 28.014;
