@@ -38,6 +38,15 @@ static const char *shown_pressure(const struct spot *spot, char buffer[SHOWN], d
     return buffer;
 }
 
+/* A partial or a vapour pressure: absolute, whatever the reading stands on. */
+static const char *shown_absolute(const struct spot *spot, char buffer[SHOWN], double pressure)
+{
+    if (spot->reading[P].unit.basis == GAS_ABSOLUTE)
+        return shown_pressure(spot, buffer, pressure, 3);
+    snprintf(buffer, SHOWN, "%s bar", gas_shown_to(pressure / 1e5, 3).text);
+    return buffer;
+}
+
 static const char *shown(char buffer[SHOWN], const struct gas_reading *reading)
 {
     return gas_figure(buffer, SHOWN, gas_unit_from_si(&reading->unit, reading->si, GAS_ATMOSPHERE), &reading->unit);
@@ -84,7 +93,7 @@ static bool refuse_liquid(struct real_call *real, const struct spot *spot)
 {
     char vapour[SHOWN];
     const struct gas_part *part = spot->condensing.part;
-    shown_pressure(spot, vapour, spot->condensing.vapour, 3);
+    shown_absolute(spot, vapour, spot->condensing.vapour);
     if (real->choice->part_count == 1)
         return gas_refuse(&real->refusal, "pressure",
                           "%s is above the vapour pressure of %s at %s, about %s: it condenses.", spot->P, part->label,
@@ -191,8 +200,8 @@ static void add_condensing(struct text *text, const struct spot *spot)
     if (!condensing->part || condensing->load < 0.8)
         return;
     bool alone = condensing->part->x > 0.999999;
-    shown_pressure(spot, partial, condensing->partial, 3);
-    shown_pressure(spot, vapour, condensing->vapour, 3);
+    shown_absolute(spot, partial, condensing->partial);
+    shown_absolute(spot, vapour, condensing->vapour);
     if (alone)
         add(text, " Near its dew point: the vapour pressure is about %s.", vapour);
     else
@@ -219,7 +228,7 @@ static bool judge(struct real_call *real, const struct spot *spot, struct text *
     if (spot->condensing.load > 1) {
         add(text, "%s: at %s and %s %s condenses (vapour pressure about %s).",
             real->choice->part_count == 1 ? "Not a gas" : "Not a gas alone", spot->T, spot->P,
-            spot->condensing.part->label, shown_pressure(spot, vapour, spot->condensing.vapour, 3));
+            spot->condensing.part->label, shown_absolute(spot, vapour, spot->condensing.vapour));
         add_weakness(text, real, spot);
         return true;
     }

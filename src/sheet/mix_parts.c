@@ -29,15 +29,18 @@ static void add_part(struct gas_part *list, size_t *count, const struct gas_part
     list[(*count)++].x = x;
 }
 
-/* Air as nitrogen, oxygen and so on; their fractions add to 1. */
+/* Air as nitrogen, oxygen, argon and carbon dioxide; the traces, below 1 in 10 000, are left out. */
 static void add_air(struct gas_part *list, size_t *count, double x)
 {
+    const double least = 1e-4;
     const struct gas_air_part *air;
     size_t parts = gas_air_parts(&air);
     double sum = 0;
     for (size_t i = 0; i < parts; i++)
-        sum += air[i].fraction;
+        sum += air[i].fraction > least ? air[i].fraction : 0;
     for (size_t i = 0; i < parts; i++) {
+        if (!(air[i].fraction > least))
+            continue;
         const struct gas_species *species = gas_species_find(air[i].formula, strlen(air[i].formula));
         if (species)
             add_part(list, count, &(struct gas_part){species, species->name, 0, gas_species_molar_mass(species)},
