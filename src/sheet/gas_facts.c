@@ -7,7 +7,8 @@
 
 #define ROOM_TEMPERATURE 298.15 /* K */
 
-#define AS_GIVEN "as given"
+#define LONGEST_NAME 28 /* beside its label; a longer one stands in the last column */
+#define AS_GIVEN     "as given"
 
 static void cite(struct gas_facts *facts, const char *key)
 {
@@ -88,7 +89,8 @@ void gas_facts_of(const struct gas_choice *choice, struct gas_facts *facts)
     const struct gas_species *species = choice->part_count == 1 ? choice->part->species : NULL;
     const double M = choice->gas.molar_mass;
     *facts = (struct gas_facts){0};
-    add_text(facts, "name", "name|gas", choice->label, "");
+    add(facts, (struct gas_fact){"name", "name|gas", choice->label, NAN, GAS_DIM_NUMBER, "", "",
+                                 strlen(choice->label) > LONGEST_NAME});
     add_text(facts, "rule", "rule", choice->rule, AS_GIVEN);
     if (species) {
         add_text(facts, "formula", "formula", species->formula, "");
