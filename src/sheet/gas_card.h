@@ -59,6 +59,7 @@ struct gas_constant {
 
 struct gas_card {
     struct gas_refusal *refusal;
+    unsigned seen; /* items that stand there once: a bit each */
     struct gas_piece name, formula, cas, form, rule, source;
     struct gas_recipe by_mole, by_mass; /* the composition, where it has one */
     struct gas_piece cp, cp_text_unit;  /* a row cp: figure or formula */

@@ -192,10 +192,20 @@ static bool read_part(struct row *row)
     return gas_recipe_add(recipe, row->label.part, component, &marks, row->card->refusal);
 }
 
+/* What a card can say once only. */
+static bool is_single(enum gas_card_item item)
+{
+    return item >= GAS_CARD_M && item <= GAS_CARD_RULE;
+}
+
 static bool read_row(struct row *row)
 {
     struct gas_card *card = row->card;
     struct gas_piece text = text_of(value_cell(row, 0));
+    const unsigned bit = 1U << row->label.item;
+    if (is_single(row->label.item) && (card->seen & bit))
+        return refuse_row(row, "stands there twice; keep one.");
+    card->seen |= bit;
     switch (row->label.item) {
     case GAS_CARD_NAME:
         return card->name.length ? true : read_text(row, &card->name);
