@@ -173,23 +173,30 @@ bool gas_refuse_temperature(struct gas_refusal *refusal, const char *what, doubl
     return gas_refuse(refusal, what, "%s is outside the data for %s (%s to %s).%s", figure, gas_label, from, to, slip);
 }
 
-bool gas_accept_level(struct gas_refusal *refusal, const char *what, double figure, const struct gas_unit *unit,
-                      double barometer)
+static bool refuse_level(struct gas_refusal *refusal, const char *what, double figure, const struct gas_unit *unit,
+                         double barometer)
 {
-    char shown[80], limit[40];
+    char shown[80], limit[80];
     gas_figure(shown, sizeof shown, figure, unit);
-    if (!isfinite(figure))
-        return gas_refuse(refusal, what, "the figure is not finite; look for a division by zero where it comes from.");
-    double si = gas_unit_to_si(unit, figure, barometer);
-    if (unit->dimension == GAS_DIM_TEMPERATURE && si <= 0) {
+    if (unit->dimension == GAS_DIM_TEMPERATURE) {
         gas_figure(limit, sizeof limit, gas_unit_from_si(unit, 0, barometer), unit);
-        return gas_refuse(refusal, what, "%s is %s absolute zero (%s).", shown, si < 0 ? "below" : "at", limit);
+        return gas_refuse(refusal, what, "%s is %s absolute zero (%s).", shown,
+                          gas_unit_to_si(unit, figure, barometer) < 0 ? "below" : "at", limit);
     }
-    if (unit->dimension != GAS_DIM_PRESSURE || si >= 0)
-        return true;
     if (unit->basis == GAS_ABSOLUTE)
         return gas_refuse(refusal, what,
                           "%s is below a perfect vacuum; if it is a gauge reading, write bar(g) or psig.", shown);
-    gas_number_format(limit, sizeof limit, barometer / 1e5, 6);
-    return gas_refuse(refusal, what, "%s is below a perfect vacuum at a barometer of %s bar.", shown, limit);
+    return gas_refuse(refusal, what, "%s is below a perfect vacuum at a barometer of %s bar.", shown,
+                      gas_shown(barometer / 1e5).text);
+}
+
+/* Called for every figure of every row: nothing is written unless it is refused. */
+bool gas_accept_level(struct gas_refusal *refusal, const char *what, double figure, const struct gas_unit *unit,
+                      double barometer)
+{
+    if (!isfinite(figure))
+        return gas_refuse(refusal, what, "the figure is not finite; look for a division by zero where it comes from.");
+    double si = gas_unit_to_si(unit, figure, barometer);
+    bool good = unit->dimension == GAS_DIM_TEMPERATURE ? si > 0 : unit->dimension != GAS_DIM_PRESSURE || si >= 0;
+    return good || refuse_level(refusal, what, figure, unit, barometer);
 }
