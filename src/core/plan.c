@@ -116,22 +116,33 @@ struct round {
     bool fresh[GAS_SLOTS];
 };
 
+/* Most relations miss no variable, or several: told before the terms are laid out. */
+static bool misses_one(const struct gas_plan *plan, const struct relation *row, int state_a, int state_b)
+{
+    int missing = 0;
+    for (int i = 0; i < row->count; i++) {
+        unsigned char variable = row->factor[i].variable;
+        if (row->pair && plan->shared[variable])
+            continue;
+        missing += !plan->found[plan->slot[state_a][variable]];
+        if (row->pair)
+            missing += !plan->found[plan->slot[state_b][variable]];
+    }
+    return missing == 1;
+}
+
 static void try_relation(struct round *round, int relation, int state_a, int state_b)
 {
     struct gas_plan *plan = round->plan;
-    struct relation_term term[2 * RELATION_FACTORS];
-    int count = gas_relation_terms(plan, relation, state_a, state_b, term);
-    int missing = -1;
-    for (int i = 0; i < count; i++) {
-        if (plan->found[term[i].slot])
-            continue;
-        if (missing >= 0)
-            return;
-        missing = i;
-    }
-    if (missing < 0 || (round->fresh[term[missing].slot] && !round->fragile) || plan->step_count >= GAS_STEPS)
-        return;
     const struct relation *row = &gas_relations[relation];
+    struct relation_term term[2 * RELATION_FACTORS];
+    if (!misses_one(plan, row, state_a, state_b))
+        return;
+    int count = gas_relation_terms(plan, relation, state_a, state_b, term), missing = 0;
+    while (missing < count - 1 && plan->found[term[missing].slot])
+        missing++;
+    if ((round->fresh[term[missing].slot] && !round->fragile) || plan->step_count >= GAS_STEPS)
+        return;
     if (!((round->fragile ? row->fragile : row->firm) & 1u << term[missing].variable))
         return;
     round->fresh[term[missing].slot] = true;
