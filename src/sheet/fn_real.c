@@ -141,9 +141,11 @@ static void add(struct text *text, const char *format, ...) __attribute__((forma
 
 static void add(struct text *text, const char *format, ...)
 {
+    char *at = text->at + text->used;
+    size_t room = sizeof text->at - text->used;
     va_list values;
     va_start(values, format);
-    int needed = vsnprintf(text->at + text->used, sizeof text->at - text->used, format, values);
+    int needed = vsnprintf(at, room, format, values); /* NOLINT(clang-analyzer-valist.*): started above */
     va_end(values);
     text->used += needed > 0 ? (size_t)needed : 0;
     if (text->used >= sizeof text->at)

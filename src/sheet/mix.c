@@ -12,6 +12,7 @@
 #include "sheet/solver.h"
 
 enum { NEED_P, NEED_T, NEED_N, NEEDS };
+enum { ROWS_MOST = 1000 }; /* every row is held against every other */
 
 /* -- the range ----------------------------------------------------------------------------------------------------- */
 
@@ -153,7 +154,7 @@ static bool same_gas(const struct gas_choice *a, const struct gas_choice *b)
 static int group_of(const struct gas_mix *mix, const struct gas_choice *choice)
 {
     for (size_t i = 0; i < mix->count; i++)
-        if (same_gas(mix->choice[i], choice))
+        if (same_gas(mix->rows[i].choice, choice))
             return mix->same[i];
     return (int)mix->count;
 }
@@ -169,15 +170,17 @@ static bool add_row(struct gas_mix *mix, const struct gas_cell *gas, size_t row,
         return true;
     if (gas->kind != GAS_CELL_TEXT || gas_cell_blank(gas))
         return gas_refuse(refusal, "gas", "it is missing; give its name, formula or a mixture.");
+    if (mix->count == ROWS_MOST)
+        return gas_refuse(refusal, "streams", "there are more than %d; mix them in parts.", ROWS_MOST);
     const struct gas_choice *choice = gas_choose_text(gas->text, gas->length, refusal);
     if (!choice)
         return false;
     int same = group_of(mix, choice);
-    mix->choice[mix->count++] = choice; /* given back with the others, whatever follows */
+    mix->rows[mix->count++].choice = choice; /* given back with the others, whatever follows */
     job->choice = choice;
     job->gas = choice->gas;
     mix->same[mix->count - 1] = same;
-    mix->row[mix->count - 1] = row + 1;
+    mix->rows[mix->count - 1].number = row + 1;
     return gas_job_case(job, &given, &figures, refusal) &&
            portion_of(job, &figures, &mix->portion[mix->count - 1], refusal);
 }
@@ -186,12 +189,10 @@ static bool add_rows(struct gas_mix *mix, const struct gas_block *streams, const
                      struct gas_arena *arena, struct gas_refusal *refusal)
 {
     size_t rows = split->figures.rows;
-    mix->choice = gas_arena_take(arena, rows, sizeof *mix->choice);
+    mix->rows = gas_arena_take(arena, rows, sizeof *mix->rows);
     mix->portion = gas_arena_take(arena, rows, sizeof *mix->portion);
-    mix->content = gas_arena_take(arena, rows, sizeof *mix->content);
     mix->same = gas_arena_take(arena, rows, sizeof *mix->same);
-    mix->row = gas_arena_take(arena, rows, sizeof *mix->row);
-    if (!mix->choice || !mix->portion || !mix->content || !mix->same || !mix->row)
+    if (!mix->rows || !mix->portion || !mix->same)
         return refuse_memory(refusal);
     for (size_t row = 0; row < rows; row++) {
         struct gas_refusal why = {0};
@@ -206,12 +207,12 @@ static bool add_rows(struct gas_mix *mix, const struct gas_block *streams, const
 static bool refuse_temperature(const struct gas_mix *mix, size_t index, double limit, struct gas_refusal *refusal)
 {
     char what[40];
-    const struct gas_choice *choice = mix->choice[index];
+    const struct gas_choice *choice = mix->rows[index].choice;
     struct gas_range range = gas_range_of(&choice->gas);
     struct gas_unit unit = gas_job_unit(&mix->job, GAS_DIM_TEMPERATURE, "°C");
     double T = mix->portion[index].T;
     bool own = T < range.T_from || T > range.T_to;
-    snprintf(what, sizeof what, "row %zu, T", mix->row[index]);
+    snprintf(what, sizeof what, "row %zu, T", mix->rows[index].number);
     if (own)
         return gas_refuse_temperature(refusal, what, T, &unit, choice->label, range.T_from, range.T_to);
     char shown[GAS_SHOWN];
@@ -229,10 +230,10 @@ static bool refuse_mixing(const struct gas_mix *mix, const struct gas_result *fa
                    ? gas_refuse(refusal, "options",
                                 "the outlet pressure is too high: no mixing of these streams reaches it.")
                    : gas_refuse(refusal, "streams", "there is nothing to mix: every amount is zero.");
-    snprintf(what, sizeof what, "row %zu", mix->row[index]);
+    snprintf(what, sizeof what, "row %zu", mix->rows[index].number);
     if (fault->status == GAS_NO_HEAT_CAPACITY)
         return gas_refuse(refusal, what, "%s has no heat capacity; give one after '|', such as | k = 1.4.",
-                          mix->choice[index]->label);
+                          mix->rows[index].choice->label);
     if (fault->status == GAS_OUTSIDE_DATA)
         return refuse_temperature(mix, index, fault->figure, refusal);
     return gas_refuse(refusal, what, "%s %s.", gas_shown(fault->figure).text, gas_status_words(fault->status));
@@ -265,7 +266,7 @@ bool gas_mix_open(struct gas_mix *mix, const struct gas_block *streams, const st
                   const struct gas_block *options, struct gas_arena *arena, struct gas_refusal *refusal)
 {
     struct gas_job *job = &mix->job;
-    struct split split;
+    struct split split = {0};
     memset(mix, 0, sizeof *mix);
     job->task = &mix_task;
     job->options = gas_options_default;
@@ -284,7 +285,7 @@ bool gas_mix_open(struct gas_mix *mix, const struct gas_block *streams, const st
 void gas_mix_close(struct gas_mix *mix)
 {
     for (size_t i = 0; i < mix->count; i++)
-        gas_choice_release(mix->choice[i]);
+        gas_choice_release(mix->rows[i].choice);
     mix->count = 0;
 }
 

@@ -18,6 +18,13 @@ struct gas_content {
     const struct gas_part *part;
 };
 
+/* A row that holds something. */
+struct gas_mix_row {
+    const struct gas_choice *choice;
+    struct gas_content content;
+    size_t number; /* of the range, from 1 behind the headings: for sentences */
+};
+
 /* A component of the blend, merged over all rows. */
 struct gas_mixed_part {
     const struct gas_part *part; /* of one of the contents */
@@ -26,12 +33,10 @@ struct gas_mixed_part {
 
 struct gas_mix {
     struct gas_job job; /* headings, options, wanted; its gas is that of the row last looked at */
-    size_t count;       /* rows that hold something */
-    const struct gas_choice **choice;
+    size_t count;
+    struct gas_mix_row *rows;
     struct gas_portion *portion;
-    struct gas_content *content;
-    int *same;   /* rows of the same gas have the same number */
-    size_t *row; /* of the range, from 1 behind the headings: for sentences */
+    int *same; /* rows of the same gas have the same number */
     struct gas_blend blend;
     double molar_mass; /* kg/mol of the blend */
     size_t parts;

@@ -12,7 +12,7 @@ static bool is_air(const struct gas_part *part)
 static bool only_air(const struct gas_mix *mix)
 {
     for (size_t i = 0; i < mix->count; i++)
-        if (mix->choice[i]->part_count != 1 || !is_air(mix->choice[i]->part))
+        if (mix->rows[i].choice->part_count != 1 || !is_air(mix->rows[i].choice->part))
             return false;
     return true;
 }
@@ -86,18 +86,18 @@ bool gas_mix_merge(struct gas_mix *mix, struct gas_arena *arena, struct gas_refu
     double n = 0, mass = 0;
     bool split_air = !only_air(mix);
     for (size_t i = 0; i < mix->count; i++) {
-        if (!content_of(mix->choice[i], split_air, arena, &mix->content[i]))
+        if (!content_of(mix->rows[i].choice, split_air, arena, &mix->rows[i].content))
             return gas_refuse(refusal, "streams", "there are too many for the memory at hand; give fewer.");
-        most += mix->content[i].count;
+        most += mix->rows[i].content.count;
     }
     mix->part = gas_arena_take(arena, most, sizeof *mix->part);
     if (!mix->part)
         return gas_refuse(refusal, "streams", "there are too many for the memory at hand; give fewer.");
     for (size_t i = 0; i < mix->count; i++) {
         n += mix->portion[i].n;
-        mass += mix->portion[i].n * mix->choice[i]->gas.molar_mass;
-        for (size_t k = 0; mix->portion[i].n > 0 && k < mix->content[i].count; k++)
-            part_like(mix, &mix->content[i].part[k])->n += mix->portion[i].n * mix->content[i].part[k].x;
+        mass += mix->portion[i].n * mix->rows[i].choice->gas.molar_mass;
+        for (size_t k = 0; mix->portion[i].n > 0 && k < mix->rows[i].content.count; k++)
+            part_like(mix, &mix->rows[i].content.part[k])->n += mix->portion[i].n * mix->rows[i].content.part[k].x;
     }
     mix->molar_mass = mass / n;
     return true;
@@ -116,8 +116,8 @@ double gas_mix_shared_entropy(struct gas_mix *mix)
             group += mix->same[k] == mix->same[p] ? mix->portion[k].n : 0;
         if (mix->portion[p].n <= 0)
             continue;
-        for (size_t i = 0; i < mix->content[p].count; i++) {
-            const struct gas_part *part = &mix->content[p].part[i];
+        for (size_t i = 0; i < mix->rows[p].content.count; i++) {
+            const struct gas_part *part = &mix->rows[p].content.part[i];
             own += part->x > 0 ? part->x * log(part->x * mix->blend.n / part_like(mix, part)->n) : 0;
         }
         sum += mix->portion[p].n * (log(group / mix->blend.n) + own);
