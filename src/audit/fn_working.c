@@ -112,9 +112,10 @@ static void print_conventions(struct print *print)
 static void print_gas(struct print *print)
 {
     const struct gas_job *job = print->job;
-    struct line *line = print_basis(print, "gas", "", job->choice->source);
-    snprintf(line->formula, sizeof line->formula, "%.80s%s%.60s", job->choice->label, job->choice->rule[0] ? " | " : "",
-             job->choice->rule);
+    const struct gas_choice *choice = job->choice;
+    struct line *line = print_basis(print, "gas", "", choice->source_key[0] ? choice->source_key : choice->source);
+    snprintf(line->formula, sizeof line->formula, "%.80s%s%.60s", choice->label, choice->rule[0] ? " | " : "",
+             choice->rule);
     set_result(print_basis(print, "R", "molar gas constant", "BIPM SI Brochure, 9th ed.; exact"), job->gas.R,
                "J/(mol K)");
     set_result(print_basis(print, "M", "molar mass", "IUPAC standard atomic weights 2021, or the card"),

@@ -114,6 +114,17 @@ bool read_kelvin_as_degrees(struct replay *replay, const struct site *site, stru
     return true;
 }
 
+/* -12 degC read as 12 degC. */
+bool read_lost_sign(struct replay *replay, const struct site *site, struct reading *reading, double parameter)
+{
+    (void)parameter;
+    double figure = replay_figure(replay->desk, replay->truth, (size_t)(site - replay->desk->site));
+    if (site->kind == SITE_WANTED || site->unit->dimension != GAS_DIM_TEMPERATURE || !(figure < 0))
+        return false;
+    reading->shift -= 2 * figure * reading->unit.scale;
+    return true;
+}
+
 bool read_other_zero_c(struct replay *replay, const struct site *site, struct reading *reading, double parameter)
 {
     (void)replay, (void)site;

@@ -6,6 +6,9 @@
 /* Two slips together that are less likely than this are chance rather than explanation (common practice). */
 static const double WORTH = 0.004;
 
+/* Two slips together are not named behind one that explains the figure when they score below this share of it. */
+static const double ACCIDENT = 0.2;
+
 enum { KEPT = 40, ROW_TRIES = 2500, CALL_TRIES = 60000 };
 
 /* One case being searched. */
@@ -205,6 +208,9 @@ static void name_best(struct hunt *hunt)
         /* one rounded constant is enough: two that do the same say nothing more */
         bool named = row->count && is_rounding(hunt->audit, row->explanation[0].part[0]) &&
                      row->explanation[0].part[1] < 0 && hunt->best[i].part[1] >= 0;
+        /* behind one slip that explains the figure, an accident of two unlikely ones is noise */
+        named = named || (hunt->best[0].part[1] < 0 && hunt->best[i].part[1] >= 0 &&
+                          hunt->best[i].score < ACCIDENT * hunt->best[0].score);
         for (size_t k = 0; k < row->count; k++)
             named = named || contains(&hunt->best[i], &row->explanation[k]);
         if (!named)

@@ -44,6 +44,7 @@ static const struct slip table[] = {
     /* temperatures */
     READ("degrees as absolute", TEMPERATURE, SITES, 0.90, "temperatures not made absolute", "not made absolute", "answer left absolute, not turned to degrees", read_degrees_as_absolute, 0),
     READ("kelvin as degrees",   TEMPERATURE, SITES, 0.30, "absolute temperatures made absolute once more", "made absolute once more", "absolute answer turned to degrees", read_kelvin_as_degrees, 0),
+    READ("sign lost",           TEMPERATURE, GIVENS, 0.40, "minus signs of temperatures lost", "read without its minus sign", "", read_lost_sign, 0),
     READ("C as F",              TEMPERATURE, SITES, 0.15, "\xC2\xB0""C and \xC2\xB0""F mistaken for each other", "read on the other scale (\xC2\xB0""C, \xC2\xB0""F)", "answer on the other scale (\xC2\xB0""C, \xC2\xB0""F)", read_other_degree_size, 0),
     READ("273 for F",           TEMPERATURE, SITES, 0.15, "273.15 added to \xC2\xB0""F", "made absolute with 273.15", "made absolute with 273.15", read_other_zero_f, 273.15),
     READ("460 for C",           TEMPERATURE, SITES, 0.10, "459.67 added to \xC2\xB0""C", "made absolute with 459.67", "made absolute with 459.67", read_other_zero_c, 459.67),

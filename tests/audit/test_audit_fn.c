@@ -37,6 +37,8 @@ static const struct { const char *formula, *part; } verdicts[] = {
     {"GAS.AUDIT(\"N2\";\"7 bar(g); 35 °C; 12 m3\";\"m, kg\";77.7777)", "No known slip gives this figure."},
     {"GAS.AUDIT(\"N2\";\"7 bar(g); 35 °C; 12 m3\";\"m, kg\";\"105140 g\")", "agrees"},
     {"GAS.AUDIT(\"N2\";\"2 kg; 25 °C; 1 bar\";\"W, kJ\";368;\"isothermal to 8 bar\")", "agrees: 368.02 kJ"},
+    /* (150 + 1.01325) bar 0.05 m3 28.014 kg/kmol / (R (273.15 + 12) K) = 8.9218 kg */
+    {"GAS.AUDIT(\"N2\";\"150 bar(g); -12 °C; 50 L\";\"m, kg\";8.922)", "Likely: -12 °C read without its minus sign (gives 8.9218)"},
     {"GAS.AUDIT(\"N2\";\"2 kg; 25 °C; 1 bar\";\"W, kJ\";159.83;\"isothermal to 8 bar\")", "Likely: log10 used for ln (gives 159.83)"},
     {"GAS.AUDIT(\"N2\";\"2 kg; 25 °C; 1 bar\";\"W, kJ\";-368.02;\"isothermal to 8 bar\")", "the other sign convention (gives -368.02)"},
     {"GAS.AUDIT(\"N2\";\"2 kg; 25 °C; 1 bar\";\"W, kJ\";368.02;\"isothermal to 8 bar\";;\"work by gas\")", "the other sign convention (gives 368.02)"},

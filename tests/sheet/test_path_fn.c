@@ -108,7 +108,9 @@ static void works_and_heats(void)
         {"state-2", "GAS.END(\"Ar\";\"1 mol; 300 K; 1 bar\";\"isobaric to 600 K; isochoric to 300 K\";\"T2, K\")", 600,
          NULL},
         {"end-m", "GAS.END(\"Ar\";\"2 mol; 300 K; 1 bar\";\"isobaric to 600 K\";\"m, kg\")", 2 * M_AR, NULL},
-        {"agreeing-P2", "GAS.WORK(\"Ar\";\"P1 = 1 bar; T1 = 300 K; P2 = 8 bar; T2 = 300 K\";\"isothermal to 8 bar\";\"J/mol\")", R * 300 * log(8), NULL},
+        {"agreeing-P2",
+         "GAS.WORK(\"Ar\";\"P1 = 1 bar; T1 = 300 K; P2 = 8 bar; T2 = 300 K\";\"isothermal to 8 bar\";\"J/mol\")",
+         R * 300 * log(8), NULL},
         {"no-cp-W", "GAS.WORK(\"R-134a\";\"300 K; 1 bar; 1 mol\";\"isobaric to 400 K\";\"J\")", -100 * R, NULL},
         {"cycle-otto",
          "GAS.CYCLE(\"air | k = 1.4\";\"300 K; 1 bar\";\"adiabatic to V x 0.125; isochoric to 1800 K; adiabatic to V x "
@@ -132,7 +134,10 @@ static void tables(void)
          "GAS.WORK(\"Ar\";{1;300;4;80};\"adiabatic efficiency to P2\";\"J/mol\";{\"P1, bar\";\"T1, K\";\"P2, "
          "bar\";\"efficiency, %\"};\"flow\")",
          ARGON_CP * 300 * (pow(4, R / ARGON_CP) - 1) / 0.8, NULL},
-        {"row-barometer", "GAS.WORK(\"Ar\";{0;300;7;0.95};\"isothermal to P2\";\"J/mol\";{\"P1, bar(g)\";\"T1, K\";\"P2, bar(g)\";\"barometer, bar\"})", R * 300 * log(7.95 / 0.95), NULL},
+        {"row-barometer",
+         "GAS.WORK(\"Ar\";{0;300;7;0.95};\"isothermal to P2\";\"J/mol\";{\"P1, bar(g)\";\"T1, K\";\"P2, "
+         "bar(g)\";\"barometer, bar\"})",
+         R * 300 * log(7.95 / 0.95), NULL},
     };
     CHECK_ROWS(rows, 1e-9);
 }
@@ -168,9 +173,12 @@ static void refusals(void)
         {"bad-unit", "GAS.WORK(\"N2\";\"1 kg; 25 °C; 1 bar\";\"isothermal to 8 baar\";\"kJ\")", 0, "Check leg 1"},
         {"mass-ending", "GAS.WORK(\"N2\";\"1 kg; 25 °C; 1 bar\";\"isothermal to 8 kg\";\"kJ\")", 0, "Check leg 1"},
         {"points-0", "GAS.TRACE(\"N2\";\"1 kg; 25 °C; 1 bar\";\"isothermal to 8 bar\";;0)", 0, "Check points"},
-        {"idle-P2", "GAS.WORK(\"Ar\";\"P1 = 1 bar; T1 = 300 K; P2 = 7 bar\";\"isothermal to 8 bar\";\"J/mol\")", 0, "Check P2: 7 bar is given, but the legs lead to 8 bar"},
-        {"idle-P4", "GAS.WORK(\"Ar\";\"P1 = 1 bar; T1 = 300 K; P4 = 7 bar\";\"isothermal to 8 bar\";\"J/mol\")", 0, "Check P4: the path ends at state 2"},
-        {"no-cp", "GAS.HEAT(\"R-134a\";\"300 K; 1 bar; 1 mol\";\"isobaric to 400 K\";\"J\")", 0, "has no heat capacity"},
+        {"idle-P2", "GAS.WORK(\"Ar\";\"P1 = 1 bar; T1 = 300 K; P2 = 7 bar\";\"isothermal to 8 bar\";\"J/mol\")", 0,
+         "Check P2: 7 bar is given, but the legs lead to 8 bar"},
+        {"idle-P4", "GAS.WORK(\"Ar\";\"P1 = 1 bar; T1 = 300 K; P4 = 7 bar\";\"isothermal to 8 bar\";\"J/mol\")", 0,
+         "Check P4: the path ends at state 2"},
+        {"no-cp", "GAS.HEAT(\"R-134a\";\"300 K; 1 bar; 1 mol\";\"isobaric to 400 K\";\"J\")", 0,
+         "has no heat capacity"},
         {"passed-on", "GAS.WORK(\"N2\";\"1 kg; 25 °C; 1 bar\";\"Check P1: from elsewhere.\";\"kJ\")", 0,
          "Check P1: from elsewhere."},
     };
