@@ -52,10 +52,8 @@ const char *gas_shown_temperature(const struct gas_job *job, const struct gas_ca
     return gas_figure(buffer, GAS_SHOWN, gas_unit_from_si(&unit, T, figures->barometer), &unit);
 }
 
-bool gas_refuse_no_basis(const struct gas_job *job, const struct gas_heading *heading, double n,
-                         struct gas_refusal *refusal)
+bool gas_refuse_no_basis(const struct gas_heading *heading, double n, struct gas_refusal *refusal)
 {
-    (void)job;
     if (isnan(n) && gas_dimension_extent(heading->unit.dimension) != GAS_EXTENT_NONE)
         return gas_refuse(refusal, heading->text,
                           "the amount of gas does not follow from the givens; give m, n, V or Nm3, or their flows, or "

@@ -355,7 +355,7 @@ static bool quantity(const struct gas_job *job, const struct gas_stages_case *st
                           "staged compression gives shaft power, input power, cooler duty, T2, T (the hottest "
                           "discharge), ratio, stages, and m, n, V at the suction; ask for those.");
     *si = gas_job_from_molar(job, dimension, molar, stages->n, heading->unit.dimension);
-    return !isnan(*si) || gas_refuse_no_basis(job, heading, stages->n, refusal);
+    return !isnan(*si) || gas_refuse_no_basis(heading, stages->n, refusal);
 }
 
 static bool run(const struct gas_job *job, const struct gas_case *figures, double *answers, struct gas_refusal *refusal)

@@ -120,8 +120,9 @@ static bool wall_of(const struct gas_job *job, const struct gas_case *figures, s
         return gas_refuse(refusal, "T wall", "UA needs the temperature of the wall; give it, such as T wall = 20 °C.");
     if (conductance && isnan(vessel->time))
         return gas_refuse(refusal, "time", "UA needs the time that the wall has; give it, such as time = 5 min.");
-    if (!conductance && !isnan(vessel->T_wall))
-        return gas_refuse(refusal, "UA", "T wall is given, but no conductance; give UA, such as UA = 12 W/K.");
+    if (!conductance && (!isnan(vessel->T_wall) || !isnan(vessel->time)))
+        return gas_refuse(refusal, "UA", "%s is given, but no conductance to go with it; give UA, such as UA = 12 W/K.",
+                          isnan(vessel->T_wall) ? "time" : "T wall");
     return true;
 }
 

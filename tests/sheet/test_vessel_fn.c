@@ -114,6 +114,7 @@ static void refusals(void)
         {"two-walls", "GAS.FILL(\"air\";\"V = 50 L; P1 = 1 bar; T1 = 20 °C; P2 = 9 bar; T line = 20 °C; Q = 1 kJ\";\"T2, K\";;\"isothermal\")", 0, "is said twice"},
         {"wall-no-T", "GAS.FILL(\"air\";\"V = 50 L; P1 = 1 bar; T1 = 20 °C; P2 = 9 bar; T line = 20 °C; UA = 5 W/K\";\"T2, K\")", 0, "Check T wall"},
         {"wall-no-time", "GAS.FILL(\"air\";\"V = 50 L; P1 = 1 bar; T1 = 20 °C; P2 = 9 bar; T line = 20 °C; UA = 5 W/K; T wall = 20 °C\";\"T2, K\")", 0, "Check time"},
+        {"time-no-UA", "GAS.FILL(\"air\";\"V = 50 L; P1 = 1 bar; T1 = 20 °C; P2 = 9 bar; T line = 20 °C; time = 60 s\";\"T2, K\")", 0, "Check UA: time is given"},
         {"wall-no-UA", "GAS.FILL(\"air\";\"V = 50 L; P1 = 1 bar; T1 = 20 °C; P2 = 9 bar; T line = 20 °C; T wall = 20 °C\";\"T2, K\")", 0, "Check UA"},
         {"too-much-lost", "GAS.FILL(\"air\";\"V = 10 L; P1 = 1 bar; T1 = 20 °C; P2 = 9 bar; T line = 20 °C; Q = -1e9 J\";\"T2, K\")", 0, "the gas gets colder than"},
         {"negative-mass", "GAS.FILL(\"air\";\"m1 = -1 kg; P1 = 1 bar; T1 = 20 °C; P2 = 9 bar; T line = 20 °C\";\"T2, K\")", 0, "Check m1: -1 kg"},
