@@ -25,6 +25,12 @@ static bool fits(const struct gas_input *input, const struct gas_unit *unit, str
                       gas_dimension_si(input->dimension));
 }
 
+/* As the catalogue calls the argument that names the unit. */
+static const char *kind_of(enum gas_dimension dimension)
+{
+    return dimension == GAS_DIM_TEMPERATURE ? "temperature" : dimension == GAS_DIM_PRESSURE ? "pressure" : "change";
+}
+
 bool gas_input_open(struct gas_input *input, const struct gas_block *block, const struct gas_block *unit,
                     struct gas_refusal *refusal)
 {
@@ -35,7 +41,7 @@ bool gas_input_open(struct gas_input *input, const struct gas_block *block, cons
         return gas_refuse(refusal, input->name, "it is left out; give a figure, a cell or a range.");
     if (gas_omitted(unit))
         return true;
-    snprintf(unit_name, sizeof unit_name, "unit of %s", input->name);
+    snprintf(unit_name, sizeof unit_name, "%s unit", kind_of(input->dimension));
     return gas_unit_read(unit, unit_name, &input->unit, refusal) && fits(input, &input->unit, refusal);
 }
 
@@ -66,8 +72,10 @@ static bool read_text(const struct gas_input *input, const struct gas_cell *cell
     size_t used = 0;
     struct gas_unit_fault fault;
     if (!gas_number_parse(cell->text, cell->length, figure, &used))
-        return gas_refuse(refusal, input->name, "%s is not a number; give a figure, or a figure with its unit.",
-                          gas_quoted(shown, sizeof shown, cell->text, cell->length));
+        return gas_refuse(refusal, input->name, "%s is not a number; give %s.",
+                          gas_quoted(shown, sizeof shown, cell->text, cell->length),
+                          strchr("0123456789", cell->text[0]) ? "it without separators of thousands, such as 1234.5 K"
+                                                              : "a figure, or a figure with its unit");
     if (used + strspn(cell->text + used, " ") == cell->length)
         return true;
     if (!gas_unit_parse(cell->text + used, cell->length - used, NULL, unit, &fault))

@@ -42,9 +42,11 @@ static bool cycle_quantity(const struct gas_path_call *path, const struct gas_pa
             return gas_refuse(refusal, heading->text, "%s", row->why_not);
         bool energy = row->molar == GAS_DIM_MOLAR_ENERGY;
         *si = energy ? gas_job_from_molar(&path->job, row->molar, figure, solved->n, heading->unit.dimension) : figure;
-        return !isnan(*si) || gas_refuse(refusal, heading->text,
-                                         "the amount of gas does not follow from the "
-                                         "givens; give m, n or V, or ask per kg.");
+        return !isnan(*si) ||
+               gas_refuse(refusal, "wanted",
+                          "\"%s\" needs the amount of gas, which does not follow from the givens; give m, "
+                          "n or V, or ask per kg.",
+                          heading->text);
     }
     return gas_refuse(refusal, heading->text,
                       "a cycle gives W net, Q in, Q out, efficiency, COP heating, COP "

@@ -92,10 +92,13 @@ struct heat_call {
 static bool refuse_answer_unit(struct heat_call *heat, const struct gas_unit *unit)
 {
     char shown[80];
-    return gas_refuse(&heat->refusal, "wanted", "%s is the unit of %s, but the answer is %s; give %s or %s.",
-                      gas_quoted(shown, sizeof shown, unit->text, strlen(unit->text)),
-                      gas_dimension_words(unit->dimension), gas_dimension_words(heat->question->molar),
-                      gas_dimension_si(heat->question->molar), gas_dimension_si(heat->question->specific));
+    gas_quoted(shown, sizeof shown, unit->text, strlen(unit->text));
+    if (heat->question->molar == GAS_DIM_NUMBER)
+        return gas_refuse(&heat->refusal, "wanted", "%s is the unit of %s, but the answer is a ratio; leave it out.",
+                          shown, gas_dimension_words(unit->dimension));
+    return gas_refuse(&heat->refusal, "wanted", "%s is the unit of %s; the answer needs one such as %s or %s.", shown,
+                      gas_dimension_words(unit->dimension), gas_dimension_si(heat->question->molar),
+                      gas_dimension_si(heat->question->specific));
 }
 
 /* The wanted unit, alone ("kJ/kg-K") or in a heading ("cp, kJ/kg-K"). */

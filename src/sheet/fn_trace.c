@@ -13,7 +13,8 @@ static bool read_points(struct gas_path_call *path, const struct gas_block *argu
         return true;
     double count = argument->cell->number;
     if (!gas_single(argument) || argument->cell->kind != GAS_CELL_NUMBER || !(count >= 1 && count <= POINTS_MOST))
-        return gas_refuse(&path->refusal, "points", "it is the number of steps along each leg, 1 to %d.", POINTS_MOST);
+        return gas_refuse(&path->refusal, "points", "give the number of steps along each leg, a figure from 1 to %d.",
+                          POINTS_MOST);
     *points = (size_t)count;
     return true;
 }

@@ -27,7 +27,7 @@ static bool read_side(const struct gas_block *argument, const char *name, struct
 {
     struct gas_unit_fault fault;
     if (!gas_single(argument) || argument->cell->kind != GAS_CELL_TEXT)
-        return gas_refuse(refusal, name, "it is a unit in one cell, such as psig or kg/h.");
+        return gas_refuse(refusal, name, "a unit is a text in one cell, such as psig or kg/h.");
     const char *text = after_difference_mark(argument->cell->text);
     side->difference = text != argument->cell->text;
     if (gas_unit_parse(text, strlen(text), NULL, &side->unit, &fault))

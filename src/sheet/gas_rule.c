@@ -37,6 +37,11 @@ static bool read_figure(struct gas_rules *rules, const char *name, struct gas_pi
     size_t used;
     struct gas_unit_fault fault;
     char shown[80];
+    if (text.length == 0)
+        return gas_refuse(rules->refusal, WHAT,
+                          "a figure is missing behind \"%s\"; give one, such as | k = 1.4 or "
+                          "| cp at 25 °C.",
+                          name);
     if (!gas_number_parse(text.at, text.length, figure, &used))
         return gas_refuse(rules->refusal, WHAT, "%s = %s is not a number with a unit.", name,
                           gas_quoted(shown, sizeof shown, text.at, text.length));

@@ -53,6 +53,9 @@ bool gas_refuse_leg(struct gas_refusal *refusal, const struct gas_job *job, cons
     struct gas_unit degrees = gas_job_unit(job, GAS_DIM_TEMPERATURE, "°C");
     char what[24], one[FIGURE], other[FIGURE];
     snprintf(what, sizeof what, "leg %zu", number);
+    if (fault->status == GAS_OUTSIDE_DATA && leg->ending != GAS_TO_T)
+        return gas_refuse(refusal, what, "\"%s\" takes the temperature out of the data for %s (%s to %s).", text,
+                          job->choice->label, temperature(job, one, range.T_from), temperature(job, other, range.T_to));
     if (fault->status == GAS_OUTSIDE_DATA)
         return gas_refuse_temperature(refusal, what, fault->figure, &degrees, job->choice->label, range.T_from,
                                       range.T_to);

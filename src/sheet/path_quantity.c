@@ -77,9 +77,10 @@ static bool in_basis(const struct gas_job *job, enum gas_dimension molar, double
     if (!isnan(*si))
         return true;
     if (isnan(n) && gas_dimension_extent(heading->unit.dimension) != GAS_EXTENT_NONE)
-        return gas_refuse(refusal, heading->text,
-                          "the amount of gas does not follow from the givens; give m, n or V, or "
-                          "ask per kg or per mol.");
+        return gas_refuse(refusal, "wanted",
+                          "\"%s\" needs the amount of gas, which does not follow from the givens; give m, n or V, or "
+                          "ask per kg or per mol.",
+                          heading->text);
     if (job->gas.interval_count == 0)
         return gas_refuse(refusal, "gas", "%s has no heat capacity, which %s needs; give one after '|'.",
                           job->choice->label, heading->text);

@@ -48,7 +48,7 @@ bool gas_refuse(struct gas_refusal *refusal, const char *what, const char *forma
     if (refusal->made)
         return false;
     refusal->made = true;
-    int used = snprintf(refusal->text, sizeof refusal->text, "Check %.80s: ", what);
+    int used = snprintf(refusal->text, sizeof refusal->text, "Check %.150s: ", what);
     size_t room = sizeof refusal->text - (size_t)used;
     va_list values;
     va_start(values, format);
@@ -132,14 +132,18 @@ bool gas_refuse_unit(struct gas_refusal *refusal, const char *what, const struct
 bool gas_refuse_heading(struct gas_refusal *refusal, const char *what, const char *text, size_t length,
                         const struct gas_heading_fault *fault)
 {
-    char shown[80];
+    char shown[80], where[160];
     gas_quoted(shown, sizeof shown, text, length);
     const char *hint = fault->hint;
     switch (fault->status) {
     case GAS_HEADING_EMPTY:
         return gas_refuse(refusal, what, "a heading is blank; write a quantity and its unit, such as \"P1, bar(g)\".");
     case GAS_HEADING_UNIT:
-        return gas_refuse_unit(refusal, shown, &fault->unit);
+        if (fault->unit.at[0] == ',')
+            return gas_refuse(refusal, what, "%s holds a comma; separate items with ';', such as 7 bar(g); 35 °C.",
+                              shown);
+        snprintf(where, sizeof where, "%s %s", what, shown);
+        return gas_refuse_unit(refusal, where, &fault->unit);
     case GAS_HEADING_CONTRADICTION:
         return gas_refuse(refusal, what, "%s names a quantity and a unit that do not belong together%s%s.", shown,
                           hint[0] ? "; " : "", hint);
@@ -153,35 +157,35 @@ bool gas_refuse_heading(struct gas_refusal *refusal, const char *what, const cha
     }
 }
 
-/* A bare or K figure that would be a usual room or process temperature in degrees Celsius. */
-static bool looks_like_celsius(double T, const struct gas_unit *unit)
+/* The slip behind a figure in K that would be a usual temperature in degrees Celsius; "" when it is none. */
+static void name_celsius(char *slip, size_t size, double T, const struct gas_unit *unit)
 {
-    return T > -100 && T < 200 && unit->offset == 0 && unit->scale == 1;
+    slip[0] = '\0';
+    if (T > -100 && T < 200 && unit->offset == 0 && unit->scale == 1)
+        snprintf(slip, size, " If %s °C was meant, give the unit.", gas_shown(T).text);
 }
 
 bool gas_refuse_temperature(struct gas_refusal *refusal, const char *what, double T, const struct gas_unit *unit,
                             const char *gas_label, double T_from, double T_to)
 {
-    char figure[80], from[40], to[40], slip[80] = "", celsius[40];
+    char figure[80], from[40], to[40], slip[80];
     gas_figure(figure, sizeof figure, gas_unit_from_si(unit, T, GAS_ATMOSPHERE), unit);
     gas_number_format(from, sizeof from, gas_unit_from_si(unit, T_from, GAS_ATMOSPHERE), 6);
     gas_figure(to, sizeof to, gas_unit_from_si(unit, T_to, GAS_ATMOSPHERE), unit);
-    if (looks_like_celsius(T, unit)) {
-        gas_number_format(celsius, sizeof celsius, T, 6);
-        snprintf(slip, sizeof slip, " If %s °C was meant, give the unit.", celsius);
-    }
+    name_celsius(slip, sizeof slip, T, unit);
     return gas_refuse(refusal, what, "%s is outside the data for %s (%s to %s).%s", figure, gas_label, from, to, slip);
 }
 
 static bool refuse_level(struct gas_refusal *refusal, const char *what, double figure, const struct gas_unit *unit,
                          double barometer)
 {
-    char shown[80], limit[80];
+    char shown[80], limit[80], slip[80];
     gas_figure(shown, sizeof shown, figure, unit);
     if (unit->dimension == GAS_DIM_TEMPERATURE) {
         gas_figure(limit, sizeof limit, gas_unit_from_si(unit, 0, barometer), unit);
-        return gas_refuse(refusal, what, "%s is %s absolute zero (%s).", shown,
-                          gas_unit_to_si(unit, figure, barometer) < 0 ? "below" : "at", limit);
+        name_celsius(slip, sizeof slip, figure, unit);
+        return gas_refuse(refusal, what, "%s is %s absolute zero (%s).%s", shown,
+                          gas_unit_to_si(unit, figure, barometer) < 0 ? "below" : "at", limit, slip);
     }
     if (unit->basis == GAS_ABSOLUTE)
         return gas_refuse(refusal, what,

@@ -281,8 +281,9 @@ void gas_label_nearest(const char *text, size_t length, char *hint, size_t size)
                 char word[64];
                 size_t part = strcspn(p, ",");
                 snprintf(word, sizeof word, "%.*s", (int)part, p);
-                int found = gas_edit_distance(words.word[w], word, distance - 1);
-                if (found < distance && strlen(word) > 3) {
+                int most = strlen(words.word[w]) < 6 ? 1 : 2; /* "volts" is not nearly "moles" */
+                int found = gas_edit_distance(words.word[w], word, most);
+                if (found <= most && found < distance && strlen(word) > 3) {
                     distance = found;
                     snprintf(best, sizeof best, "%.31s", word);
                 }

@@ -163,7 +163,7 @@ static void refusals(void)
         {"too-much-heat", "GAS.WORK(\"N2\";\"1 kg; 25 °C; 1 bar\";\"isochoric with Q = -500 kJ\";\"kJ\")", 0,
          "Check leg 1"},
         {"no-amount", "GAS.WORK(\"N2\";\"25 °C; 1 bar\";\"isothermal to 8 bar\";\"kJ\")", 0,
-         "the amount of gas does not follow"},
+         "the amount of gas, which does not follow"},
         {"no-start", "GAS.WORK(\"N2\";\"1 kg; 25 °C\";\"isothermal to 8 bar\";\"kJ\")", 0, "Check given"},
         {"no-column", "GAS.WORK(\"N2\";\"25 °C; 1 bar\";\"isothermal to P2\";\"kJ/kg\")", 0,
          "takes P2 from the givens"},

@@ -171,7 +171,7 @@ static const struct sentence_row sentences[] = {
     {"contradictory unit", "GAS.SOLVE(\"N2\";{1;300};\"kg/m3\";{\"P1, kg\";\"T1, K\"})", 0, 0, "...do not belong together"},
     {"unknown unit", "GAS.SOLVE(\"N2\";\"7 bra(g); 35 °C\";\"kg/m3\")", 0, 0, "...bra"},
     {"unknown heading", "GAS.SOLVE(\"N2\";{1;300};\"kg/m3\";{\"Humidity\";\"T1, K\"})", 0, 0, "...names no known quantity"},
-    {"zero kelvin", "GAS.SOLVE(\"N2\";\"T = 0 K; P = 1 bar\";\"kg/m3\")", 0, 0, "Check T: 0 K is at absolute zero (0 K)."},
+    {"zero kelvin", "GAS.SOLVE(\"N2\";\"T = 0 K; P = 1 bar\";\"kg/m3\")", 0, 0, "Check T: 0 K is at absolute zero (0 K). If 0 °C was meant, give the unit."},
     {"zero volume", "GAS.SOLVE(\"N2\";\"T = 300 K; P = 1 bar; V = 0 m3\";\"kg\")", 0, 0, "Check V: 0 m3 must be above zero."},
     {"negative mass", "GAS.SOLVE(\"N2\";\"T = 300 K; P = 1 bar; m = -3 kg\";\"m3\")", 0, 0, "Check m: -3 kg must be above zero."},
     {"zero pressure", "GAS.SOLVE(\"N2\";\"T = 300 K; P = 0 bar; V = 1 m3\";\"kg\")", 0, 0, "...0 bar is a perfect vacuum"},

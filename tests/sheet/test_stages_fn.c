@@ -160,7 +160,7 @@ static void refusals(void)
         {"P2-below", "GAS.STAGES(\"air\";\"P1 = 1 bar; T1 = 20 °C; P2 = 0.9 bar\";\"3 stages; isentropic\")", 0, "Check P2: 0.9 bar is not above P1, 1 bar"},
         {"no-T1", "GAS.STAGES(\"air\";\"P1 = 1 bar; P2 = 9 bar\";\"3 stages; isentropic\")", 0, "Check given: T1"},
         {"other-given", "GAS.STAGES(\"air\";\"P1 = 1 bar; T1 = 20 °C; P2 = 9 bar; T2 = 80 °C\";\"3 stages; isentropic\")", 0, "is not taken by GAS.STAGES"},
-        {"no-flow", "GAS.STAGES(\"air\";\"P1 = 1 bar; T1 = 20 °C; P2 = 9 bar\";\"3 stages; isentropic\";\"shaft power, kW\")", 0, "the amount of gas does not follow"},
+        {"no-flow", "GAS.STAGES(\"air\";\"P1 = 1 bar; T1 = 20 °C; P2 = 9 bar\";\"3 stages; isentropic\";\"shaft power, kW\")", 0, "the amount of gas, which does not follow"},
         {"negative-flow", "GAS.STAGES(\"air\";\"P1 = 1 bar; T1 = 20 °C; P2 = 9 bar; -1 kg/s\";\"3 stages; isentropic\";\"shaft power, kW\")", 0, "Check m: -1 kg/s"},
         {"bare-kW", "GAS.STAGES(\"air\";" GIVEN ";\"3 stages; isentropic\";\"kW\")", 0, "does not say which quantity"},
         {"other-wanted", "GAS.STAGES(\"air\";" GIVEN ";\"3 stages; isentropic\";\"mep, bar\")", 0, "staged compression gives shaft power"},
