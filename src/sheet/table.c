@@ -141,7 +141,8 @@ static bool read_pairs(struct opening *opening, const struct gas_block *given)
         const struct gas_cell *value = gas_cell_at(given, row, 1);
         if (row == 0 && gas_cell_is_title(value))
             continue;
-        if (!add_pair(opening, gas_cell_at(given, row, 0), value, given->columns > 2 ? value + 1 : NULL))
+        if (!add_pair(opening, gas_cell_at(given, row, 0), value,
+                      given->columns > 2 ? gas_cell_at(given, row, 2) : NULL))
             return false;
     }
     return true;
