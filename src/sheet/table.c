@@ -100,11 +100,11 @@ static bool own_unit(const struct gas_heading *heading, const struct gas_cell *v
 }
 
 /* heading | value and label | value | unit, one row. The heading text is put together before it is read. */
-static bool add_pair(struct opening *opening, const struct gas_cell *label, const struct gas_cell *value,
-                     const struct gas_cell *unit)
+static bool add_pair(struct opening *opening, const struct gas_cell *label, bool third)
 {
     char text[3 * GAS_HEADING_TEXT], name[GAS_NAME_TEXT];
-    bool unit_cell = unit && !gas_cell_blank(unit);
+    const struct gas_cell *value = label + 1, *unit = value + third;
+    bool unit_cell = third && !gas_cell_blank(unit);
     if (gas_cell_blank(value))
         return true;
     if (gas_cell_blank(label))
@@ -138,11 +138,10 @@ static bool add_pair(struct opening *opening, const struct gas_cell *label, cons
 static bool read_pairs(struct opening *opening, const struct gas_block *given)
 {
     for (size_t row = 0; row < given->rows; row++) {
-        const struct gas_cell *value = gas_cell_at(given, row, 1);
-        if (row == 0 && gas_cell_is_title(value))
+        const struct gas_cell *label = gas_cell_at(given, row, 0);
+        if (row == 0 && gas_cell_is_title(label + 1))
             continue;
-        if (!add_pair(opening, gas_cell_at(given, row, 0), value,
-                      given->columns > 2 ? gas_cell_at(given, row, 2) : NULL))
+        if (!add_pair(opening, label, given->columns > 2))
             return false;
     }
     return true;
