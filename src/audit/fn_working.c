@@ -162,11 +162,11 @@ static void print_given(struct print *print, size_t column)
 
 /* -- the print ----------------------------------------------------------------------------------------------------- */
 
-static bool print_steps(struct print *print, struct gas_arena *arena, struct gas_refusal *refusal)
+static bool print_steps(struct print *print, struct gas_refusal *refusal)
 {
     const struct gas_task *task = print->job->task;
     if (task == &gas_task_solve)
-        return print_states(print, arena, refusal);
+        return print_states(print, refusal);
     if (task == &gas_stages_task)
         return print_stages(print, refusal);
     return task == &gas_path_task ? print_path(print, refusal) : print_vessel(print, refusal);
@@ -199,7 +199,7 @@ static bool make_print(struct print *print, struct gas_job *job, struct gas_aren
     print_conventions(print);
     for (size_t i = 0; i < job->table.columns; i++)
         print_given(print, i);
-    if (!print_steps(print, arena, refusal))
+    if (!print_steps(print, refusal))
         return false;
     print_answers(print);
     return true;

@@ -8,6 +8,7 @@
 #define AUDIT_PRINT_H
 
 #include "audit/call.h"
+#include "sheet/solver.h"
 
 enum { PRINT_LINES = 240, PRINT_WORDS = 200 };
 
@@ -43,8 +44,12 @@ void print_figure(struct line *line, const char *name, double figure, const char
 /* Where a figure from the gas's heat capacity comes from: the basis names it once. */
 extern const char print_cp_source[];
 
+/* print_plan - the solver's steps to the wanted variables; the plan and its values, NULL after a refusal. */
+const struct gas_plan *print_plan(struct print *print, struct gas_solver *solver, const struct gas_known *wanted,
+                                  size_t count, struct gas_values *values, struct gas_refusal *refusal);
+
 /* The steps of each task; false after a refusal. */
-bool print_states(struct print *print, struct gas_arena *arena, struct gas_refusal *refusal);
+bool print_states(struct print *print, struct gas_refusal *refusal);
 bool print_path(struct print *print, struct gas_refusal *refusal);
 bool print_stages(struct print *print, struct gas_refusal *refusal);
 bool print_vessel(struct print *print, struct gas_refusal *refusal);

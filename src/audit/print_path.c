@@ -145,21 +145,20 @@ static void print_wanted(struct print *print, bool stages)
     }
 }
 
-static void print_start(struct print *print, const struct gas_point *start, double n)
+/* How P, T and the amount at the start follow from the givens; what is given needs no step. */
+static bool print_start(struct print *print, struct gas_solver *solver, struct gas_refusal *refusal)
 {
-    bool flow = print->job->extent == GAS_EXTENT_FLOW;
-    print_step(print, "P1", "from the givens", start->P, "Pa", "P V = n R T");
-    print_step(print, "T1", "from the givens", start->T, "K", "P V = n R T");
-    if (isfinite(n))
-        print_step(print, "n", "from the givens", n, flow ? "mol/s" : "mol", "P V = n R T, m = n M");
+    static const struct gas_known start[] = {{GAS_VAR_P, 1}, {GAS_VAR_T, 1}, {GAS_VAR_N, 1}};
+    struct gas_values values;
+    return print_plan(print, solver, start, sizeof start / sizeof *start, &values, refusal) != NULL;
 }
 
 bool print_path(struct print *print, struct gas_refusal *refusal)
 {
     struct gas_path_case path;
-    if (!gas_path_solve(print->job, &print->figures, &path, refusal))
+    if (!gas_path_solve(print->job, &print->figures, &path, refusal) ||
+        !print_start(print, gas_path_solver(print->job), refusal))
         return false;
-    print_start(print, &path.start, path.n);
     for (size_t i = 0; i < path.count; i++)
         print_leg(print, &path, i);
     print_wanted(print, false);
@@ -204,9 +203,9 @@ bool print_stages(struct print *print, struct gas_refusal *refusal)
 {
     struct gas_stages_case stages;
     static const char source[] = "Cengel & Boles, ch. 7";
-    if (!gas_stages_solve(print->job, &print->figures, &stages, refusal))
+    if (!gas_stages_solve(print->job, &print->figures, &stages, refusal) ||
+        !print_start(print, gas_stages_solver(print->job), refusal))
         return false;
-    print_start(print, &(struct gas_point){stages.P1, stages.T1, NAN}, stages.n);
     for (int i = 0; i < stages.staged.count; i++)
         print_stage(print, &stages, i);
     print_step(print, "work", "sum of the stages", stages.staged.work, "J/mol", source);

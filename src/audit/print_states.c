@@ -126,30 +126,37 @@ static void print_heading(struct print *print, const struct gas_plan *plan, cons
                      gas_variable_unit(wants.known[i].variable));
 }
 
-bool print_states(struct print *print, struct gas_arena *arena, struct gas_refusal *refusal)
+const struct gas_plan *print_plan(struct print *print, struct gas_solver *solver, const struct gas_known *wanted,
+                                  size_t count, struct gas_values *values, struct gas_refusal *refusal)
 {
     const struct gas_job *job = print->job;
     double ordered[GAS_COLUMNS];
     int order[GAS_STEPS];
-    struct wants wants = {0};
-    struct gas_values *values = gas_arena_take(arena, 1, sizeof *values);
-    const struct gas_plan *plan =
-        values ? gas_solver_plan(gas_job_solver(job), job, &print->figures, ordered, refusal) : NULL;
+    const struct gas_plan *plan = gas_solver_plan(solver, job, &print->figures, ordered, refusal);
     if (!plan)
-        return gas_refuse(refusal, "given", "there is not enough memory for it; close other documents.");
+        return NULL;
     gas_plan_run(plan, &job->gas, &job->options.datum, job->options.agree, ordered, (size_t)plan->known_count, NULL, 0,
                  values);
+    int steps = gas_plan_slice(plan, wanted, count, order);
+    for (int i = 0; i < steps; i++)
+        print_plan_step(print, plan, values, &plan->step[order[i]]);
+    return plan;
+}
+
+bool print_states(struct print *print, struct gas_refusal *refusal)
+{
+    const struct gas_job *job = print->job;
+    struct wants wants = {0};
+    struct gas_values values;
     for (size_t i = 0; i < job->wanted.columns; i++)
         want_heading(&wants, job, &job->wanted.heading[i]);
-    int count = gas_plan_slice(plan, wants.known, wants.count, order);
-    for (int i = 0; i < count; i++)
-        print_plan_step(print, plan, values, &plan->step[order[i]]);
-    for (size_t i = 0; i < job->wanted.columns; i++) {
+    const struct gas_plan *plan = print_plan(print, gas_job_solver(job), wants.known, wants.count, &values, refusal);
+    for (size_t i = 0; plan && i < job->wanted.columns; i++) {
         enum gas_variable variable;
         if (gas_variable_of(&job->wanted.heading[i], &variable) && !job->wanted.heading[i].tolerance)
-            print->si[i] = gas_plan_value(plan, values, variable, job->wanted.heading[i].state);
+            print->si[i] = gas_plan_value(plan, &values, variable, job->wanted.heading[i].state);
         else
-            print_heading(print, plan, values, i);
+            print_heading(print, plan, &values, i);
     }
-    return true;
+    return plan != NULL;
 }

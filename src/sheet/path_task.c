@@ -21,6 +21,12 @@ static const struct gas_typed_legs *legs_of(const struct gas_job *job)
     return job->legs;
 }
 
+struct gas_solver *gas_path_solver(const struct gas_job *job)
+{
+    const struct path_own *own = job->own;
+    return own->solver;
+}
+
 /* A leg's column of exponents may be headed by a bare n, which otherwise is the amount. */
 static void tell_exponent(struct gas_job *job, const struct gas_typed_legs *legs)
 {

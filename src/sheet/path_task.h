@@ -37,6 +37,9 @@ bool gas_path_open(struct gas_job *job, struct gas_typed_legs *legs, const struc
 bool gas_path_solve(const struct gas_job *job, const struct gas_case *figures, struct gas_path_case *path,
                     struct gas_refusal *refusal);
 
+/* gas_path_solver - the solver of the start that a prepared job of this task holds, for a working. */
+struct gas_solver *gas_path_solver(const struct gas_job *job);
+
 /* gas_path_quantity - a wanted heading's figure in SI: of the whole path, or of one leg (total = that leg's change,
  * start = its start). NAN and a refusal when it does not follow. */
 bool gas_path_quantity(const struct gas_job *job, const struct gas_path_case *path, const struct gas_change *change,

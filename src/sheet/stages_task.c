@@ -251,6 +251,12 @@ static bool discharge_pressure(const struct gas_job *job, const struct gas_case 
            gas_refuse(refusal, "P2", "the discharge pressure is missing; give it, such as P2 = 9 bar(g).");
 }
 
+struct gas_solver *gas_stages_solver(const struct gas_job *job)
+{
+    const struct own *own = job->own;
+    return own->solver;
+}
+
 bool gas_stages_solve(const struct gas_job *job, const struct gas_case *figures, struct gas_stages_case *stages,
                       struct gas_refusal *refusal)
 {

@@ -21,6 +21,9 @@ struct gas_stages_case {
     struct gas_staged staged;
 };
 
+/* gas_stages_solver - the solver of the suction that a prepared job of this task holds, for a working. */
+struct gas_solver *gas_stages_solver(const struct gas_job *job);
+
 /* gas_stages_solve - one case; refuses in the user's units. */
 bool gas_stages_solve(const struct gas_job *job, const struct gas_case *figures, struct gas_stages_case *stages,
                       struct gas_refusal *refusal);
