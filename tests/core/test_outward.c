@@ -78,4 +78,5 @@ static void hard_and_hopeless(void)
 }
 
 const struct test_suite suite_outward = {
-    "outward", (const struct test_case[]){{"GSL", agrees_with_bisection}, {"hard and hopeless", hard_and_hopeless}, {0}}};
+    "outward",
+    (const struct test_case[]){{"GSL", agrees_with_bisection}, {"hard and hopeless", hard_and_hopeless}, {0}}};

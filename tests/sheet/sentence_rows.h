@@ -1,6 +1,7 @@
 /*
- * sentence_rows.h - mistakes of common life and what is said to them, as an engineer would want to read it: the argument
- * or quantity, the figure as it was typed, what to do. A sentence that begins with ~ is the decisive part of a longer one.
+ * sentence_rows.h - mistakes of common life and what is said to them, as an engineer would want to read it: the
+ * argument or quantity, the figure as it was typed, what to do. A sentence that begins with ~ is the decisive part of a
+ * longer one.
  */
 #ifndef TESTS_SENTENCE_ROWS_H
 #define TESTS_SENTENCE_ROWS_H

@@ -153,7 +153,7 @@ static bool use_decimal_comma(char folder[])
 
 static void the_locale_changes_nothing(void)
 {
-    char before[100], folder[] = "/tmp/gasleaf-locale-XXXXXX", shown_here[20];
+    char before[100], folder[] = "/tmp/gasleafXXXXXX", shown_here[20];
     snprintf(before, sizeof before, "%s", setlocale(LC_ALL, NULL));
     check_true("a locale with a decimal comma", use_decimal_comma(folder));
     snprintf(shown_here, sizeof shown_here, "%.1f", 0.5);

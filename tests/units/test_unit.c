@@ -28,7 +28,7 @@ static bool parse(const char *text, struct gas_unit *unit)
 /* One run of GNU units for the whole table: -t prints one bare figure a pair. */
 static void gnu_units_agree(void)
 {
-    char name[] = "/tmp/gasleaf-units-XXXXXX", command[100], line[200];
+    char name[] = "/tmp/gasleafXXXXXX", command[100], line[200];
     int file = mkstemp(name);
     FILE *pairs = file >= 0 ? fdopen(file, "w") : NULL;
     if (!check_true("a place for the pairs", pairs != NULL))
