@@ -63,5 +63,7 @@ for sheet in "$results"/sheets/*.fods; do
         $(cat "$results/$topic.rows" 2>/dev/null)
 done
 
+part "sample workbooks, kept as ods and xlsx too" tests/check_examples.sh
+
 echo "$passed passed, $failed failed"
 [ "$failed" = 0 ] && [ "$passed" -gt 0 ]

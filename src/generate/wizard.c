@@ -34,7 +34,8 @@ static void write_parameter(FILE *out, const struct gas_parameter *parameter)
     fputs("\" oor:op=\"replace\">\n", out);
     write_property(out, 7, "DisplayName", "", parameter->name);
     /* The office calls every argument of any type optional: the text says which ones are not. */
-    if (!parameter->optional && parameter->kind == GAS_PARAMETER_ANY)
+    bool any = parameter->kind == GAS_PARAMETER_ANY || parameter->kind == GAS_PARAMETER_TEXT;
+    if (any && !parameter->optional)
         write_property(out, 7, "Description", "Required. ", parameter->help);
     else
         write_property(out, 7, "Description", "", parameter->help);

@@ -15,6 +15,7 @@ enum { GAS_PARAMETERS = 8 };
 
 enum gas_parameter_kind {
     GAS_PARAMETER_ANY,  /* a value, a range or an inline array */
+    GAS_PARAMETER_TEXT, /* the same where texts are asked for: an empty cell counts as left out */
     GAS_PARAMETER_LIVE, /* a live cell range: sees host errors and true blanks; cannot be optional */
     GAS_PARAMETER_REST  /* repeats; only the last parameter can */
 };

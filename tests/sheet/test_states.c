@@ -120,7 +120,7 @@ static bool write_formula(char *formula, const struct state_row *row, enum form 
 /* One run of GNU units for all laws. */
 static bool read_laws(double law[ROWS])
 {
-    char name[] = "/tmp/gasleaf-states-XXXXXX", command[100], line[300];
+    char name[] = "/tmp/gasleafXXXXXX", command[100], line[300];
     int file = mkstemp(name);
     FILE *pairs = file >= 0 ? fdopen(file, "w") : NULL;
     if (!check_true("a place for the laws", pairs != NULL))
