@@ -272,6 +272,19 @@ static void put_species(struct gas_call *call, size_t row, const struct gas_spec
     gas_put_text(call, row, 4, range);
 }
 
+static void refuse_search(struct gas_refusal *refusal, struct gas_piece search)
+{
+    char shown[80];
+    const struct gas_species *near;
+    if (gas_species_nearest(search.at, search.length, &near, 1) > 0)
+        gas_refuse_name(refusal, search);
+    else
+        gas_refuse(refusal, "search",
+                   "no gas known here has %s in its name, formula or CAS number; try a shorter part, or "
+                   "element F.",
+                   gas_quoted(shown, sizeof shown, search.at, search.length));
+}
+
 static void answer_list(struct gas_call *call, struct gas_piece search, struct gas_refusal *refusal)
 {
     static const char *const heading[] = {"name", "formula", "CAS number", "M, kg/kmol", "range of cp"};
@@ -280,7 +293,7 @@ static void answer_list(struct gas_call *call, struct gas_piece search, struct g
     for (size_t i = 0; i < species; i++)
         found += matches(gas_species_at(i), search);
     if (found == 0) {
-        gas_refuse_name(refusal, search);
+        refuse_search(refusal, search);
         return;
     }
     if (!gas_answer_block(call, found + 1, 5))

@@ -34,12 +34,22 @@ static bool complete_wanted(struct gas_path_call *path, enum gas_symbol symbol)
            gas_refuse(&path->refusal, "wanted", "nothing is asked for; write one such as P, bar(g) or T, °C.");
 }
 
+/* Boundary work of a flow is seldom what was meant: the sheet has to say which work it is. */
+static bool system_is_clear(struct gas_path_call *path)
+{
+    if (path->job.extent != GAS_EXTENT_FLOW || path->job.options.system_said)
+        return true;
+    return gas_refuse(&path->refusal, "options",
+                      "a flow is given; add the option flow for the shaft work of a machine, or "
+                      "closed for boundary work per time.");
+}
+
 /* (gas; given; legs; [wanted]; [headings]; [options]) */
 static void answer_rows(struct gas_call *call, enum gas_symbol symbol)
 {
     static const struct gas_path_arguments places = {.given = 1, .legs = 2, .wanted = 3, .headings = 4, .options = 5};
     struct gas_path_call path;
-    if (gas_path_start(&path, call, &places) && complete_wanted(&path, symbol) &&
+    if (gas_path_start(&path, call, &places) && system_is_clear(&path) && complete_wanted(&path, symbol) &&
         gas_job_prepare(&path.job, call->arena, &path.refusal))
         gas_job_answer(&path.job, call);
     else
@@ -98,7 +108,7 @@ void gas_fn_path(struct gas_call *call)
 {
     static const struct gas_path_arguments places = {.given = 1, .legs = 2, .wanted = 3, .headings = 4, .options = 5};
     struct gas_path_call path;
-    if (!gas_path_start(&path, call, &places) || !answer_path(&path, call))
+    if (!gas_path_start(&path, call, &places) || !system_is_clear(&path) || !answer_path(&path, call))
         gas_job_refused(call, &path.job.options, &path.refusal);
     gas_job_close(&path.job);
 }

@@ -124,6 +124,7 @@ static bool read_work_on(struct reader *reader)
 static bool read_flow(struct reader *reader)
 {
     reader->options->system = GAS_FLOW;
+    reader->options->system_said = true;
     return true;
 }
 
@@ -137,6 +138,7 @@ static bool read_closed(struct reader *reader)
 {
     reader->options->open = false;
     reader->options->system = GAS_CLOSED;
+    reader->options->system_said = true;
     return true;
 }
 

@@ -19,6 +19,7 @@
 struct gas_options {
     double barometer;                 /* Pa */
     enum gas_system system;           /* GAS_CLOSED, or GAS_FLOW after `flow` */
+    bool system_said;                 /* flow or closed was written */
     bool open;                        /* the amount of gas differs from state to state: gas came in or went out */
     bool work_by_gas;                 /* W is shown positive out of the gas */
     bool hard_errors;                 /* #N/A in place of a sentence */

@@ -1,4 +1,5 @@
 /* The public face of units: parsing through the cache, conversion. */
+#include <float.h>
 #include <math.h>
 #include <stdio.h>
 #include <string.h>
@@ -138,7 +139,9 @@ double gas_unit_to_si(const struct gas_unit *unit, double x, double barometer)
 double gas_unit_from_si(const struct gas_unit *unit, double si, double barometer)
 {
     double own = unit->basis == GAS_GAUGE ? si - barometer : unit->basis == GAS_VACUUM ? barometer - si : si;
-    return own / unit->scale - unit->offset;
+    double level = own / unit->scale, x = level - unit->offset;
+    /* 32 °F is 0 °C: what the rounding of 273.15 leaves is no reading */
+    return fabs(x) <= 4 * DBL_EPSILON * unit->offset ? 0 : x;
 }
 
 double gas_unit_difference_to_si(const struct gas_unit *unit, double x)

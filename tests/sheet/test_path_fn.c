@@ -65,6 +65,7 @@ static void works_and_heats(void)
          cv * (T2 - 300), NULL},
         {"adiabatic-flow", "GAS.WORK(\"N2 | k = 1.4\";\"300 K; 1 bar\";\"adiabatic to 8 bar\";\"J/mol\";;\"flow\")",
          cp * (T2 - 300), NULL},
+        {"closed-per-time", "GAS.WORK(\"N2 | k = 1.4\";\"1 mol/s; 300 K; 1 bar\";\"adiabatic to 8 bar\";\"W\";;\"closed\")", cv * (T2 - 300), NULL},
         {"adiabatic-78-flow",
          "GAS.WORK(\"N2 | k = 1.4\";\"300 K; 1 bar\";\"adiabatic 78 % to 8 bar\";\"J/mol\";;\"flow\")",
          cp * (T2 - 300) / 0.78, NULL},
@@ -179,6 +180,7 @@ static void refusals(void)
          "Check P4: the path ends at state 2"},
         {"no-cp", "GAS.HEAT(\"R-134a\";\"300 K; 1 bar; 1 mol\";\"isobaric to 400 K\";\"J\")", 0,
          "has no heat capacity"},
+        {"which-work", "GAS.WORK(\"N2\";\"1 kg/s; 25 °C; 1 bar\";\"adiabatic to 3 bar\";\"kW\")", 0, "Check options: a flow is given; add the option flow"},
         {"passed-on", "GAS.WORK(\"N2\";\"1 kg; 25 °C; 1 bar\";\"Check P1: from elsewhere.\";\"kJ\")", 0,
          "Check P1: from elsewhere."},
     };
