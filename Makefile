@@ -39,7 +39,7 @@ TEST_SRC    := $(wildcard tests/support/*.c) $(filter-out tests/fuzz/test_%,$(wi
 GLUE_SRC    := $(wildcard tests/support/*.c) $(wildcard tests/glue/*.c) $(filter-out %/main.c,$(call sources,generate))
 suites = $(patsubst test_%.c,suite_%,$(filter test_%,$(notdir $(1))))
 
-.PHONY: audit-report bench all check test demo deps generate install lint valgrind fuzz sanitize races clean help glue tools sdk checks
+.PHONY: audit-report bench prices all check test demo deps generate install lint valgrind fuzz sanitize races clean help glue tools sdk checks
 all: $(OXT) ## build the extension, build/gasleaf.oxt
 
 help: ## print the targets
@@ -146,6 +146,13 @@ glue: $(BUILD)/tests/glue-run $(ADDIN) ## build and run the suites of the add-in
 BENCHES := $(patsubst %.c,$(BUILD)/%,$(wildcard tests/bench/bench_*.c))
 $(BENCHES): %: %.o $(SHEETLIB) $(LIB)
 	$(CC) $^ -o $@ -ludunits2 -lm -pthread
+
+PRICE_TOOLS := $(BUILD)/tests/bench/office/price_sheet $(BUILD)/tests/bench/office/cpu_time
+$(PRICE_TOOLS): %: %.o
+	$(CC) $^ -o $@
+
+prices: $(OXT) $(PRICE_TOOLS) ## the price of formulas in real Calc, beside its own
+	tests/bench/office/price.sh $(OXT) $(BUILD)/tests/bench/office
 
 bench: $(BENCHES) ## time per row of large tables
 	@for b in $(BENCHES); do $$b || exit 1; done

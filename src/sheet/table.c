@@ -43,7 +43,10 @@ static bool add(struct opening *opening, const struct gas_heading *heading, doub
         return gas_refuse(opening->refusal, opening->what, "more than %d quantities are given; leave some out.",
                           GAS_COLUMNS);
     for (size_t i = 0; i < table->columns; i++)
-        if (same_quantity(&table->heading[i], heading))
+        if (same_quantity(&table->heading[i], heading) && strcmp(table->heading[i].text, heading->text) == 0)
+            return gas_refuse(opening->refusal, opening->what, "%s is given twice; leave one out.",
+                              gas_quantity_name(name, heading->symbol, heading->state));
+        else if (same_quantity(&table->heading[i], heading))
             return gas_refuse(opening->refusal, opening->what, "%s is given twice, as %s and as %s; leave one out.",
                               gas_quantity_name(name, heading->symbol, heading->state),
                               gas_quoted(first, sizeof first, table->heading[i].text, strlen(table->heading[i].text)),

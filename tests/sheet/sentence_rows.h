@@ -116,6 +116,8 @@ static const struct sentence_row sentence_rows[] = {
      "Check given: \"seven bar\" names no known quantity; no figure stands here: write P1 = 1 bar or 7 bar(g)."},
     {"GAS.SOLVE(\"N2\";\"7; 35 °C; 12 m3\";\"kg\")",
      "Check given: \"7\" names no known quantity; a figure needs a unit or a symbol: 7 bar(g), P1 = 1 bar."},
+    {"GAS.SOLVE(\"N2\";\"7 bar; 8 bar; 35 °C; 12 m3\";\"kg\")",
+     "Check given: P is given twice; leave one out."},
     {"GAS.SOLVE(\"N2\";\"7 bar, 35 °C, 12 m3\";\"kg\")",
      "Check given: \"7 bar, 35 °C, 12 m3\" holds a comma; separate items with ';', such as 7 bar(g); 35 °C."},
     {"GAS.SOLVE(\"N2\";\"7 bar; 35 °C; -12 m3\";\"kg\")",
