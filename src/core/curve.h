@@ -11,6 +11,8 @@
 
 #include <gasleaf/path.h>
 
+#include "figures.h"
+
 enum curve_kind { CURVE_STRAIGHT, CURVE_POWER };
 
 struct curve {
@@ -19,13 +21,6 @@ struct curve {
     double dP, dv;           /* straight: P2 - P1, v2 - v1 */
     double ln_v, ln_P, ln_T; /* power: ln(v2/v1) and so on; ln_T = ln_v + ln_P, exactly 0 when isothermal */
 };
-
-/* ln(b/a), with all digits when b is near a. */
-static inline double log_ratio(double b, double a)
-{
-    const double r = b / a;
-    return r > 0.5 && r < 2 ? log1p((b - a) / a) : log(r);
-}
 
 /* (e^x - 1)/x, 1 at 0. */
 static inline double exp_relative(double x)

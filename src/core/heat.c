@@ -2,6 +2,7 @@
 
 #include <math.h>
 
+#include "figures.h"
 #include "heat_change.h"
 #include "heat_terms.h"
 
@@ -40,12 +41,6 @@ static struct gas_result check_two(const struct gas *gas, double T1, double T2)
     return checked.status ? checked : gas_check_temperature(gas, T2, 3);
 }
 
-/* A figure too large for a double, or a term without a value at this temperature, is no answer. */
-static struct gas_result if_finite(double value)
-{
-    return isfinite(value) ? gas_good(value) : gas_bad(GAS_NOT_FINITE, 0, NAN);
-}
-
 double gas_cp_unchecked(const struct gas *gas, double T)
 {
     size_t i = 0;
@@ -81,7 +76,7 @@ double gas_change_unchecked(const struct gas *gas, struct gas_change_kind kind, 
         return 0;
     if (T1 > T2)
         return -gas_change_unchecked(gas, kind, T2, T1);
-    double measure = kind.over_T ? gas_log_ratio(T1, T2) : T2 - T1;
+    double measure = kind.over_T ? log_ratio(T2, T1) : T2 - T1;
     double change =
         gas->rule == GAS_CP_INTEGRATED ? integral(gas, kind.over_T, T1, T2) : constant_cp(gas, T1, T2) * measure;
     return kind.at_constant_volume ? change - gas->R * measure : change;
@@ -133,21 +128,14 @@ struct gas_result gas_ds_isochoric(const struct gas *gas, double T1, double T2)
     return change(gas, GAS_CHANGE_S_AT_V, T1, T2);
 }
 
-static struct gas_result check_pressure(double P, int argument)
-{
-    if (!isfinite(P))
-        return gas_bad(GAS_NOT_FINITE, argument, P);
-    return P > 0 ? gas_good(P) : gas_bad(GAS_NOT_POSITIVE, argument, P);
-}
-
 struct gas_result gas_ds(const struct gas *gas, double T1, double P1, double T2, double P2)
 {
-    struct gas_result checked[] = {gas_check_temperature(gas, T1, 2), check_pressure(P1, 3),
-                                   gas_check_temperature(gas, T2, 4), check_pressure(P2, 5)};
+    struct gas_result checked[] = {gas_check_temperature(gas, T1, 2), check_positive(3, P1),
+                                   gas_check_temperature(gas, T2, 4), check_positive(5, P2)};
     for (size_t i = 0; i < sizeof checked / sizeof checked[0]; i++)
         if (checked[i].status)
             return checked[i];
-    return if_finite(gas_change_unchecked(gas, GAS_CHANGE_S_AT_P, T1, T2) - gas->R * gas_log_ratio(P1, P2));
+    return if_finite(gas_change_unchecked(gas, GAS_CHANGE_S_AT_P, T1, T2) - gas->R * log_ratio(P2, P1));
 }
 
 struct gas_result gas_cp_mean(const struct gas *gas, double T1, double T2)

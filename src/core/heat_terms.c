@@ -2,6 +2,8 @@
 
 #include <math.h>
 
+#include "figures.h"
+
 /* A warming step, with what all the integrals share. */
 struct step {
     double T1, T2;
@@ -13,12 +15,6 @@ struct step {
 struct integrals {
     double dh, ds;
 };
-
-double gas_log_ratio(double a, double b)
-{
-    double ratio = b / a;
-    return ratio > 0.5 && ratio < 2 ? log1p((b - a) / a) : log(ratio);
-}
 
 /* ---- T^exponent ------------------------------------------------------------------------------------------ */
 
@@ -168,7 +164,7 @@ static struct integrals term_integrals(const struct gas_term *term, const struct
 
 static struct step step_of(double T1, double T2)
 {
-    return (struct step){T1, T2, T2 - T1, gas_log_ratio(T1, T2)};
+    return (struct step){T1, T2, T2 - T1, log_ratio(T2, T1)};
 }
 
 double gas_interval_cp(const struct gas_interval *interval, double T)

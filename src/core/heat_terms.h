@@ -9,9 +9,6 @@
 
 #include <gasleaf/gas.h>
 
-/* ln(b/a) for positive a and b, to full relative accuracy also where b is near a. */
-double gas_log_ratio(double a, double b);
-
 double gas_interval_cp(const struct gas_interval *interval, double T);             /* J/(mol K) */
 double gas_interval_dh(const struct gas_interval *interval, double T1, double T2); /* integral of cp dT, J/mol */
 double gas_interval_ds(const struct gas_interval *interval, double T1, double T2); /* integral of cp/T dT, J/(mol K) */

@@ -132,13 +132,6 @@ struct gas_result leg_close_adiabatic(const struct leg_case *lc, struct gas_chan
     return closed;
 }
 
-static struct gas_result check_figure(double figure, int argument)
-{
-    if (!isfinite(figure))
-        return gas_bad(GAS_NOT_FINITE, argument, figure);
-    return figure > 0 ? gas_good(figure) : gas_bad(GAS_NOT_POSITIVE, argument, figure);
-}
-
 static struct gas_result check_ending(const struct gas_leg *leg, enum gas_system system)
 {
     const struct process *process = &processes[leg->process];
@@ -154,8 +147,8 @@ static struct gas_result check_ending(const struct gas_leg *leg, enum gas_system
         return gas_good(0);
     if (leg->ending == GAS_WITH_Q || leg->ending == GAS_WITH_W)
         return isfinite(leg->value) ? gas_good(0) : gas_bad(GAS_NOT_FINITE, LEG_ENDING, leg->value);
-    const struct gas_result value = check_figure(leg->value, LEG_ENDING);
-    return value.status || leg->ending != GAS_TO_P_AND_V ? value : check_figure(leg->second, LEG_ENDING);
+    const struct gas_result value = check_positive(LEG_ENDING, leg->value);
+    return value.status || leg->ending != GAS_TO_P_AND_V ? value : check_positive(LEG_ENDING, leg->second);
 }
 
 static struct gas_result check_efficiency(const struct gas_leg *leg)

@@ -5,6 +5,7 @@
 
 #include <gasleaf/heat.h>
 
+#include "figures.h"
 #include "root.h"
 
 struct mixing {
@@ -23,17 +24,13 @@ static struct gas_result give_up(struct gas_blend *blend, struct gas_result bad)
 static struct gas_result check_portion(const struct gas_portion *portion, int number)
 {
     const double figures[] = {portion->P, portion->T};
-    if (!isfinite(portion->n))
-        return gas_bad(GAS_NOT_FINITE, number, portion->n);
-    if (portion->n < 0)
-        return gas_bad(GAS_NEGATIVE, number, portion->n);
-    if (portion->n == 0)
-        return gas_good(0);
+    struct gas_result n = check_not_negative(number, portion->n);
+    if (n.status || portion->n == 0)
+        return n;
     for (int i = 0; i < 2; i++) {
-        if (!isfinite(figures[i]))
-            return gas_bad(GAS_NOT_FINITE, number, figures[i]);
-        if (!(figures[i] > 0))
-            return gas_bad(GAS_NOT_POSITIVE, number, figures[i]);
+        struct gas_result checked = check_positive(number, figures[i]);
+        if (checked.status)
+            return checked;
     }
     struct gas_result cp = gas_cp(portion->gas, portion->T);
     return cp.status ? gas_bad(cp.status, number, cp.status == GAS_OUTSIDE_DATA ? portion->T : NAN) : cp;
@@ -169,13 +166,13 @@ struct gas_result gas_mix_streams(const struct gas_portion *portion, const int *
     struct gas_result n = check_all(&mixing), done = n.status ? n : mixed_temperature(&mixing, n.value);
     if (done.status)
         return give_up(blend, done);
-    double P = isnan(P_out) ? lowest_pressure(portion, count) : P_out;
-    if (!isfinite(P) || !(P > 0))
-        return give_up(blend, gas_bad(isfinite(P) ? GAS_NOT_POSITIVE : GAS_NOT_FINITE, (int)count + 1, P));
-    *blend = (struct gas_blend){.n = n.value, .T = done.value, .P = P};
+    struct gas_result P = check_positive((int)count + 1, isnan(P_out) ? lowest_pressure(portion, count) : P_out);
+    if (P.status)
+        return give_up(blend, P);
+    *blend = (struct gas_blend){.n = n.value, .T = done.value, .P = P.value};
     struct gas_result made = entropy_made(&mixing, blend);
     if (!made.status && made.value < -1e-9 * n.value * GAS_R) /* beyond rounding: the second law forbids it */
-        made = gas_bad(GAS_UNREACHABLE, (int)count + 1, P);
+        made = gas_bad(GAS_UNREACHABLE, (int)count + 1, P.value);
     blend->entropy_made = made.value;
     return made.status ? give_up(blend, made) : done;
 }

@@ -1,7 +1,10 @@
 #include <math.h>
+#include <stdbool.h>
 
 #include <gasleaf/heat.h>
 #include <gasleaf/vessel.h>
+
+#include "figures.h"
 
 /* Molar flow of a perfect gas through an isentropic nozzle is  C A P/sqrt(M R T) phi(P_down/P)  with
  *   choked    phi = sqrt(k) (2/(k + 1))^((k + 1)/(2 (k - 1)))
@@ -31,36 +34,31 @@ struct figure {
     int argument;
 };
 
-static struct gas_result check_positive(const struct figure *figure, size_t count)
+static struct gas_result check_all_positive(const struct figure *figure, size_t count)
 {
     for (size_t i = 0; i < count; i++) {
-        if (!isfinite(figure[i].value))
-            return gas_bad(GAS_NOT_FINITE, figure[i].argument, figure[i].value);
-        if (!(figure[i].value > 0))
-            return gas_bad(GAS_NOT_POSITIVE, figure[i].argument, figure[i].value);
+        struct gas_result checked = check_positive(figure[i].argument, figure[i].value);
+        if (checked.status)
+            return checked;
     }
     return gas_good(1);
 }
 
 static struct gas_result check_orifice(double P_down, double area, double coefficient, int first)
 {
-    if (!isfinite(P_down))
-        return gas_bad(GAS_NOT_FINITE, first, P_down);
-    if (P_down < 0)
-        return gas_bad(GAS_NEGATIVE, first, P_down);
     const struct figure figures[] = {{area, first + 1}, {coefficient, first + 2}};
-    struct gas_result checked = check_positive(figures, 2);
+    struct gas_result checked = check_not_negative(first, P_down);
+    if (!checked.status)
+        checked = check_all_positive(figures, 2);
     if (!checked.status && coefficient > 1)
         return gas_bad(GAS_NOT_A_FRACTION, first + 2, coefficient);
     return checked;
 }
 
-/* gamma of a gas whose molar mass is known; the argument numbers of temperature and gas are
- * handed in. */
+/* gamma of a gas whose molar mass is known; the argument numbers of temperature and gas are handed in. */
 static struct gas_result gamma_of(const struct gas *gas, double T, int argument, int gas_argument)
 {
-    const struct figure M = {gas->molar_mass, gas_argument};
-    struct gas_result checked = check_positive(&M, 1);
+    struct gas_result checked = check_positive(gas_argument, gas->molar_mass);
     if (checked.status)
         return checked;
     struct gas_result k = gas_gamma(gas, T);
@@ -71,17 +69,11 @@ static struct gas_result gamma_of(const struct gas *gas, double T, int argument,
     return k;
 }
 
-/* Figures so far out that the answer has no number. */
-static struct gas_result if_finite(double value)
-{
-    return isfinite(value) ? gas_good(value) : gas_bad(GAS_NOT_FINITE, 0, NAN);
-}
-
 struct gas_result gas_nozzle_flow(const struct gas *gas, double P, double T, double P_down, double area,
                                   double coefficient)
 {
     const struct figure upstream[] = {{P, 2}, {T, 3}};
-    struct gas_result checked = check_positive(upstream, 2);
+    struct gas_result checked = check_all_positive(upstream, 2);
     if (!checked.status)
         checked = check_orifice(P_down, area, coefficient, 4);
     if (!checked.status && P_down > P)
@@ -118,7 +110,7 @@ static double tail_integral(double exponent, double s1, double s2)
 /* Times below are in units of V/(C A sqrt(R T1/M)). Isothermal: dt = -dP/(P phi). Adiabatic, n ~ P^(1/k) and
  * T ~ P^((k-1)/k): dt = -dP/(k P phi) (P/P1)^-m with m = (k - 1)/(2 k). In s, dP/P = 2 k/(k - 1) s ds/(1 - s^2) and
  * the s of phi cancels. */
-static double choked_time(double k, int adiabatic, double P1, double from, double to)
+static double choked_time(double k, bool adiabatic, double P1, double from, double to)
 {
     double m = (k - 1) / (2 * k);
     if (!adiabatic)
@@ -126,7 +118,7 @@ static double choked_time(double k, int adiabatic, double P1, double from, doubl
     return pow(from / P1, -m) * expm1(m * log(from / to)) / (m * k * choked_flow(k));
 }
 
-static double tail_time(double k, int adiabatic, double P1, double P_down, double from, double to)
+static double tail_time(double k, bool adiabatic, double P1, double P_down, double from, double to)
 {
     double s_to = speed_measure(k, P_down / to), s_from = speed_measure(k, P_down / from);
     double exponent = -k / (k - 1), factor = sqrt(2 * k / (k - 1));
@@ -141,7 +133,7 @@ static struct gas_result check_vent_time(const struct gas_vessel *vessel, double
                                          double coefficient)
 {
     const struct figure start[] = {{vessel->V, 1}, {vessel->P1, 2}, {vessel->T1, 3}, {vessel->P2, 4}};
-    struct gas_result checked = check_positive(start, 4);
+    struct gas_result checked = check_all_positive(start, 4);
     if (!checked.status && vessel->wall != GAS_WALL_ADIABATIC && vessel->wall != GAS_WALL_ISOTHERMAL)
         return gas_bad(GAS_NOT_APPLICABLE, 6, NAN);
     if (!checked.status)
@@ -159,7 +151,7 @@ struct gas_result gas_vent_time(const struct gas *gas, const struct gas_vessel *
     if (gamma.status)
         return gamma;
     double k = gamma.value, P1 = vessel->P1, P2 = vessel->P2;
-    int adiabatic = vessel->wall == GAS_WALL_ADIABATIC;
+    bool adiabatic = vessel->wall == GAS_WALL_ADIABATIC;
     double choked_to = P_down * pow((k + 1) / 2, k / (k - 1)); /* the pressure down to which the flow is choked */
     double turn = fmin(fmax(choked_to, P2), P1);
     double time = choked_time(k, adiabatic, P1, P1, turn);

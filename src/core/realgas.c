@@ -5,6 +5,7 @@
 
 #include <gasleaf/gas.h>
 
+#include "figures.h"
 #include "root.h"
 
 /* Constants of the two fluids, Lee & Kesler (1975), table 3. */
@@ -163,10 +164,9 @@ static struct gas_result check_reduced(double Tr, double Pr, double omega)
         return gas_bad(GAS_NOT_FINITE, 1, Tr);
     if (!(Tr >= 0.3 && Tr <= 4))
         return gas_bad(GAS_OUTSIDE_DATA, 1, Tr);
-    if (!isfinite(Pr))
-        return gas_bad(GAS_NOT_FINITE, 2, Pr);
-    if (Pr < 0)
-        return gas_bad(GAS_NEGATIVE, 2, Pr);
+    struct gas_result pressure = check_not_negative(2, Pr);
+    if (pressure.status)
+        return pressure;
     if (Pr > 10)
         return gas_bad(GAS_OUTSIDE_DATA, 2, Pr);
     if (!isfinite(omega))
@@ -278,10 +278,9 @@ static struct gas_result check_ideal(const struct gas_critical *critical, double
     const double figure[] = {critical->T, critical->P, T, tolerance};
     const int argument[] = {1, 1, 2, 3};
     for (int i = 0; i < 4; i++) {
-        if (!isfinite(figure[i]))
-            return gas_bad(GAS_NOT_FINITE, argument[i], figure[i]);
-        if (!(figure[i] > 0))
-            return gas_bad(GAS_NOT_POSITIVE, argument[i], figure[i]);
+        struct gas_result positive = check_positive(argument[i], figure[i]);
+        if (positive.status)
+            return positive;
     }
     struct gas_result checked = check_reduced(T / critical->T, 0, critical->omega);
     if (checked.status)

@@ -1,17 +1,12 @@
 #include "relations.h"
 
-#define IS(variable) (1u << GAS_VAR_##variable)
-#define UP(variable)                                                                                                   \
-    {                                                                                                                  \
-        GAS_VAR_##variable, 1                                                                                          \
-    }
-#define DOWN(variable)                                                                                                 \
-    {                                                                                                                  \
-        GAS_VAR_##variable, -1                                                                                         \
-    }
+/* clang-format off */
+#define IS(variable)       (1u << GAS_VAR_##variable)
+#define UP(variable)       {GAS_VAR_##variable, 1}
+#define DOWN(variable)     {GAS_VAR_##variable, -1}
 #define TO(variable, text) [GAS_VAR_##variable] = text
 
-/* clang-format off */
+/* kind | between two states | factors | exponents of R, M | firm | fragile | as written | solved for each */
 const struct relation gas_relations[RELATIONS] = {
     [RELATION_PV_NRT] = {RELATION_PRODUCT, false, 4, {UP(P), UP(V), DOWN(N), DOWN(T)}, -1, 0,
         IS(P) | IS(V) | IS(N) | IS(T), 0, "P V = n R T",

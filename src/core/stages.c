@@ -1,9 +1,11 @@
 #include <gasleaf/stages.h>
 
 #include <math.h>
+#include <stdbool.h>
 
 #include <gasleaf/heat.h>
 
+#include "figures.h"
 #include "root.h"
 
 enum argument { AT_P1 = 1, AT_T1, AT_P2, AT_COUNT, AT_RATIO, AT_EFFICIENCY, AT_T_COOL, AT_DROP, AT_DRIVE };
@@ -51,20 +53,6 @@ static struct gas_result factor_for(const struct ladder *ladder)
     }
     /* a hair's breadth to either side, so that rounding does not hide the change of sign */
     return root_between(overshoot, ladder, factor * (1 - 1e-9), (factor + ladder->drop / least) * (1 + 1e-9));
-}
-
-static struct gas_result check_positive(int argument, double figure)
-{
-    if (!isfinite(figure))
-        return gas_bad(GAS_NOT_FINITE, argument, figure);
-    return figure > 0 ? gas_good(figure) : gas_bad(GAS_NOT_POSITIVE, argument, figure);
-}
-
-static struct gas_result check_fraction(int argument, double figure)
-{
-    if (!isfinite(figure))
-        return gas_bad(GAS_NOT_FINITE, argument, figure);
-    return figure > 0 && figure <= 1 ? gas_good(figure) : gas_bad(GAS_NOT_A_FRACTION, argument, figure);
 }
 
 static struct gas_result check_temperature(const struct gas *gas, int argument, double T)
@@ -201,7 +189,7 @@ static struct gas_result set_pressures(const struct ladder *ladder, double facto
 {
     double P = ladder->P1;
     for (int i = 0; i < ladder->count; i++) {
-        int last = i + 1 == ladder->count;
+        bool last = i + 1 == ladder->count;
         double ratio = factor * ratio_of(ladder, i);
         staged->stage[i] = (struct gas_stage){.P_in = P, .P_out = last ? ladder->P2 : P * ratio, .ratio = ratio};
         if (!(ratio > 1))
@@ -221,7 +209,7 @@ static struct gas_result run_stages(const struct gas *gas, double T1, const stru
     double T = T1;
     for (int i = 0; i < staged->count; i++) {
         struct gas_stage *stage = &staged->stage[i];
-        int uncooled = i + 1 == staged->count && !staging->aftercooler;
+        bool uncooled = i + 1 == staged->count && !staging->aftercooler;
         stage->T_in = T;
         struct gas_result done = compress(gas, staging, stage);
         if (!done.status)

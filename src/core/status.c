@@ -8,5 +8,5 @@ static const char *const words[] = {
 
 const char *gas_status_words(enum gas_status status)
 {
-    return words[status];
+    return (unsigned)status < GAS_STATUS_COUNT ? words[status] : "";
 }

@@ -5,26 +5,13 @@
 
 #include <gasleaf/heat.h>
 
+#include "figures.h"
 #include "root.h"
 #include "wall.h"
 
 enum argument { AT_V = 1, AT_P1, AT_T1, AT_P2, AT_T_LINE, AT_WALL, AT_T_SETTLED };
 
 /* ---- what is given ------------------------------------------------------------------------------------------- */
-
-static struct gas_result check_positive(int argument, double figure)
-{
-    if (!isfinite(figure))
-        return gas_bad(GAS_NOT_FINITE, argument, figure);
-    return figure > 0 ? gas_good(figure) : gas_bad(GAS_NOT_POSITIVE, argument, figure);
-}
-
-static struct gas_result check_not_negative(int argument, double figure)
-{
-    if (!isfinite(figure))
-        return gas_bad(GAS_NOT_FINITE, argument, figure);
-    return figure >= 0 ? gas_good(figure) : gas_bad(GAS_NEGATIVE, argument, figure);
-}
 
 static struct gas_result check_known(const struct gas *gas, int argument, double T)
 {
