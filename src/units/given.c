@@ -106,10 +106,7 @@ bool gas_given_parse(const char *text, size_t length, const struct gas_reference
     struct gas_unit_fault unit_fault;
     struct gas_heading_fault ignored = {.status = GAS_HEADING_OK};
     fault = fault ? fault : &ignored;
-    while (length > 0 && gas_is_space(text[0]))
-        text++, length--;
-    while (length > 0 && gas_is_space(text[length - 1]))
-        length--;
+    gas_trim(&text, &length);
     if (length == 0)
         return gas_heading_refuse(fault, GAS_HEADING_EMPTY, "give a figure and its unit, such as 7 bar(g)");
     if (length >= GAS_HEADING_TEXT + GAS_UNIT_TEXT)

@@ -20,10 +20,7 @@ struct attempt { /* the best answer so far */
 
 static struct piece piece_of(const char *text, size_t length)
 {
-    while (length > 0 && gas_is_space(text[0]))
-        text++, length--;
-    while (length > 0 && gas_is_space(text[length - 1]))
-        length--;
+    gas_trim(&text, &length);
     return (struct piece){text, length};
 }
 

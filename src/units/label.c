@@ -42,7 +42,7 @@ static const struct meaning *meaning_of(const char *word)
     return NULL;
 }
 
-/* A Greek capital delta or the sign of a difference, -1 bytes when it is none. */
+/* Bytes of a Greek capital delta or of the sign of a difference, 0 when none stands here. */
 static int delta_bytes(const char *p)
 {
     return strncmp(p, "\xce\x94", 2) == 0 ? 2 : strncmp(p, "\xe2\x88\x86", 3) == 0 ? 3 : 0;

@@ -330,21 +330,18 @@ static bool is_per(const char *p)
            !gas_is_digit(p[3]);
 }
 
-/* The operator before the next part: space, '*', '-' or '/'. */
-static char read_operator(struct reader *reader)
+/* The operator before the next part, one of space, *, - and /. Returned: is it the line? */
+static bool read_operator(struct reader *reader)
 {
     skip_spaces(reader);
     char c = *reader->p;
-    if (is_per(reader->p)) {
+    bool per = is_per(reader->p);
+    if (per)
         reader->p += 3;
-        c = '/';
-    } else if (c == '/' || c == '*' || c == '-') {
+    else if (c == '/' || c == '*' || c == '-')
         reader->p++;
-    } else {
-        c = ' ';
-    }
     skip_spaces(reader);
-    return c;
+    return per || c == '/';
 }
 
 /* One level up to its end or closing parenthesis. `sign` is -1 below an outer line. */
@@ -353,10 +350,9 @@ static bool read_level(struct reader *reader, int sign, int depth)
     bool below = false, first = true;
     skip_spaces(reader);
     do {
-        char operator= first ? ' ' : read_operator(reader);
-        if (operator== '/')
-            below = true;
-        if (!read_part(reader, below ? -sign : sign, below, first || operator== '/', depth))
+        bool slash = !first && read_operator(reader);
+        below |= slash;
+        if (!read_part(reader, below ? -sign : sign, below, first || slash, depth))
             return false;
         first = false;
         skip_spaces(reader);

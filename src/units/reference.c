@@ -19,11 +19,6 @@ const char *gas_reference_mark(const char *plain)
     return at;
 }
 
-const char *gas_reference_values(const char *at)
-{
-    return at + (*at == '@' ? 1 : 2);
-}
-
 static bool refuse(struct gas_unit_fault *fault, const char *from, const char *hint)
 {
     return gas_unit_refuse(fault, GAS_UNIT_REFERENCE, from, strlen(from), hint);
@@ -106,7 +101,7 @@ static bool read_base(const char *plain, const char *at, struct gas_unit *unit, 
 bool gas_reference_parse(const char *plain, const char *at, struct gas_unit *unit, struct gas_unit_fault *fault)
 {
     char values[PLAIN_TEXT];
-    const char *p = next_value(gas_reference_values(at));
+    const char *p = next_value(at + (*at == '@' ? 1 : 2));
     copy_trimmed(values, p, p + strlen(p));
     size_t length = strlen(values);
     bool bracket = values[0] == '(' && values[length - 1] == ')';

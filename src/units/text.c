@@ -31,6 +31,14 @@ bool gas_same_folded(const char *a, const char *b, size_t length)
     return true;
 }
 
+void gas_trim(const char **text, size_t *length)
+{
+    while (*length > 0 && gas_is_space((*text)[0]))
+        ++*text, --*length;
+    while (*length > 0 && gas_is_space((*text)[*length - 1]))
+        --*length;
+}
+
 /* Bytes of the character at text and its code point; 0 when it is not valid UTF-8. Overlong forms and surrogates are
  * refused, so that no two byte sequences mean the same text. */
 size_t gas_utf8_next(const char *text, size_t length, unsigned *point)

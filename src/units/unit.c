@@ -78,20 +78,12 @@ static void parse_afresh(const char *text, size_t length, const struct gas_refer
     gas_copy_text(out->unit.text, sizeof out->unit.text, text, length);
 }
 
-static void trim(const char **text, size_t *length)
-{
-    while (*length > 0 && gas_is_space((*text)[0]))
-        ++*text, --*length;
-    while (*length > 0 && gas_is_space((*text)[*length - 1]))
-        --*length;
-}
-
 bool gas_unit_parse(const char *text, size_t length, const struct gas_references *references, struct gas_unit *unit,
                     struct gas_unit_fault *fault)
 {
     struct outcome out;
     const struct gas_references *used = references ? references : &gas_references_default;
-    trim(&text, &length);
+    gas_trim(&text, &length);
     if (length == 0)
         return gas_unit_refuse(fault, GAS_UNIT_EMPTY, "", 0, "give a unit");
     if (length >= GAS_UNIT_TEXT)

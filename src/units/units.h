@@ -20,7 +20,6 @@ enum unit_kind {
     UNIT_NORMAL,   /* a volume that counts as an amount: reference normal_T, normal_P */
     UNIT_STANDARD, /* ... standard_T, standard_P */
     UNIT_SCF,      /* ... scf_T, scf_P */
-    UNIT_SPELLED,  /* ... written out after the unit; never in the table */
     UNIT_AMBIGUOUS /* a name with several meanings: `source` holds the choices */
 };
 
@@ -86,7 +85,6 @@ bool gas_basis_parse(const char *plain, const struct gas_references *references,
 /* reference.c: "m3@20 degC,101.325 kPa". */
 bool gas_reference_parse(const char *plain, const char *at, struct gas_unit *unit, struct gas_unit_fault *fault);
 const char *gas_reference_mark(const char *plain); /* the @, or NULL */
-const char *gas_reference_values(const char *at);  /* where the temperature and the pressure begin */
 
 /* faults; a NULL fault is allowed. Returns false, so that a parser can return it. `at` is cut and cleaned. */
 bool gas_unit_refuse(struct gas_unit_fault *fault, enum gas_unit_status status, const char *at, size_t length,
@@ -98,6 +96,7 @@ bool gas_is_digit(char c);
 bool gas_is_space(char c);
 char gas_lower(char c);
 bool gas_same_folded(const char *a, const char *b, size_t length);
+void gas_trim(const char **text, size_t *length);                           /* spaces at both ends taken off */
 void gas_copy_text(char *to, size_t size, const char *from, size_t length); /* cut at a whole character */
 int gas_edit_distance(const char *a, const char *b, int limit);
 
