@@ -23,7 +23,7 @@ static bool says(const struct gas_block *legs, const char *word)
 {
     if (!gas_single(legs) || legs->cell->kind != GAS_CELL_TEXT)
         return false;
-    struct gas_piece text = gas_piece_trim((struct gas_piece){legs->cell->text, legs->cell->length});
+    struct gas_piece text = gas_piece_of(legs->cell);
     return gas_piece_take(&text, word) && text.length == 0;
 }
 

@@ -72,9 +72,10 @@ static bool run_check(struct sheet_check *sheet, struct gas_call *call)
         struct one_wanted *one = gas_arena_take(call->arena, 1, sizeof *one);
         if (!one)
             return gas_refuse(refusal, "given", "there is not enough memory for it; close other documents.");
-        if (!check_one(&sheet->check, i, &one->job, call->arena) ||
-            !desk_open(&one->desk, &one->job, call->arena, refusal) ||
-            !audit_open(&sheet->audit[i], &one->desk, call->arena, refusal))
+        if (!check_one(&sheet->check, i, &one->job, call->arena))
+            return false;
+        desk_open(&one->desk, &one->job, call->arena);
+        if (!audit_open(&sheet->audit[i], &one->desk, call->arena, refusal))
             return false;
         read_legacy(sheet, i);
         audit_run(&sheet->audit[i]);
@@ -189,8 +190,7 @@ static void answer_list(struct sheet_check *sheet, struct gas_call *call)
         return;
     for (size_t i = 0; i < call->answer.rows * call->answer.columns; i++)
         call->answer.cell[i] = (struct gas_cell){GAS_CELL_TEXT, 0, "", 0};
-    for (size_t i = 0; i < LIST_COLUMNS; i++)
-        gas_put_text(call, 0, i, titles[i]);
+    gas_put_texts(call, 0, titles, LIST_COLUMNS);
     for (size_t w = 0; w < wanted; w++)
         for (size_t i = 0; i < cases; i++)
             put_line(call, ++line, &sheet->audit[w], i);

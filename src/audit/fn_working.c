@@ -93,9 +93,7 @@ static void print_conventions(struct print *print)
     if (any_heading(job, has_datum)) {
         snprintf(words, sizeof words, "h = 0 and s = 0 at %s K and %s Pa; u = h - P v",
                  gas_shown(options->datum.T).text, gas_shown(options->datum.P).text);
-        print_basis(print, "datum", words,
-                    "options; 25 \xC2\xB0"
-                    "C and 1 bar unless given");
+        print_basis(print, "datum", words, "options; 25 °C and 1 bar unless given");
     }
     if (job->task == &gas_fill_task || job->task == &gas_vent_task)
         print_basis(print, "Q", "heat into the gas is positive; the gas in the vessel is well mixed", "convention");
@@ -213,14 +211,12 @@ static void answer_print(const struct print *print, struct gas_call *call)
                                                       "result", "unit",     "source"};
     if (!gas_answer_block(call, print->lines + 1, SHOWN_COLUMNS))
         return;
-    for (size_t i = 0; i < SHOWN_COLUMNS; i++)
-        gas_put_text(call, 0, i, titles[i]);
+    gas_put_texts(call, 0, titles, SHOWN_COLUMNS);
     for (size_t i = 0; i < print->lines; i++) {
         const struct line *line = &print->line[i];
         const char *texts[SHOWN_COLUMNS] = {line->step, line->quantity, line->formula, line->figures,
                                             "",         line->unit,     line->source};
-        for (size_t k = 0; k < SHOWN_COLUMNS; k++)
-            gas_put_text(call, i + 1, k, texts[k]);
+        gas_put_texts(call, i + 1, texts, SHOWN_COLUMNS);
         if (line->has_result)
             gas_put_number(call, i + 1, 4, line->result);
     }

@@ -58,12 +58,12 @@ static bool read_text(const struct gas_cell *cell, const struct gas_job *job, co
     size_t used;
     struct gas_unit unit;
     struct gas_unit_fault fault;
-    struct gas_piece text = gas_piece_trim((struct gas_piece){cell->text, cell->length});
+    struct gas_piece text = gas_piece_of(cell);
     if (!gas_number_parse(text.at, text.length, &legacy->figure, &used))
         return gas_refuse(refusal, "legacy", "%s is not a number; give the old sheet's figure.",
                           gas_quoted(shown, sizeof shown, text.at, text.length));
     legacy->digits = typed_digits(text.at, used, legacy->figure);
-    struct gas_piece rest = gas_piece_trim((struct gas_piece){text.at + used, text.length - used});
+    struct gas_piece rest = gas_piece_behind(text, used);
     if (rest.length == 0)
         return true;
     if (!gas_unit_parse(rest.at, rest.length, &job->options.references, &unit, &fault))

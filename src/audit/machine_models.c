@@ -8,11 +8,6 @@
 
 /* -- staged compression -------------------------------------------------------------------------------------------- */
 
-static struct gas_leg_figure plain(double figure)
-{
-    return (struct gas_leg_figure){.kind = GAS_FIGURE_FIXED, .figure = figure, .unit = gas_unit_si(GAS_DIM_NUMBER)};
-}
-
 static bool solve_stages(const struct replay *replay, struct gas_stages_case *stages)
 {
     struct gas_refusal refusal = {.made = true};
@@ -38,7 +33,7 @@ bool model_single_stage(struct replay *replay, double parameter)
     struct gas_typed_staging *staging = replay_staging(replay);
     if (!staging || staging->ratio_count)
         return false;
-    staging->figure[GAS_SAYS_COUNT] = plain(1);
+    staging->figure[GAS_SAYS_COUNT] = replay_fixed(1, GAS_DIM_NUMBER);
     staging->figure[GAS_SAYS_LIMIT].kind = GAS_FIGURE_NONE;
     return true;
 }
@@ -60,7 +55,7 @@ bool model_stages_reversible(struct replay *replay, double parameter)
     struct gas_typed_staging *staging = replay_staging(replay);
     if (!staging)
         return false;
-    staging->figure[GAS_SAYS_EFFICIENCY] = plain(1);
+    staging->figure[GAS_SAYS_EFFICIENCY] = replay_fixed(1, GAS_DIM_NUMBER);
     return true;
 }
 

@@ -5,11 +5,6 @@
 
 #include "audit/models.h"
 
-static struct gas_leg_figure fixed_number(double figure)
-{
-    return (struct gas_leg_figure){.kind = GAS_FIGURE_FIXED, .figure = figure, .unit = gas_unit_si(GAS_DIM_NUMBER)};
-}
-
 /* Calls change for every leg; true when one of them changed. */
 static bool change_legs(struct replay *replay,
                         bool (*change)(const struct replay *replay, size_t index, struct gas_typed_leg *leg))
@@ -36,16 +31,14 @@ static bool invert_ratio(const struct replay *replay, size_t index, struct gas_t
         return false;
     switch (leg->ending) {
     case GAS_TO_P:
-        leg->value = (struct gas_leg_figure){.kind = GAS_FIGURE_FIXED, .figure = start->P * start->P / solved->value};
-        leg->value.unit = gas_unit_si(GAS_DIM_PRESSURE);
+        leg->value = replay_fixed(start->P * start->P / solved->value, GAS_DIM_PRESSURE);
         return true;
     case GAS_TO_V:
-        leg->value = (struct gas_leg_figure){.kind = GAS_FIGURE_FIXED, .figure = start->v * start->v / solved->value};
-        leg->value.unit = gas_unit_si(GAS_DIM_MOLAR_VOLUME);
+        leg->value = replay_fixed(start->v * start->v / solved->value, GAS_DIM_MOLAR_VOLUME);
         return true;
     case GAS_BY_P_RATIO:
     case GAS_BY_V_RATIO:
-        leg->value = fixed_number(1 / solved->value);
+        leg->value = replay_fixed(1 / solved->value, GAS_DIM_NUMBER);
         return true;
     default:
         return false;
@@ -143,7 +136,7 @@ static bool set_exponent(struct gas_typed_leg *leg, double n)
     if (!isfinite(n) || fabs(n) > 50)
         return false;
     leg->process = GAS_POLYTROPIC;
-    leg->n = fixed_number(n);
+    leg->n = replay_fixed(n, GAS_DIM_NUMBER);
     return true;
 }
 

@@ -17,20 +17,11 @@ static void want(struct wants *wants, enum gas_variable variable, int state)
         wants->known[wants->count++] = (struct gas_known){variable, state};
 }
 
-static int last_state(const struct gas_job *job)
-{
-    int last = 0;
-    for (size_t i = 0; i < job->table.columns; i++)
-        if (job->table.heading[i].state > last)
-            last = job->table.heading[i].state;
-    return last;
-}
-
 /* What a wanted heading needs of the states. */
 static void want_heading(struct wants *wants, const struct gas_job *job, const struct gas_heading *heading)
 {
     enum gas_variable variable;
-    int last = last_state(job);
+    int last = gas_job_last_state(job);
     if (gas_variable_of(heading, &variable)) {
         want(wants, variable, heading->state);
         return;

@@ -114,15 +114,6 @@ static struct gas_job *variant(const struct desk *desk, const struct gas_heading
     return gas_job_prepare(job, arena, &refusal) ? job : NULL;
 }
 
-static int last_state(const struct gas_job *job)
-{
-    int last = job->wanted.heading[0].state;
-    for (size_t i = 0; i < job->table.columns; i++)
-        if (job->table.heading[i].state > last)
-            last = job->table.heading[i].state;
-    return last;
-}
-
 static struct gas_job *temperature_of(const struct desk *desk, int state, struct gas_arena *arena)
 {
     struct gas_heading heading = {.symbol = GAS_SYM_T, .state = state, .has_unit = true};
@@ -147,9 +138,8 @@ static struct gas_job *other_energy(const struct desk *desk, struct gas_arena *a
     return NULL;
 }
 
-bool desk_open(struct desk *desk, struct gas_job *job, struct gas_arena *arena, struct gas_refusal *refusal)
+void desk_open(struct desk *desk, struct gas_job *job, struct gas_arena *arena)
 {
-    (void)refusal;
     memset(desk, 0, sizeof *desk);
     desk->job = job;
     desk->legs = job->task == &gas_path_task ? job->legs : NULL;
@@ -157,11 +147,11 @@ bool desk_open(struct desk *desk, struct gas_job *job, struct gas_arena *arena, 
     find_sites(desk);
     desk->other = other_energy(desk, arena);
     if (!desk->legs && job->gas.interval_count > 0) {
-        int last = last_state(job);
+        int wanted = job->wanted.heading[0].state, given = gas_job_last_state(job);
+        int last = wanted > given ? wanted : given;
         desk->start = temperature_of(desk, last > 0 ? 1 : 0, arena);
         desk->end = last > 1 ? temperature_of(desk, last, arena) : NULL;
     }
-    return true;
 }
 
 static double probe(const struct gas_job *job, const struct gas_row *row)
@@ -209,8 +199,8 @@ void replay_reset(struct replay *replay, const struct desk_case *truth)
     replay->truth = truth;
     replay->job.gas = job->gas;
     replay->job.options = job->options;
-    replay->job.options.agree =
-        INFINITY; /* a slip in one of several givens that determine a figure is no contradiction */
+    /* a slip in one of several givens that determine a figure is no contradiction */
+    replay->job.options.agree = INFINITY;
     replay->job.own = job->own;
     replay->job.legs = job->legs;
     replay->job.wanted.heading[0].symbol = job->wanted.heading[0].symbol;
@@ -260,6 +250,11 @@ struct gas_typed_staging *replay_staging(struct replay *replay)
     return &replay->staging;
 }
 
+struct gas_leg_figure replay_fixed(double si, enum gas_dimension dimension)
+{
+    return (struct gas_leg_figure){.kind = GAS_FIGURE_FIXED, .figure = si, .unit = gas_unit_si(dimension)};
+}
+
 void replay_hold_cp(struct replay *replay, double cp)
 {
     replay->interval = (struct gas_interval){.T_from = 1e-3, .T_to = INFINITY};
@@ -297,8 +292,7 @@ static void read_sites(struct replay *replay)
             struct gas_leg_figure *fixed = site->kind == SITE_STAGING
                                                ? &replay_staging(replay)->figure[site->index]
                                                : leg_figure(&replay_legs(replay)->leg[site->index], site->place);
-            fixed->figure = si + reading->shift;
-            fixed->unit = gas_unit_si(site->unit->dimension);
+            *fixed = replay_fixed(si + reading->shift, site->unit->dimension);
         }
     }
 }

@@ -81,8 +81,8 @@ struct replay {
     bool staging_changed;
 };
 
-/* desk_open - the sites of a prepared job; false and a refusal only when memory is out. */
-bool desk_open(struct desk *desk, struct gas_job *job, struct gas_arena *arena, struct gas_refusal *refusal);
+/* desk_open - the sites of a prepared job; what cannot be had beside them (start, end, other) is NULL. */
+void desk_open(struct desk *desk, struct gas_job *job, struct gas_arena *arena);
 
 /* desk_read - a case of the job's table as it truly is; a refusal in the user's words when it cannot be. */
 bool desk_read(const struct desk *desk, size_t row, struct desk_case *truth, struct gas_refusal *refusal);
@@ -102,6 +102,9 @@ struct gas_typed_staging *replay_staging(struct replay *replay);
 
 /* replay_figure - of a site in the user's own unit; NAN when it has none in this case. */
 double replay_figure(const struct desk *desk, const struct desk_case *truth, size_t site);
+
+/* replay_fixed - a figure in SI as a leg or a stages text holds it. */
+struct gas_leg_figure replay_fixed(double si, enum gas_dimension dimension);
 
 /* replay_hold_cp - a constant heat capacity, J/(mol K), at any temperature. */
 void replay_hold_cp(struct replay *replay, double cp);

@@ -78,6 +78,12 @@ void gas_put_text(struct gas_call *call, size_t row, size_t column, const char *
     *answer_cell(call, row, column) = copy ? (struct gas_cell){GAS_CELL_TEXT, 0, copy, length} : no_memory;
 }
 
+void gas_put_texts(struct gas_call *call, size_t row, const char *const *texts, size_t count)
+{
+    for (size_t i = 0; i < count; i++)
+        gas_put_text(call, row, i, texts[i]);
+}
+
 void gas_put_not_available(struct gas_call *call, size_t row, size_t column)
 {
     *answer_cell(call, row, column) = (struct gas_cell){.kind = GAS_CELL_NOT_AVAILABLE};

@@ -78,6 +78,7 @@ void gas_answer_number(struct gas_call *call, double number);
 void gas_answer_text(struct gas_call *call, const char *text);
 void gas_put_number(struct gas_call *call, size_t row, size_t column, double number);
 void gas_put_text(struct gas_call *call, size_t row, size_t column, const char *text);
+void gas_put_texts(struct gas_call *call, size_t row, const char *const *texts, size_t count); /* from column 0 on */
 void gas_put_not_available(struct gas_call *call, size_t row, size_t column);
 
 #endif

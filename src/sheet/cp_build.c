@@ -5,6 +5,8 @@
 #include <stdlib.h>
 #include <string.h>
 
+#include "sheet/ascii.h"
+
 const struct gas_T_unit gas_T_kelvin = {
     .scale = 1, .level = {.dimension = GAS_DIM_TEMPERATURE, .scale = 1, .text = "K"}, .text = "K"};
 
@@ -16,7 +18,7 @@ static double divisor(struct gas_piece *text)
         char ending[16];
         size_t length = (size_t)snprintf(ending, sizeof ending, "/%.0f", divisors[i]);
         if (text->length >= length && memcmp(text->at + text->length - length, ending, length) == 0) {
-            *text = gas_piece_trim((struct gas_piece){text->at, text->length - length});
+            *text = gas_piece_front(*text, text->length - length);
             return divisors[i];
         }
     }
@@ -115,7 +117,7 @@ bool gas_cp_finish(const struct gas_cp_build *build, double T_from, double T_to,
 
 static bool is_word(struct gas_piece text, size_t i)
 {
-    return i < text.length && ((text.at[i] >= 'a' && text.at[i] <= 'z') || (text.at[i] >= 'A' && text.at[i] <= 'Z'));
+    return i < text.length && gas_ascii_letter(text.at[i]);
 }
 
 /* A C, F or R that stands alone or behind a degree sign or "deg": "J/mol-°C", "Btu/lb-F", "kJ/(kg degC)". */
@@ -164,7 +166,7 @@ bool gas_cp_unit_read(struct gas_piece text, struct gas_cp_unit *unit, struct ga
     text = gas_piece_trim(text);
     if (known_unit(text, unit, &fault))
         return true;
-    if (text.length > 1 && text.at[0] == 'T' && text.at[1] >= '0' && text.at[1] <= '9')
+    if (text.length > 1 && text.at[0] == 'T' && gas_ascii_digit(text.at[1]))
         return gas_refuse(refusal, "cp formula", "T%c is not known; write T^%c for a power.", text.at[1], text.at[1]);
     if (fault.status != GAS_UNIT_OK)
         return gas_refuse_unit(refusal, "cp unit", &fault);

@@ -3,8 +3,9 @@
 #include <stdio.h>
 #include <string.h>
 
-bool gas_unit_read(const struct gas_block *argument, const char *name, struct gas_unit *unit,
-                   struct gas_refusal *refusal)
+/* A unit text in a single cell. */
+static bool read_unit(const struct gas_block *argument, const char *name, struct gas_unit *unit,
+                      struct gas_refusal *refusal)
 {
     struct gas_unit_fault fault;
     if (!gas_single(argument) || argument->cell->kind != GAS_CELL_TEXT)
@@ -42,7 +43,7 @@ bool gas_input_open(struct gas_input *input, const struct gas_block *block, cons
     if (gas_omitted(unit))
         return true;
     snprintf(unit_name, sizeof unit_name, "%s unit", kind_of(input->dimension));
-    return gas_unit_read(unit, unit_name, &input->unit, refusal) && fits(input, &input->unit, refusal);
+    return read_unit(unit, unit_name, &input->unit, refusal) && fits(input, &input->unit, refusal);
 }
 
 bool gas_inputs_shape(const struct gas_input *inputs, size_t count, size_t *rows, size_t *columns,

@@ -36,8 +36,4 @@ bool gas_inputs_shape(const struct gas_input *inputs, size_t count, size_t *rows
 bool gas_input_read(const struct gas_input *input, size_t row, size_t column, struct gas_reading *reading,
                     struct gas_refusal *refusal);
 
-/* gas_unit_read - a unit text in a single cell. */
-bool gas_unit_read(const struct gas_block *argument, const char *name, struct gas_unit *unit,
-                   struct gas_refusal *refusal);
-
 #endif

@@ -6,6 +6,7 @@
 
 #include <gasleaf/unit.h>
 
+#include "sheet/ascii.h"
 #include "sheet/expression_sum.h"
 
 #define WHAT "cp formula"
@@ -59,16 +60,6 @@ static char next(struct reader *reader)
     return reader->rest.length ? reader->rest.at[0] : '\0';
 }
 
-static bool is_letter(char c)
-{
-    return (c >= 'a' && c <= 'z') || (c >= 'A' && c <= 'Z');
-}
-
-static bool is_digit(char c)
-{
-    return c >= '0' && c <= '9';
-}
-
 static bool refuse_here(struct reader *reader, const char *expected)
 {
     char shown[60];
@@ -97,7 +88,7 @@ static size_t name_at(const struct reader *reader, struct gas_piece text, struct
         *sum = gas_sum_of(1, 1);
     }
     char after = found < text.length ? text.at[found] : '\0';
-    if (found && (is_digit(after) || (is_letter(after) && reader->letters == 0)))
+    if (found && (gas_ascii_digit(after) || (gas_ascii_letter(after) && reader->letters == 0)))
         return 0; /* "T2", "Torr" */
     return found;
 }
@@ -107,7 +98,7 @@ static bool is_function(struct gas_piece text)
     static const char *const functions[] = {"exp", "ln", "log", "sqrt", "sinh", "cosh", "tanh", "coth", "sin", "cos"};
     for (size_t i = 0; i < sizeof functions / sizeof *functions; i++) {
         size_t length = strlen(functions[i]);
-        if (text.length > length && memcmp(text.at, functions[i], length) == 0 && !is_letter(text.at[length]))
+        if (text.length > length && memcmp(text.at, functions[i], length) == 0 && !gas_ascii_letter(text.at[length]))
             return true;
     }
     return false;
@@ -120,7 +111,7 @@ static bool refuse_word(struct reader *reader)
         return gas_refuse(reader->refusal, WHAT,
                           "only sums of powers of T are read, no functions such as exp or ln; a gas card knows the "
                           "hyperbolic forms.");
-    if (rest.length > 1 && rest.at[0] == 'T' && is_digit(rest.at[1]))
+    if (rest.length > 1 && rest.at[0] == 'T' && gas_ascii_digit(rest.at[1]))
         return gas_refuse(reader->refusal, WHAT, "T%c is not known; write T^%c for a power.", rest.at[1], rest.at[1]);
     if (rest.at[0] == 't')
         return gas_refuse(reader->refusal, WHAT,
@@ -145,7 +136,7 @@ static bool read_primary(struct reader *reader, struct gas_sum *sum)
     char c = next(reader);
     if (take(reader, "("))
         return read_parentheses(reader, sum);
-    if (is_digit(c) || c == '.' || c == ',') {
+    if (gas_ascii_digit(c) || c == '.' || c == ',') {
         if (!gas_number_parse(reader->rest.at, reader->rest.length, &number, &used))
             return refuse_here(reader, "a number (without spaces or grouping)");
         *sum = gas_sum_of(number, 0);
@@ -215,8 +206,8 @@ static bool product_goes_on(struct reader *reader)
     struct gas_piece rest;
     if (next(reader) != '(')
         return name_at(reader, reader->rest, &unused) > 0;
-    rest = gas_piece_trim((struct gas_piece){reader->rest.at + 1, reader->rest.length - 1});
-    return !(rest.length && is_letter(rest.at[0])) || name_at(reader, rest, &unused) > 0;
+    rest = gas_piece_behind(reader->rest, 1);
+    return !(rest.length && gas_ascii_letter(rest.at[0])) || name_at(reader, rest, &unused) > 0;
 }
 
 static bool take_times(struct reader *reader)

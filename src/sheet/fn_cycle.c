@@ -80,8 +80,7 @@ static bool answer_cycle_card(struct gas_path_call *path, struct gas_call *call,
     size_t rows = 1;
     if (!gas_answer_block(call, 1 + sizeof cycle_rows / sizeof *cycle_rows, 3))
         return true;
-    for (size_t i = 0; i < 3; i++)
-        gas_put_text(call, 0, i, headings[i]);
+    gas_put_texts(call, 0, headings, 3);
     for (size_t i = 0; i < sizeof cycle_rows / sizeof *cycle_rows; i++) {
         struct gas_heading heading = cycle_heading(&path->job, &cycle_rows[i]);
         struct gas_refusal no_value = {0};

@@ -67,8 +67,7 @@ static void answer_card(struct gas_call *call, const struct gas_choice *choice, 
     if (!gas_answer_block(call, 1 + facts->count + 2 * parts + facts->cited, 4))
         return;
     static const char *const heading[] = {"label", "value", "unit", "source"};
-    for (size_t i = 0; i < 4; i++)
-        gas_put_text(call, 0, i, heading[i]);
+    gas_put_texts(call, 0, heading, 4);
     for (size_t i = 0; i < facts->count; i++)
         put_fact(call, ++row, &facts->fact[i]);
     for (size_t i = 0; i < parts; i++)
@@ -175,8 +174,8 @@ static bool answer_item(struct gas_call *call, const struct gas_choice *choice, 
     if (!comma)
         return refuse_item(refusal, choice, facts, item);
     const size_t front = (size_t)(comma - item.at);
-    struct gas_piece name = gas_piece_trim((struct gas_piece){item.at, front});
-    struct gas_piece unit = gas_piece_trim((struct gas_piece){comma + 1, item.length - front - 1});
+    struct gas_piece name = gas_piece_front(item, front);
+    struct gas_piece unit = gas_piece_behind(item, front + 1);
     fact = find_fact(facts, name);
     if (fact)
         return answer_fact(call, choice, fact, unit, refusal);
@@ -191,7 +190,7 @@ static bool read_single_text(const struct gas_block *argument, const char *what,
         return true;
     if (!gas_single(argument) || argument->cell->kind != GAS_CELL_TEXT)
         return gas_refuse(refusal, what, "it is one text in one cell.");
-    *text = gas_piece_trim((struct gas_piece){argument->cell->text, argument->cell->length});
+    *text = gas_piece_of(argument->cell);
     return true;
 }
 
@@ -298,8 +297,7 @@ static void answer_list(struct gas_call *call, struct gas_piece search, struct g
     }
     if (!gas_answer_block(call, found + 1, 5))
         return;
-    for (size_t i = 0; i < 5; i++)
-        gas_put_text(call, 0, i, heading[i]);
+    gas_put_texts(call, 0, heading, 5);
     for (size_t i = 0, row = 0; i < species; i++)
         if (matches(gas_species_at(i), search))
             put_species(call, ++row, gas_species_at(i));

@@ -3,7 +3,7 @@
 #include <string.h>
 
 #include "sheet/functions.h"
-#include "sheet/leg_refusal.h"
+#include "sheet/job_units.h"
 #include "sheet/mix.h"
 #include "sheet/path_call.h"
 
@@ -65,6 +65,7 @@ static void write_gas(const struct gas_mix *mix, char *text, size_t size)
 
 static bool answer_card(const struct gas_mix *mix, struct gas_call *call, struct gas_refusal *refusal)
 {
+    static const char *const headings[] = {"quantity", "value", "unit"};
     char text[1000];
     size_t at = 1;
     double mass = 0;
@@ -72,9 +73,7 @@ static bool answer_card(const struct gas_mix *mix, struct gas_call *call, struct
         mass += mix->part[i].n * mix->part[i].part->molar_mass;
     if (!gas_answer_block(call, 2 + CARD_ROWS + 2 * mix->parts, 3))
         return true;
-    gas_put_text(call, 0, 0, "quantity");
-    gas_put_text(call, 0, 1, "value");
-    gas_put_text(call, 0, 2, "unit");
+    gas_put_texts(call, 0, headings, 3);
     for (size_t i = 0; i < CARD_ROWS; i++)
         if (!put_card_row(mix, call, at++, &card_rows[i], refusal))
             return false;

@@ -227,6 +227,7 @@ static bool open_card(struct card *card, struct gas_arena *arena, struct gas_row
 
 static bool answer_card(struct gas_job *job, struct gas_call *call, struct gas_refusal *refusal)
 {
+    static const char *const headings[] = {"quantity", "value", "unit", "±"};
     struct gas_row row;
     struct card *card = gas_arena_take(call->arena, 1, sizeof *card);
     if (!card)
@@ -237,11 +238,7 @@ static bool answer_card(struct gas_job *job, struct gas_call *call, struct gas_r
         return false;
     if (!gas_answer_block(call, card->rows + 1, card->spread ? 4 : 3))
         return true;
-    gas_put_text(call, 0, 0, "quantity");
-    gas_put_text(call, 0, 1, "value");
-    gas_put_text(call, 0, 2, "unit");
-    if (card->spread)
-        gas_put_text(call, 0, 3, "±");
+    gas_put_texts(call, 0, headings, card->spread ? 4 : 3);
     for (size_t i = 0; i < card->rows; i++)
         answer_row(card, call, i, &row);
     return true;

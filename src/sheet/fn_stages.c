@@ -6,7 +6,7 @@
 #include <gasleaf/heat.h>
 
 #include "sheet/functions.h"
-#include "sheet/leg_refusal.h"
+#include "sheet/job_units.h"
 #include "sheet/machine.h"
 #include "sheet/stages_task.h"
 

@@ -4,38 +4,40 @@
 #include <string.h>
 
 #include "sheet/functions.h"
-#include "sheet/leg_refusal.h"
+#include "sheet/job_units.h"
 #include "sheet/machine.h"
 #include "sheet/path_call.h"
 #include "sheet/vessel_task.h"
 
 /* What a card shows: the label and what it is read as. NULL as the unit: that of the givens. */
-static const struct card_row {
+struct card_row {
     const char *label, *heading, *unit;
     enum gas_dimension like; /* the dimension whose unit is taken from the givens */
     bool orifice;            /* only where one is given */
-} fill_rows[] =
-    {
-        {"T2", "T2", NULL, GAS_DIM_TEMPERATURE, false},
-        {"m1", "m1", "kg", GAS_DIM_MASS, false},
-        {"m2", "m2", "kg", GAS_DIM_MASS, false},
-        {"m added", "m added", "kg", GAS_DIM_MASS, false},
-        {"n added", "n added", "Nm3", GAS_DIM_AMOUNT, false},
-        {"P settled", "P settled", NULL, GAS_DIM_PRESSURE, false},
-        {"Q", "Q", "kJ", GAS_DIM_ENERGY, false},
-        {"Z2, estimated", "Z2", "", GAS_DIM_NUMBER, false},
-},
-  vent_rows[] = {
-      {"T2", "T2", NULL, GAS_DIM_TEMPERATURE, false},
-      {"m1", "m1", "kg", GAS_DIM_MASS, false},
-      {"m2", "m2", "kg", GAS_DIM_MASS, false},
-      {"m out", "m out", "kg", GAS_DIM_MASS, false},
-      {"n out", "n out", "Nm3", GAS_DIM_AMOUNT, false},
-      {"P settled", "P settled", NULL, GAS_DIM_PRESSURE, false},
-      {"Q", "Q", "kJ", GAS_DIM_ENERGY, false},
-      {"Z1, estimated", "Z1", "", GAS_DIM_NUMBER, false},
-      {"m flow at the start", "m1", "kg/s", GAS_DIM_MASS_FLOW, true},
-      {"time", "time", "s", GAS_DIM_TIME, true},
+};
+
+static const struct card_row fill_rows[] = {
+    {"T2", "T2", NULL, GAS_DIM_TEMPERATURE, false},
+    {"m1", "m1", "kg", GAS_DIM_MASS, false},
+    {"m2", "m2", "kg", GAS_DIM_MASS, false},
+    {"m added", "m added", "kg", GAS_DIM_MASS, false},
+    {"n added", "n added", "Nm3", GAS_DIM_AMOUNT, false},
+    {"P settled", "P settled", NULL, GAS_DIM_PRESSURE, false},
+    {"Q", "Q", "kJ", GAS_DIM_ENERGY, false},
+    {"Z2, estimated", "Z2", "", GAS_DIM_NUMBER, false},
+};
+
+static const struct card_row vent_rows[] = {
+    {"T2", "T2", NULL, GAS_DIM_TEMPERATURE, false},
+    {"m1", "m1", "kg", GAS_DIM_MASS, false},
+    {"m2", "m2", "kg", GAS_DIM_MASS, false},
+    {"m out", "m out", "kg", GAS_DIM_MASS, false},
+    {"n out", "n out", "Nm3", GAS_DIM_AMOUNT, false},
+    {"P settled", "P settled", NULL, GAS_DIM_PRESSURE, false},
+    {"Q", "Q", "kJ", GAS_DIM_ENERGY, false},
+    {"Z1, estimated", "Z1", "", GAS_DIM_NUMBER, false},
+    {"m flow at the start", "m1", "kg/s", GAS_DIM_MASS_FLOW, true},
+    {"time", "time", "s", GAS_DIM_TIME, true},
 };
 
 /* A call being worked on. */
@@ -83,8 +85,7 @@ static bool answer_card(struct vessel_call *vessel, struct gas_call *call)
         return false;
     if (!gas_answer_block(call, count + 1, 3))
         return true;
-    for (size_t i = 0; i < 3; i++)
-        gas_put_text(call, 0, i, headings[i]);
+    gas_put_texts(call, 0, headings, 3);
     for (size_t i = 0; i < count; i++)
         used += put_row(vessel, call, used, &rows[i]);
     call->answer.rows = used;

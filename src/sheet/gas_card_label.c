@@ -115,10 +115,10 @@ static struct gas_piece without_unit(struct gas_piece text, struct gas_piece *un
         cut++;
     if (cut == 0 || cut == text.length)
         return text;
-    *unit = gas_piece_trim((struct gas_piece){text.at + cut + 1, text.length - cut - 1});
+    *unit = gas_piece_behind(text, cut + 1);
     if (text.at[cut] != ',' && unit->length && strchr(")]", unit->at[unit->length - 1]))
         unit->length--;
-    return gas_piece_trim((struct gas_piece){text.at, cut});
+    return gas_piece_front(text, cut);
 }
 
 /* "x methane" and "w methane": the mole and the mass fraction of a component. */

@@ -19,13 +19,6 @@ struct row {
     struct gas_piece unit; /* of the unit cell or the label; length 0: none */
 };
 
-static struct gas_piece text_of(const struct gas_cell *cell)
-{
-    if (cell->kind != GAS_CELL_TEXT)
-        return (struct gas_piece){"", 0};
-    return gas_piece_trim((struct gas_piece){cell->text, cell->length});
-}
-
 static const struct gas_cell *value_cell(const struct row *row, size_t interval)
 {
     return gas_cell_at(row->block, row->number, 1 + interval);
@@ -40,7 +33,7 @@ static bool refuse_row(const struct row *row, const char *words)
 static bool read_number(struct row *row, size_t interval, double *value)
 {
     const struct gas_cell *cell = value_cell(row, interval);
-    struct gas_piece text = text_of(cell);
+    struct gas_piece text = gas_piece_of(cell);
     size_t used;
     *value = cell->kind == GAS_CELL_NUMBER ? cell->number : NAN;
     if (cell->kind == GAS_CELL_NUMBER)
@@ -92,16 +85,11 @@ static bool read_R(struct row *row, bool of_fit)
 static bool read_cp(struct row *row)
 {
     struct gas_card *card = row->card;
-    card->cp = text_of(value_cell(row, 0));
+    card->cp = gas_piece_of(value_cell(row, 0));
     card->cp_text_unit = row->unit;
     if (value_cell(row, 0)->kind == GAS_CELL_NUMBER)
         return read_one_number(row, &card->cp_value);
     return card->cp.length || refuse_row(row, "has no value; give one or delete the row.");
-}
-
-static bool read_k(struct row *row)
-{
-    return read_one_number(row, &row->card->k);
 }
 
 static bool read_ends(struct row *row, double *end, struct gas_piece *unit)
@@ -136,31 +124,37 @@ static bool read_constant(struct row *row)
     return true;
 }
 
-static bool read_cp_unit(struct row *row, struct gas_piece text)
+/* Of the rows cp unit and T unit: in the value cell or in that of the unit. */
+static struct gas_piece unit_said(const struct row *row)
 {
-    if (text.length == 0)
-        text = row->unit;
-    row->card->cp_unit_said = true;
-    return gas_cp_unit_read(text, &row->card->cp_unit, row->card->refusal);
+    struct gas_piece text = gas_piece_of(value_cell(row, 0));
+    return text.length ? text : row->unit;
 }
 
-static bool read_T_unit(struct row *row, struct gas_piece text)
+static bool read_cp_unit(struct row *row)
 {
-    if (text.length == 0)
-        text = row->unit;
+    row->card->cp_unit_said = true;
+    return gas_cp_unit_read(unit_said(row), &row->card->cp_unit, row->card->refusal);
+}
+
+static bool read_T_unit(struct row *row)
+{
     row->card->T_unit_said = true;
-    return gas_T_unit_read(text, &row->card->T_unit, row->card->refusal);
+    return gas_T_unit_read(unit_said(row), &row->card->T_unit, row->card->refusal);
 }
 
 static bool read_text(struct row *row, struct gas_piece *kept)
 {
-    struct gas_piece text = text_of(value_cell(row, 0));
-    if (kept->length)
-        return refuse_row(row, "stands there twice; keep one.");
     if (row->unit.length && (row->label.item == GAS_CARD_RULE || row->label.item == GAS_CARD_RANGE))
         return refuse_row(row, "is read from its value cell alone; write the unit there.");
-    *kept = text;
+    *kept = gas_piece_of(value_cell(row, 0));
     return true;
+}
+
+/* Of names and sources, which a print may show twice, the first one stays. */
+static bool read_first(struct row *row, struct gas_piece *kept)
+{
+    return kept->length || read_text(row, kept);
 }
 
 static bool read_cp_at_25(struct row *row)
@@ -179,7 +173,7 @@ static bool read_part(struct row *row)
     struct gas_recipe *recipe = by_mass ? &row->card->by_mass : &row->card->by_mole;
     struct gas_component component = {.amount = cell->number};
     struct gas_marks marks = {0};
-    if (cell->kind == GAS_CELL_TEXT && !gas_amount_read(text_of(cell), &component, &marks))
+    if (cell->kind == GAS_CELL_TEXT && !gas_amount_read(gas_piece_of(cell), &component, &marks))
         return refuse_row(row, "needs a fraction as its value, such as 0.21 or 21 %.");
     if (cell->kind == GAS_CELL_EMPTY || (!component.rest && component.amount == 0))
         return true;
@@ -192,36 +186,25 @@ static bool read_part(struct row *row)
     return gas_recipe_add(recipe, row->label.part, component, &marks, row->card->refusal);
 }
 
-/* What a card can say once only. */
+/* What a card can say once only; read_single takes these. */
 static bool is_single(enum gas_card_item item)
 {
     return item >= GAS_CARD_M && item <= GAS_CARD_RULE;
 }
 
-static bool read_row(struct row *row)
+static bool read_single(struct row *row)
 {
     struct gas_card *card = row->card;
-    struct gas_piece text = text_of(value_cell(row, 0));
-    const unsigned bit = 1U << row->label.item;
-    if (is_single(row->label.item) && (card->seen & bit))
-        return refuse_row(row, "stands there twice; keep one.");
-    card->seen |= bit;
     switch (row->label.item) {
-    case GAS_CARD_NAME:
-        return card->name.length ? true : read_text(row, &card->name);
-    case GAS_CARD_FORMULA:
-        return card->formula.length ? true : read_text(row, &card->formula);
-    case GAS_CARD_CAS:
-        return card->cas.length ? true : read_text(row, &card->cas);
     case GAS_CARD_M:
         return read_M(row);
     case GAS_CARD_FORM:
         card->unit_of_form = row->unit;
         return read_text(row, &card->form);
     case GAS_CARD_CP_UNIT:
-        return read_cp_unit(row, text);
+        return read_cp_unit(row);
     case GAS_CARD_T_UNIT:
-        return read_T_unit(row, text);
+        return read_T_unit(row);
     case GAS_CARD_FROM:
         return read_ends(row, card->from, &card->from_unit);
     case GAS_CARD_TO:
@@ -234,29 +217,48 @@ static bool read_row(struct row *row)
     case GAS_CARD_CP:
         return read_cp(row);
     case GAS_CARD_K:
-        return read_k(row);
+        return read_one_number(row, &card->k);
     case GAS_CARD_RULE:
         return read_text(row, &card->rule);
-    case GAS_CARD_SOURCE:
-        return card->source.length ? true : read_text(row, &card->source);
-    case GAS_CARD_CP_AT_25:
-        return read_cp_at_25(row);
-    case GAS_CARD_MOLE_PART:
-    case GAS_CARD_MASS_PART:
-        return read_part(row);
-    case GAS_CARD_REMARK:
-        return true;
-    case GAS_CARD_CONSTANT:
-        return read_constant(row);
     default:
         return refuse_row(row, "is not a label known on a gas card; those are name, M, form, cp unit, T unit, the "
                                "constants, from, to, cp, k, R, rule, x with a component, source and note.");
     }
 }
 
+static bool read_row(struct row *row)
+{
+    struct gas_card *card = row->card;
+    const unsigned bit = 1U << row->label.item;
+    if (is_single(row->label.item) && (card->seen & bit))
+        return refuse_row(row, "stands there twice; keep one.");
+    card->seen |= bit;
+    switch (row->label.item) {
+    case GAS_CARD_NAME:
+        return read_first(row, &card->name);
+    case GAS_CARD_FORMULA:
+        return read_first(row, &card->formula);
+    case GAS_CARD_CAS:
+        return read_first(row, &card->cas);
+    case GAS_CARD_SOURCE:
+        return read_first(row, &card->source);
+    case GAS_CARD_CP_AT_25:
+        return read_cp_at_25(row);
+    case GAS_CARD_MOLE_PART:
+    case GAS_CARD_MASS_PART:
+        return read_part(row);
+    case GAS_CARD_CONSTANT:
+        return read_constant(row);
+    case GAS_CARD_REMARK:
+        return true;
+    default:
+        return read_single(row);
+    }
+}
+
 static bool holds_number(const struct gas_cell *cell)
 {
-    struct gas_piece text = text_of(cell);
+    struct gas_piece text = gas_piece_of(cell);
     double number;
     size_t used;
     return cell->kind == GAS_CELL_NUMBER ||
@@ -314,11 +316,11 @@ bool gas_card_read(struct gas_card *card, const struct gas_block *block)
     if (!accept_shape(card, block, values))
         return false;
     for (size_t number = 0; number < block->rows; number++) {
-        struct gas_piece text = text_of(gas_cell_at(block, number, 0));
+        struct gas_piece text = gas_piece_of(gas_cell_at(block, number, 0));
         struct row row = {card, block, number, values, gas_card_label_read(text), {"", 0}};
         row.unit = row.label.unit;
         if (values + 1 < block->columns && !gas_cell_blank(gas_cell_at(block, number, values + 1)))
-            row.unit = text_of(gas_cell_at(block, number, values + 1));
+            row.unit = gas_piece_of(gas_cell_at(block, number, values + 1));
         if (text.length == 0 && gas_cell_blank(value_cell(&row, 0)))
             continue;
         if (text.length == 0)

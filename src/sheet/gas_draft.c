@@ -6,6 +6,8 @@
 
 #include <gasleaf/heat.h>
 
+#include "sheet/ascii.h"
+
 #define ROOM_TEMPERATURE 298.15 /* K */
 
 /* No vapour comes near it: a cp this large has a wrong unit. */
@@ -36,11 +38,6 @@ static const struct {
     {"\u03b8", "theta"}, {"\u0398", "theta"},
 };
 
-static char lower(char c)
-{
-    return c >= 'A' && c <= 'Z' ? (char)(c - 'A' + 'a') : c;
-}
-
 /* Bytes read at the front of a text; *plain is what they stand for. */
 static size_t fold_one(struct gas_piece text, char one[2], const char **plain)
 {
@@ -50,7 +47,7 @@ static size_t fold_one(struct gas_piece text, char one[2], const char **plain)
         if (text.length >= bytes && memcmp(text.at, spelling[i].printed, bytes) == 0)
             return *plain = spelling[i].plain, bytes;
     }
-    one[0] = strchr(" \t\r\n-_.", text.at[0]) ? '\0' : lower(text.at[0]);
+    one[0] = strchr(" \t\r\n-_.", text.at[0]) ? '\0' : gas_ascii_lower(text.at[0]);
     one[1] = '\0';
     return *plain = one, 1;
 }
@@ -60,7 +57,7 @@ static bool keeps_minus(const char *buffer, size_t used)
 {
     if (used && buffer[used - 1] == '^')
         return true;
-    return used > 1 && buffer[used - 1] == 'e' && buffer[used - 2] >= '0' && buffer[used - 2] <= '9';
+    return used > 1 && buffer[used - 1] == 'e' && gas_ascii_digit(buffer[used - 2]);
 }
 
 const char *gas_fold(char *buffer, size_t size, struct gas_piece text)

@@ -5,11 +5,6 @@
 #include <stdlib.h>
 #include <string.h>
 
-static struct gas_piece text_of(const struct gas_cell *cell)
-{
-    return gas_piece_trim((struct gas_piece){cell->text, cell->length});
-}
-
 /* "mol %", "Mass fraction", "x": the words of a heading, wherever they stand in it. */
 static void read_heading(struct gas_piece heading, struct gas_marks *marks)
 {
@@ -29,7 +24,7 @@ static bool read_amount(const struct gas_cell *cell, struct gas_component *compo
     *marks = (struct gas_marks){0};
     *component = (struct gas_component){.amount = cell->number};
     if (cell->kind == GAS_CELL_TEXT)
-        return gas_amount_read(text_of(cell), component, marks);
+        return gas_amount_read(gas_piece_of(cell), component, marks);
     return cell->kind == GAS_CELL_NUMBER;
 }
 
@@ -49,7 +44,7 @@ static bool refuse_row(struct gas_refusal *refusal, const char *line, size_t row
 static bool is_total(const struct gas_cell *name)
 {
     char folded[40];
-    return gas_listed(gas_fold(folded, sizeof folded, text_of(name)), "total|sum|totals|\u03a3|\u2211|intotal");
+    return gas_listed(gas_fold(folded, sizeof folded, gas_piece_of(name)), "total|sum|totals|\u03a3|\u2211|intotal");
 }
 
 /* A heading names no gas and has words where a fraction would stand, or is a basis alone: "mol %" and a blank. */
@@ -58,7 +53,7 @@ static bool is_heading(const struct gas_cell *name, const struct gas_cell *amoun
     struct gas_marks marks = {0};
     bool named = name->kind == GAS_CELL_TEXT && !gas_cell_blank(name);
     if (gas_cell_blank(amount))
-        return named && gas_marks_read(text_of(name), &marks);
+        return named && gas_marks_read(gas_piece_of(name), &marks);
     return amount->kind == GAS_CELL_TEXT && !(named && gas_name_find(name->text, name->length));
 }
 
@@ -67,9 +62,9 @@ static bool take_heading(struct gas_recipe *recipe, const struct gas_cell *name,
 {
     struct gas_marks marks = {0};
     if (amount->kind == GAS_CELL_TEXT)
-        read_heading(text_of(amount), &marks);
+        read_heading(gas_piece_of(amount), &marks);
     if (name->kind == GAS_CELL_TEXT)
-        read_heading(text_of(name), &marks);
+        read_heading(gas_piece_of(name), &marks);
     if (marks.contradiction)
         return gas_refuse(refusal, "gas", "the heading of the mixture names both a mass and a mole basis; keep one.");
     recipe->basis = marks.basis;
@@ -83,7 +78,7 @@ static bool take_unit(const struct gas_cell *unit, struct gas_marks *marks, stru
     char shown[60];
     if (!unit || gas_cell_blank(unit))
         return true;
-    if (unit->kind == GAS_CELL_TEXT && gas_marks_read(text_of(unit), marks))
+    if (unit->kind == GAS_CELL_TEXT && gas_marks_read(gas_piece_of(unit), marks))
         return true;
     if (unit->kind != GAS_CELL_TEXT)
         return gas_refuse(refusal, "gas",
@@ -115,7 +110,7 @@ static bool read_row(struct gas_recipe *recipe, const struct gas_block *block, s
     component.ppm = marks.ppm;
     if (!component.rest && component.amount == 0) /* a what-if row at the end of its scale */
         return true;
-    return gas_recipe_add(recipe, text_of(name), component, &marks, refusal);
+    return gas_recipe_add(recipe, gas_piece_of(name), component, &marks, refusal);
 }
 
 static bool read_down(struct gas_draft *draft, const struct gas_block *block, const char *line)

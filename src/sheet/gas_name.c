@@ -4,6 +4,8 @@
 #include <stdio.h>
 #include <string.h>
 
+#include "sheet/ascii.h"
+
 void gas_draft_source(struct gas_draft *draft, const struct gas_species *species)
 {
     const struct gas_source *source = gas_source_find(species->heat_source);
@@ -16,11 +18,6 @@ static const struct gas_species *find_piece(struct gas_piece name)
     return gas_species_find(name.at, name.length);
 }
 
-static char lower(char c)
-{
-    return c >= 'A' && c <= 'Z' ? (char)(c - 'A' + 'a') : c;
-}
-
 /* Words at the end of a name, whatever their case, behind at least one other character. */
 static bool ends_in(struct gas_piece name, const char *words)
 {
@@ -28,7 +25,7 @@ static bool ends_in(struct gas_piece name, const char *words)
     if (name.length <= length)
         return false;
     for (size_t i = 0; i < length; i++)
-        if (lower(name.at[name.length - length + i]) != words[i])
+        if (gas_ascii_lower(name.at[name.length - length + i]) != words[i])
             return false;
     return true;
 }
@@ -41,8 +38,8 @@ static const struct gas_species *find_refrigerant(struct gas_piece name)
         return NULL;
     if (!name.length || name.length > 8)
         return NULL;
-    int length =
-        snprintf(number, sizeof number, "%s%.*s", lower(name.at[0]) == 'r' ? "" : "R-", (int)name.length, name.at);
+    int length = snprintf(number, sizeof number, "%s%.*s", gas_ascii_lower(name.at[0]) == 'r' ? "" : "R-",
+                          (int)name.length, name.at);
     return gas_species_find(number, (size_t)length);
 }
 
@@ -60,7 +57,7 @@ const struct gas_species *gas_name_find(const char *text, size_t length)
             break;
     for (size_t i = 0; i < sizeof behind / sizeof *behind; i++)
         if (ends_in(name, behind[i])) {
-            name = gas_piece_trim((struct gas_piece){name.at, name.length - strlen(behind[i])});
+            name = gas_piece_front(name, name.length - strlen(behind[i]));
             break;
         }
     return (found = find_piece(name)) ? found : find_refrigerant(name);

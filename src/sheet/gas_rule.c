@@ -11,7 +11,7 @@
 #include <stdio.h>
 #include <string.h>
 
-#include <gasleaf/heat.h>
+#include "sheet/ascii.h"
 
 #define WHAT "gas rule"
 
@@ -118,19 +118,14 @@ bool gas_constant_read(double figure, const struct gas_unit *unit, double *unive
     return true;
 }
 
-static bool is_digit(char c)
-{
-    return c >= '0' && c <= '9';
-}
-
 /* The unit behind a formula, in brackets or not; a range may follow: "J/mol-K, from 298 to 2000 K". */
 static bool read_formula_unit(struct gas_rules *rules, struct gas_piece text)
 {
     for (size_t i = 0; i + 1 < text.length; i++) {
         struct gas_piece tail = {text.at + i, text.length - i};
         bool apart = i == 0 || text.at[i - 1] == ' ';
-        bool range = (text.at[i] == '(' && is_digit(text.at[i + 1])) ||
-                     (apart && (is_digit(text.at[i]) || gas_piece_take(&tail, "from")));
+        bool range = (text.at[i] == '(' && gas_ascii_digit(text.at[i + 1])) ||
+                     (apart && (gas_ascii_digit(text.at[i]) || gas_piece_take(&tail, "from")));
         if (!range)
             continue;
         tail = (struct gas_piece){text.at + i, text.length - i};
@@ -138,7 +133,7 @@ static bool read_formula_unit(struct gas_rules *rules, struct gas_piece text)
             tail = (struct gas_piece){tail.at + 1, tail.length - 2};
         if (!gas_rules_range(rules, tail))
             return false;
-        text = gas_piece_trim((struct gas_piece){text.at, i});
+        text = gas_piece_front(text, i);
         break;
     }
     if (text.length > 2 && strchr("([", text.at[0]) && strchr(")]", text.at[text.length - 1]))
@@ -249,7 +244,7 @@ static bool ends_rule(struct gas_piece text, size_t i)
         return true;
     if (text.at[i] != ',')
         return false;
-    bool inside = i > 0 && i + 1 < text.length && is_digit(text.at[i - 1]) && is_digit(text.at[i + 1]);
+    bool inside = i > 0 && i + 1 < text.length && gas_ascii_digit(text.at[i - 1]) && gas_ascii_digit(text.at[i + 1]);
     return !inside;
 }
 

@@ -49,9 +49,9 @@ static bool name_of_constant(struct gas_piece piece, struct gas_piece *name)
     for (size_t i = piece.length; i-- > 1;) {
         if (!strchr(" =:", piece.at[i - 1]) || !gas_word_constant(piece.at + i, piece.length - i))
             continue;
-        *name = gas_piece_trim((struct gas_piece){piece.at, i});
+        *name = gas_piece_front(piece, i);
         if (name->length && strchr("=:", name->at[name->length - 1]))
-            *name = gas_piece_trim((struct gas_piece){name->at, name->length - 1});
+            *name = gas_piece_front(*name, name->length - 1);
         return name->length > 0;
     }
     return false;
@@ -133,7 +133,7 @@ static struct gas_piece name_before(struct gas_piece piece)
 {
     for (size_t i = 0; i < piece.length; i++)
         if (piece.at[i] == '=' || piece.at[i] == ':')
-            return gas_piece_trim((struct gas_piece){piece.at, i});
+            return gas_piece_front(piece, i);
     return (struct gas_piece){piece.at, 0};
 }
 
@@ -153,7 +153,7 @@ static bool read_plus_minus(struct gas_piece first, struct gas_piece second, con
     struct gas_piece name = name_before(first);
     if (!gas_number_parse(second.at, second.length, &spread, &used))
         return gas_refuse(refusal, what, "a plus-minus sign needs a figure behind it, such as \"P1 = 7 ± 0.05 bar\".");
-    struct gas_piece unit = gas_piece_trim((struct gas_piece){second.at + used, second.length - used});
+    struct gas_piece unit = gas_piece_behind(second, used);
     struct gas_piece figure = gas_piece_trim(name.length ? after_name(first) : first);
     bool bare = gas_number_parse(figure.at, figure.length, &ignored, &taken) && taken == figure.length;
     snprintf(text, sizeof text, "%.*s%s%.*s", (int)first.length, first.at, bare && unit.length ? " " : "",
@@ -167,8 +167,8 @@ static bool read_plus_minus(struct gas_piece first, struct gas_piece second, con
     snprintf(symbol, sizeof symbol, "%.*s", (int)name.length, name.at);
     if (name.length == 0)
         snprintf(symbol, sizeof symbol, "%s", gas_symbol_text(heading->symbol));
-    snprintf(text, sizeof text, "±%.60s = %.*s %.*s", symbol,
-             (int)gas_piece_trim((struct gas_piece){second.at, used}).length, second.at, (int)unit.length, unit.at);
+    snprintf(text, sizeof text, "±%.60s = %.*s %.*s", symbol, (int)gas_piece_front(second, used).length, second.at,
+             (int)unit.length, unit.at);
     if (!read_figure((struct gas_piece){text, strlen(text)}, references, what, item, refusal))
         return false;
     item->heading[1].tolerance = true;
@@ -186,7 +186,6 @@ bool gas_item_read(const char *text, size_t length, const struct gas_references 
     if (sign == 0)
         return read_figure(piece, references, what, item, refusal);
     size_t bytes = sign_bytes(piece.at + sign, piece.length - sign);
-    return read_plus_minus(gas_piece_trim((struct gas_piece){piece.at, sign}),
-                           gas_piece_trim((struct gas_piece){piece.at + sign + bytes, piece.length - sign - bytes}),
-                           references, what, item, refusal);
+    return read_plus_minus(gas_piece_front(piece, sign), gas_piece_behind(piece, sign + bytes), references, what, item,
+                           refusal);
 }

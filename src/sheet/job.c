@@ -203,6 +203,15 @@ int gas_job_tolerance_column(const struct gas_job *job, enum gas_symbol symbol, 
     return shared;
 }
 
+int gas_job_last_state(const struct gas_job *job)
+{
+    int last = 0;
+    for (size_t i = 0; i < job->table.columns; i++)
+        if (job->table.heading[i].state > last)
+            last = job->table.heading[i].state;
+    return last;
+}
+
 bool gas_heading_is_share(const struct gas_heading *heading)
 {
     return heading->tolerance && heading->unit.dimension == GAS_DIM_NUMBER &&

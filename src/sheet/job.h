@@ -108,6 +108,9 @@ void gas_job_refused(struct gas_call *call, const struct gas_options *options, c
 int gas_job_column(const struct gas_job *job, enum gas_symbol symbol, int state);
 int gas_job_tolerance_column(const struct gas_job *job, enum gas_symbol symbol, int state);
 
+/* gas_job_last_state - the highest state that a heading of `given` names; 0: none does. */
+int gas_job_last_state(const struct gas_job *job);
+
 /* gas_heading_is_share - a plus-minus in %: a share of the figure it belongs to. */
 bool gas_heading_is_share(const struct gas_heading *heading);
 

@@ -133,15 +133,6 @@ static bool accept_givens(const struct gas_job *job, struct gas_refusal *refusal
     return true;
 }
 
-static int last_state(const struct gas_job *job)
-{
-    int last = 0;
-    for (size_t i = 0; i < job->table.columns; i++)
-        if (job->table.heading[i].state > last)
-            last = job->table.heading[i].state;
-    return last;
-}
-
 /* -- what is wanted ------------------------------------------------------------------------------------------------ */
 
 static bool want_heat_capacity(struct solve *solve, struct answer *answer, const struct gas_heading *heading)
@@ -166,7 +157,7 @@ static bool want_change(struct solve *solve, const struct gas_job *job, struct a
                         const struct gas_heading *heading, struct gas_refusal *refusal)
 {
     answer->kind = heading->symbol == GAS_SYM_DU ? CHANGE_U : heading->symbol == GAS_SYM_DH ? CHANGE_H : CHANGE_S;
-    answer->state = last_state(job);
+    answer->state = gas_job_last_state(job);
     if (answer->state < 2)
         return gas_refuse(refusal, "wanted",
                           "%s is a change from one state to another; number the givens, such as T1 "

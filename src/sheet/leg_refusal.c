@@ -1,93 +1,119 @@
 #include "sheet/leg_refusal.h"
 
-#include <math.h>
 #include <stdio.h>
-#include <string.h>
 
 #include <gasleaf/heat.h>
 
-enum { FIGURE = 80 };
+#include "sheet/job_units.h"
 
-/* Arguments of gas_leg_run that a result can be about. */
-enum { ARG_START = 1, ARG_ENDING, ARG_EXPONENT, ARG_EFFICIENCY, ARG_OUTSIDE, ARG_POINTS };
+/* Arguments of gas_leg_run that a result can be about, as path.h numbers them. */
+enum { ARG_EXPONENT = 3, ARG_EFFICIENCY, ARG_OUTSIDE, ARG_POINTS };
 
-struct gas_unit gas_job_unit(const struct gas_job *job, enum gas_dimension dimension, const char *otherwise)
+/* A leg that cannot be, and what its sentences speak of. */
+struct refused {
+    struct gas_refusal *refusal;
+    const struct gas_job *job;
+    const struct gas_path_case *path;
+    const struct gas_result *fault;
+    const struct gas_leg *leg;
+    const struct gas_point *start; /* of the leg */
+    const char *text;              /* the leg as typed */
+    char what[24];                 /* "leg 2" */
+};
+
+static bool refuse_outside_data(const struct refused *refused)
 {
-    struct gas_unit unit;
-    struct gas_unit_fault fault;
-    for (size_t i = 0; i < job->table.columns; i++)
-        if (job->table.heading[i].unit.dimension == dimension && !job->table.heading[i].tolerance)
-            return job->table.heading[i].unit;
-    return gas_unit_parse(otherwise, strlen(otherwise), NULL, &unit, &fault) ? unit : gas_unit_si(dimension);
+    const struct gas_job *job = refused->job;
+    struct gas_range range = gas_range_of(&job->gas);
+    struct gas_unit degrees = gas_job_unit(job, GAS_DIM_TEMPERATURE, "°C");
+    char from[GAS_SHOWN], to[GAS_SHOWN];
+    if (refused->leg->ending == GAS_TO_T)
+        return gas_refuse_temperature(refused->refusal, refused->what, refused->fault->figure, &degrees,
+                                      job->choice->label, range.T_from, range.T_to);
+    gas_shown_temperature(job, refused->path->figures, from, range.T_from);
+    gas_shown_temperature(job, refused->path->figures, to, range.T_to);
+    return gas_refuse(refused->refusal, refused->what,
+                      "\"%s\" takes the temperature out of the data for %s (%s to %s).", refused->text,
+                      job->choice->label, from, to);
 }
 
-static const char *pressure(const struct gas_job *job, const struct gas_path_case *path, char buffer[FIGURE], double P)
+static bool refuse_efficiency(const struct refused *refused)
 {
-    struct gas_unit unit = gas_job_unit(job, GAS_DIM_PRESSURE, "bar");
-    return gas_figure(buffer, FIGURE, gas_unit_from_si(&unit, P, path->figures->barometer), &unit);
+    return gas_refuse(refused->refusal, refused->what, "\"%s\": an efficiency of %s %s.", refused->text,
+                      gas_shown(refused->leg->efficiency).text,
+                      refused->fault->status == GAS_NOT_APPLICABLE
+                          ? "does not apply to this process; leave it out, or use the option flow for a machine"
+                          : "is not above 0 and at most 1; 78 % is written 78 % or 0.78");
 }
 
-static const char *temperature(const struct gas_job *job, char buffer[FIGURE], double T)
+static bool refuse_exponent(const struct refused *refused)
 {
-    struct gas_unit unit = gas_job_unit(job, GAS_DIM_TEMPERATURE, "°C");
-    return gas_figure(buffer, FIGURE, gas_unit_from_si(&unit, T, GAS_ATMOSPHERE), &unit);
+    return gas_refuse(refused->refusal, refused->what, "\"%s\": the exponent %s %s; give n, such as n=1.3.",
+                      refused->text, gas_shown(refused->leg->n).text, gas_status_words(refused->fault->status));
 }
 
-/* What cannot be met, as a phrase: from where this leg starts. */
-static bool refuse_ending(struct gas_refusal *refusal, const char *what, const char *text, const struct gas_job *job,
-                          const struct gas_path_case *path, const struct gas_point *start)
+static bool refuse_outside_pressure(const struct refused *refused)
 {
-    char P[FIGURE], T[FIGURE];
-    return gas_refuse(refusal, what, "\"%s\" cannot be reached from %s and %s; choose another process or ending.", text,
-                      pressure(job, path, P, start->P), temperature(job, T, start->T));
+    char outside[GAS_SHOWN], P[GAS_SHOWN];
+    gas_shown_pressure(refused->job, refused->path->figures, outside, refused->leg->P_outside);
+    gas_shown_pressure(refused->job, refused->path->figures, P, refused->start->P);
+    if (refused->fault->status == GAS_WRONG_SIDE)
+        return gas_refuse(
+            refused->refusal, refused->what,
+            "\"%s\": the outside pressure %s is on the wrong side of the gas pressure %s for this ending.",
+            refused->text, outside, P);
+    return gas_refuse(refused->refusal, refused->what, "\"%s\": the outside pressure %s %s.", refused->text, outside,
+                      gas_status_words(refused->fault->status));
+}
+
+static bool refuse_points(const struct refused *refused)
+{
+    char P[GAS_SHOWN];
+    return gas_refuse(refused->refusal, refused->what,
+                      "\"%s\": give at least two points with P and V above zero, starting where the gas is (%s), with "
+                      "V moving.",
+                      refused->text, gas_shown_pressure(refused->job, refused->path->figures, P, refused->start->P));
+}
+
+static bool refuse_ending(const struct refused *refused)
+{
+    char P[GAS_SHOWN], T[GAS_SHOWN];
+    enum gas_status status = refused->fault->status;
+    if (status == GAS_NOT_APPLICABLE)
+        return gas_refuse(refused->refusal, refused->what,
+                          "\"%s\": this ending does not apply to this process%s; choose another.", refused->text,
+                          refused->job->options.system == GAS_FLOW ? " in flow" : "");
+    if (status == GAS_NOT_POSITIVE || status == GAS_NOT_FINITE)
+        return gas_refuse(refused->refusal, refused->what, "\"%s\": the figure of its ending %s.", refused->text,
+                          gas_status_words(status));
+    return gas_refuse(refused->refusal, refused->what,
+                      "\"%s\" cannot be reached from %s and %s; choose another process or ending.", refused->text,
+                      gas_shown_pressure(refused->job, refused->path->figures, P, refused->start->P),
+                      gas_shown_temperature(refused->job, refused->path->figures, T, refused->start->T));
 }
 
 bool gas_refuse_leg(struct gas_refusal *refusal, const struct gas_job *job, const struct gas_path_case *path,
                     size_t number, const struct gas_result *fault)
 {
     const struct gas_typed_legs *legs = job->legs;
-    const char *text = legs->leg[number - 1].text;
-    const struct gas_leg *leg = &path->leg[number - 1];
-    const struct gas_point *start = number > 1 ? &path->change[number - 2].end : &path->start;
-    struct gas_range range = gas_range_of(&job->gas);
-    struct gas_unit degrees = gas_job_unit(job, GAS_DIM_TEMPERATURE, "°C");
-    char what[24], one[FIGURE], other[FIGURE];
-    snprintf(what, sizeof what, "leg %zu", number);
-    if (fault->status == GAS_OUTSIDE_DATA && leg->ending != GAS_TO_T)
-        return gas_refuse(refusal, what, "\"%s\" takes the temperature out of the data for %s (%s to %s).", text,
-                          job->choice->label, temperature(job, one, range.T_from), temperature(job, other, range.T_to));
+    struct refused refused = {.refusal = refusal,
+                              .job = job,
+                              .path = path,
+                              .fault = fault,
+                              .leg = &path->leg[number - 1],
+                              .start = number > 1 ? &path->change[number - 2].end : &path->start,
+                              .text = legs->leg[number - 1].text};
+    snprintf(refused.what, sizeof refused.what, "leg %zu", number);
     if (fault->status == GAS_OUTSIDE_DATA)
-        return gas_refuse_temperature(refusal, what, fault->figure, &degrees, job->choice->label, range.T_from,
-                                      range.T_to);
+        return refuse_outside_data(&refused);
     if (fault->status == GAS_NO_HEAT_CAPACITY)
         return gas_refuse(refusal, "gas", "%s has no heat capacity, which \"%s\" needs; give one after '|'.",
-                          job->choice->label, text);
+                          job->choice->label, refused.text);
     if (fault->argument == ARG_EFFICIENCY)
-        return gas_refuse(refusal, what, "\"%s\": an efficiency of %s %s.", text, gas_shown(leg->efficiency).text,
-                          fault->status == GAS_NOT_APPLICABLE
-                              ? "does not apply to this process; leave it out, or use the "
-                                "option flow for a machine"
-                              : "is not above 0 and at most 1; 78 % is written 78 % or 0.78");
+        return refuse_efficiency(&refused);
     if (fault->argument == ARG_EXPONENT)
-        return gas_refuse(refusal, what, "\"%s\": the exponent %s %s; give n, such as n=1.3.", text,
-                          gas_shown(leg->n).text, gas_status_words(fault->status));
-    if (fault->status == GAS_WRONG_SIDE)
-        return gas_refuse(refusal, what,
-                          "\"%s\": the outside pressure %s is on the wrong side of the gas pressure %s for "
-                          "this ending.",
-                          text, pressure(job, path, one, leg->P_outside), pressure(job, path, other, start->P));
-    if (fault->argument == ARG_OUTSIDE)
-        return gas_refuse(refusal, what, "\"%s\": the outside pressure %s %s.", text,
-                          pressure(job, path, one, leg->P_outside), gas_status_words(fault->status));
-    if (fault->argument == ARG_POINTS)
-        return gas_refuse(refusal, what,
-                          "\"%s\": give at least two points with P and V above zero, starting where the gas "
-                          "is (%s), with V moving.",
-                          text, pressure(job, path, one, start->P));
-    if (fault->status == GAS_NOT_APPLICABLE)
-        return gas_refuse(refusal, what, "\"%s\": this ending does not apply to this process%s; choose another.", text,
-                          job->options.system == GAS_FLOW ? " in flow" : "");
-    if (fault->status == GAS_NOT_POSITIVE || fault->status == GAS_NOT_FINITE)
-        return gas_refuse(refusal, what, "\"%s\": the figure of its ending %s.", text, gas_status_words(fault->status));
-    return refuse_ending(refusal, what, text, job, path, start);
+        return refuse_exponent(&refused);
+    if (fault->status == GAS_WRONG_SIDE || fault->argument == ARG_OUTSIDE)
+        return refuse_outside_pressure(&refused);
+    return fault->argument == ARG_POINTS ? refuse_points(&refused) : refuse_ending(&refused);
 }

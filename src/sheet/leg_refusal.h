@@ -10,8 +10,4 @@
 bool gas_refuse_leg(struct gas_refusal *refusal, const struct gas_job *job, const struct gas_path_case *path,
                     size_t number, const struct gas_result *fault);
 
-/* gas_job_unit - the unit of the job's first given of a dimension, so that sentences and cards speak as the givens do;
- * otherwise the given text, such as "bar". */
-struct gas_unit gas_job_unit(const struct gas_job *job, enum gas_dimension dimension, const char *otherwise);
-
 #endif

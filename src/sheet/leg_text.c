@@ -75,7 +75,7 @@ static bool read_figure(const struct reader *reader, struct gas_piece text, stru
     struct gas_heading_fault heading_fault;
     text = gas_piece_trim(text);
     if (gas_number_parse(text.at, text.length, &figure->figure, &used)) {
-        struct gas_piece unit = gas_piece_trim((struct gas_piece){text.at + used, text.length - used});
+        struct gas_piece unit = gas_piece_behind(text, used);
         figure->kind = GAS_FIGURE_FIXED;
         figure->unit = gas_unit_si(GAS_DIM_NUMBER);
         return unit.length == 0 ||
@@ -246,7 +246,7 @@ static bool read_leg(const struct reader *reader, struct gas_piece text)
                                   "adiabatic, polytropic, free expansion, against P, straight.");
     size_t to = find_word(text, "to"), with = find_word(text, "with");
     size_t end = to < with ? to : with;
-    if (!read_modifier(reader, gas_piece_trim((struct gas_piece){text.at, end})))
+    if (!read_modifier(reader, gas_piece_front(text, end)))
         return false;
     if (end == text.length && leg->process == GAS_AGAINST && all.length) {
         leg->ending = GAS_TO_BALANCE;
@@ -257,7 +257,7 @@ static bool read_leg(const struct reader *reader, struct gas_piece text)
             reader, "it has no ending; write \"to 8 bar\", \"to 400 °C\", \"to V x 0.125\", \"with Q = 50 kJ\" or "
                     "\"to start\".");
     size_t skip = end + (to < with ? 2 : 4);
-    struct gas_piece rest = gas_piece_trim((struct gas_piece){text.at + skip, text.length - skip});
+    struct gas_piece rest = gas_piece_behind(text, skip);
     return to < with ? read_destination(reader, rest) : read_transfer(reader, rest);
 }
 

@@ -3,7 +3,7 @@
 #include <math.h>
 #include <string.h>
 
-#include "sheet/leg_refusal.h"
+#include "sheet/job_units.h"
 
 static bool admitted(const struct gas_heading *heading, const struct gas_admitted *list, size_t count)
 {
@@ -36,20 +36,6 @@ double gas_case_figure(const struct gas_job *job, const struct gas_case *figures
 {
     int column = gas_job_column(job, symbol, state);
     return column < 0 ? NAN : figures->si[column];
-}
-
-const char *gas_shown_pressure(const struct gas_job *job, const struct gas_case *figures, char buffer[GAS_SHOWN],
-                               double P)
-{
-    struct gas_unit unit = gas_job_unit(job, GAS_DIM_PRESSURE, "bar");
-    return gas_figure(buffer, GAS_SHOWN, gas_unit_from_si(&unit, P, figures->barometer), &unit);
-}
-
-const char *gas_shown_temperature(const struct gas_job *job, const struct gas_case *figures, char buffer[GAS_SHOWN],
-                                  double T)
-{
-    struct gas_unit unit = gas_job_unit(job, GAS_DIM_TEMPERATURE, "°C");
-    return gas_figure(buffer, GAS_SHOWN, gas_unit_from_si(&unit, T, figures->barometer), &unit);
 }
 
 bool gas_refuse_no_basis(const struct gas_heading *heading, double n, struct gas_refusal *refusal)

@@ -27,13 +27,6 @@ bool gas_admit_givens(const struct gas_job *job, const struct gas_admitted *list
 /* gas_case_figure - a given in SI; NAN when it has no column or is blank. */
 double gas_case_figure(const struct gas_job *job, const struct gas_case *figures, enum gas_symbol symbol, int state);
 
-/* gas_shown_pressure, gas_shown_temperature - SI figures as a sentence shows them, in the units of the givens. */
-enum { GAS_SHOWN = 80 };
-const char *gas_shown_pressure(const struct gas_job *job, const struct gas_case *figures, char buffer[GAS_SHOWN],
-                               double P);
-const char *gas_shown_temperature(const struct gas_job *job, const struct gas_case *figures, char buffer[GAS_SHOWN],
-                                  double T);
-
 /* gas_refuse_no_basis - a wanted figure that is NAN: the amount is not known, or the unit does not fit. */
 bool gas_refuse_no_basis(const struct gas_heading *heading, double n, struct gas_refusal *refusal);
 

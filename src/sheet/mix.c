@@ -6,7 +6,7 @@
 
 #include <gasleaf/heat.h>
 
-#include "sheet/leg_refusal.h"
+#include "sheet/job_units.h"
 #include "sheet/machine.h"
 #include "sheet/piece.h"
 #include "sheet/solver.h"
@@ -23,8 +23,7 @@ static bool refuse_memory(struct gas_refusal *refusal)
 
 static bool cell_says(const struct gas_cell *cell, const char *word)
 {
-    struct gas_piece text =
-        gas_piece_trim((struct gas_piece){cell->text, cell->kind == GAS_CELL_TEXT ? cell->length : 0});
+    struct gas_piece text = gas_piece_of(cell);
     return gas_piece_take(&text, word) && text.length == 0;
 }
 

@@ -46,7 +46,7 @@ static bool read_figure(struct reader *reader, struct gas_piece piece, enum gas_
     piece = gas_piece_trim(piece);
     if (!gas_number_parse(piece.at, piece.length, &figure, &used))
         return refuse_form(reader);
-    struct gas_piece text = gas_piece_trim((struct gas_piece){piece.at + used, piece.length - used});
+    struct gas_piece text = gas_piece_behind(piece, used);
     if (text.length == 0)
         unit = gas_unit_si(dimension);
     else if (!gas_unit_parse(text.at, text.length, NULL, &unit, &fault))
@@ -168,17 +168,23 @@ static bool read_scf(struct reader *reader)
     return read_conditions(reader, &reader->options->references.scf_T, &reader->options->references.scf_P);
 }
 
-static bool read_agree(struct reader *reader)
+/* "30 %", from nothing to the most, as a fraction. */
+static bool read_percent(struct reader *reader, double most, double *fraction)
 {
     double figure;
     size_t used;
     if (!gas_number_parse(reader->rest.at, reader->rest.length, &figure, &used))
         return refuse_form(reader);
-    struct gas_piece unit = gas_piece_trim((struct gas_piece){reader->rest.at + used, reader->rest.length - used});
-    if (unit.length != 1 || unit.at[0] != '%' || !(figure >= 0 && figure <= 50))
+    struct gas_piece unit = gas_piece_behind(reader->rest, used);
+    if (unit.length != 1 || unit.at[0] != '%' || !(figure >= 0 && figure <= most))
         return refuse_form(reader);
-    reader->options->agree = figure / 100;
+    *fraction = figure / 100;
     return true;
+}
+
+static bool read_agree(struct reader *reader)
+{
+    return read_percent(reader, 50, &reader->options->agree);
 }
 
 static bool read_digits(struct reader *reader)
@@ -192,33 +198,26 @@ static bool read_digits(struct reader *reader)
     return true;
 }
 
-static bool read_isothermal(struct reader *reader)
+static bool say_wall(struct reader *reader, enum gas_wall wall)
 {
     reader->options->wall_said = true;
-    reader->options->wall = GAS_WALL_ISOTHERMAL;
+    reader->options->wall = wall;
     return true;
+}
+
+static bool read_isothermal(struct reader *reader)
+{
+    return say_wall(reader, GAS_WALL_ISOTHERMAL);
 }
 
 static bool read_adiabatic(struct reader *reader)
 {
-    reader->options->wall_said = true;
-    reader->options->wall = GAS_WALL_ADIABATIC;
-    return true;
+    return say_wall(reader, GAS_WALL_ADIABATIC);
 }
 
 static bool read_wall_heat(struct reader *reader)
 {
-    double figure;
-    size_t used;
-    if (!gas_number_parse(reader->rest.at, reader->rest.length, &figure, &used))
-        return refuse_form(reader);
-    struct gas_piece unit = gas_piece_trim((struct gas_piece){reader->rest.at + used, reader->rest.length - used});
-    if (unit.length != 1 || unit.at[0] != '%' || !(figure >= 0 && figure <= 100))
-        return refuse_form(reader);
-    reader->options->wall_said = true;
-    reader->options->wall = GAS_WALL_FRACTION;
-    reader->options->wall_fraction = figure / 100;
-    return true;
+    return read_percent(reader, 100, &reader->options->wall_fraction) && say_wall(reader, GAS_WALL_FRACTION);
 }
 
 static bool read_outlet(struct reader *reader)
@@ -303,7 +302,7 @@ static bool in_pieces(const struct gas_block *block, size_t row)
     if (first->kind != GAS_CELL_TEXT || block->columns < 2)
         return false;
     for (size_t i = 0; i < OPTIONS; i++) {
-        struct gas_piece label = gas_piece_trim((struct gas_piece){first->text, first->length});
+        struct gas_piece label = gas_piece_of(first);
         if (table[i].figure && gas_piece_take(&label, table[i].words) && label.length == 0)
             return true;
     }
@@ -327,18 +326,9 @@ static bool read_row_of_pieces(const struct gas_block *block, size_t row, struct
                                struct gas_refusal *refusal)
 {
     char text[160];
-    size_t used = 0;
     if (unit_in_label(block, row, text, sizeof text))
         return read_text((struct gas_piece){text, strlen(text)}, options, refusal);
-    for (size_t i = 0; i < block->columns && used < sizeof text; i++) {
-        const struct gas_cell *cell = gas_cell_at(block, row, i);
-        char number[40] = "";
-        if (cell->kind == GAS_CELL_NUMBER)
-            gas_number_format(number, sizeof number, cell->number, 15);
-        used +=
-            (size_t)snprintf(text + used, sizeof text - used, "%s ", cell->kind == GAS_CELL_TEXT ? cell->text : number);
-    }
-    return read_text((struct gas_piece){text, strlen(text)}, options, refusal);
+    return read_text(gas_piece_of_row(block, row, text, sizeof text), options, refusal);
 }
 
 static bool read_cells(const struct gas_block *block, size_t row, struct gas_options *options,

@@ -3,6 +3,8 @@
 #include <stdio.h>
 #include <string.h>
 
+#include "sheet/job_units.h"
+
 static const struct gas_block *argument_at(const struct gas_call *call, size_t index)
 {
     static const struct gas_block omitted = {0};

@@ -6,6 +6,7 @@
 
 #include <gasleaf/heat.h>
 
+#include "sheet/job_units.h"
 #include "sheet/machine.h"
 #include "sheet/solver.h"
 
@@ -192,13 +193,31 @@ static bool refuse_drop(const struct gas_job *job, const struct gas_stages_case 
                                                        : "cannot be: it lies from zero to less than the pressure");
 }
 
+static bool refuse_ratio(const struct gas_stages_case *stages, const struct gas_result *fault,
+                         struct gas_refusal *refusal)
+{
+    if (fault->status == GAS_TOO_MANY)
+        return gas_refuse(refusal, "stages", "a ratio of at most %s would take more than %d stages; allow more.",
+                          gas_shown(stages->staging.ratio_limit).text, GAS_STAGES_MAX);
+    return gas_refuse(refusal, "stages",
+                      "the ratios, scaled to reach P2, leave a stage with %s, which does not raise the pressure; take "
+                      "fewer stages or other ratios.",
+                      gas_shown(fault->figure).text);
+}
+
+static bool refuse_cooling(const struct gas_job *job, double T_cool, struct gas_refusal *refusal)
+{
+    const struct gas_leg_figure *typed = &typed_of(job)->figure[GAS_SAYS_COOLING];
+    struct gas_range range = gas_range_of(&job->gas);
+    struct gas_unit unit = typed->kind == GAS_FIGURE_FIXED ? typed->unit : gas_unit_si(GAS_DIM_TEMPERATURE);
+    return gas_refuse_temperature(refusal, "stages", T_cool, &unit, job->choice->label, range.T_from, range.T_to);
+}
+
 static bool refuse_result(const struct gas_job *job, const struct gas_case *figures,
                           const struct gas_stages_case *stages, const struct gas_result *fault,
                           struct gas_refusal *refusal)
 {
     char one[GAS_SHOWN], other[GAS_SHOWN];
-    struct gas_range range = gas_range_of(&job->gas);
-    struct gas_unit degrees = typed_of(job)->figure[GAS_SAYS_COOLING].unit;
     if (fault->status == GAS_NO_HEAT_CAPACITY || job->gas.interval_count == 0)
         return gas_refuse(refusal, "gas", "%s has no heat capacity; give one after '|', such as | k = 1.4.",
                           job->choice->label);
@@ -215,18 +234,9 @@ static bool refuse_result(const struct gas_job *job, const struct gas_case *figu
         return gas_refuse(refusal, "stages", "%s %s; give 1 to %d.", gas_shown(fault->figure).text,
                           gas_status_words(fault->status), GAS_STAGES_MAX);
     case AT_RATIO:
-        return fault->status == GAS_TOO_MANY
-                   ? gas_refuse(refusal, "stages", "a ratio of at most %s would take more than %d stages; allow more.",
-                                gas_shown(stages->staging.ratio_limit).text, GAS_STAGES_MAX)
-                   : gas_refuse(refusal, "stages",
-                                "the ratios, scaled to reach P2, leave a stage with %s, which does not raise the "
-                                "pressure; take fewer stages or other ratios.",
-                                gas_shown(fault->figure).text);
+        return refuse_ratio(stages, fault, refusal);
     case AT_T_COOL:
-        if (typed_of(job)->figure[GAS_SAYS_COOLING].kind != GAS_FIGURE_FIXED)
-            degrees = gas_unit_si(GAS_DIM_TEMPERATURE);
-        return gas_refuse_temperature(refusal, "stages", stages->staging.T_cool, &degrees, job->choice->label,
-                                      range.T_from, range.T_to);
+        return refuse_cooling(job, stages->staging.T_cool, refusal);
     case AT_DROP:
         return refuse_drop(job, stages, fault, refusal);
     default:

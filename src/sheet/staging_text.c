@@ -1,7 +1,6 @@
 #include "sheet/staging_text.h"
 
 #include <math.h>
-#include <stdio.h>
 #include <string.h>
 
 #include "sheet/piece.h"
@@ -101,7 +100,7 @@ static bool read_figure(const struct reader *reader, struct gas_piece text)
     size_t used;
     if (!gas_number_parse(text.at, text.length, &number, &used))
         return read_column(reader, text, kind, figure);
-    struct gas_piece unit = gas_piece_trim((struct gas_piece){text.at + used, text.length - used});
+    struct gas_piece unit = gas_piece_behind(text, used);
     *figure = plain_number(number);
     if (unit.length == 0 && item == GAS_SAYS_DROP) /* 0.2 of what? */
         return refuse_form(reader);
@@ -129,9 +128,9 @@ static bool read_ratios(const struct reader *reader)
             return gas_refuse(reader->refusal, "stages", "%s has a ratio that is not above zero; write it like \"%s\".",
                               reader->shown, reader->words->form);
         staging->ratio[staging->ratio_count++] = ratio;
-        rest = gas_piece_trim((struct gas_piece){rest.at + used, rest.length - used});
+        rest = gas_piece_behind(rest, used);
         if (rest.length && (rest.at[0] == '/' || rest.at[0] == ':'))
-            rest = gas_piece_trim((struct gas_piece){rest.at + 1, rest.length - 1});
+            rest = gas_piece_behind(rest, 1);
         else
             gas_piece_take(&rest, "and");
     }
@@ -151,6 +150,23 @@ static bool read_efficiency(const struct reader *reader)
     return read_figure(reader, gas_piece_take(&behind, "efficiency") && behind.length ? behind : rest);
 }
 
+/* "single stage", "stages" (a column), "stages 3". */
+static bool read_count(const struct reader *reader)
+{
+    struct gas_leg_figure *count = &reader->staging->figure[GAS_SAYS_COUNT];
+    if (reader->words->form && reader->rest.length)
+        return read_figure(reader, reader->rest);
+    *count = reader->words->form ? (struct gas_leg_figure){.kind = GAS_FIGURE_COLUMN, .symbol = GAS_SYM_STAGE_COUNT}
+                                 : plain_number(1);
+    return true;
+}
+
+static bool read_drive(const struct reader *reader)
+{
+    struct gas_piece behind = reader->rest;
+    return read_figure(reader, gas_piece_take(&behind, "efficiency") ? behind : reader->rest);
+}
+
 static bool read_known(struct reader *reader)
 {
     const struct item_words *words = reader->words;
@@ -163,29 +179,20 @@ static bool read_known(struct reader *reader)
         return gas_refuse(reader->refusal, "stages", "%s cannot be read; nothing follows \"%s\".", reader->shown,
                           words->words);
     switch (words->item) {
+    case GAS_SAYS_COUNT:
+        return read_count(reader);
     case GAS_SAYS_RATIOS:
         return read_ratios(reader);
     case GAS_SAYS_EFFICIENCY:
         return read_efficiency(reader);
+    case GAS_SAYS_DRIVE:
+        return read_drive(reader);
     case GAS_SAYS_AFTERCOOLER:
         staging->aftercooler = words->kind == 1;
         return true;
-    default:
-        break;
+    default: /* "uncooled" says that there is no figure */
+        return !words->form || read_figure(reader, reader->rest);
     }
-    if (!words->form) {
-        if (words->item == GAS_SAYS_COUNT)
-            staging->figure[GAS_SAYS_COUNT] = plain_number(1);
-        return true;
-    }
-    if (words->item == GAS_SAYS_COUNT && reader->rest.length == 0) {
-        staging->figure[GAS_SAYS_COUNT] =
-            (struct gas_leg_figure){.kind = GAS_FIGURE_COLUMN, .symbol = GAS_SYM_STAGE_COUNT, .state = 0};
-        return true;
-    }
-    struct gas_piece rest = reader->rest, behind = rest;
-    bool word = words->item == GAS_SAYS_DRIVE && gas_piece_take(&behind, "efficiency");
-    return read_figure(reader, word ? behind : rest);
 }
 
 /* "3 stages", "2 stage": the number comes first. */
@@ -197,9 +204,9 @@ static bool read_count_first(struct reader *reader, struct gas_piece item, bool 
     *is_count = false;
     if (!gas_number_parse(item.at, item.length, &number, &used))
         return true;
-    struct gas_piece rest = gas_piece_trim((struct gas_piece){item.at + used, item.length - used});
+    struct gas_piece rest = gas_piece_behind(item, used);
     if (rest.length && rest.at[0] == '-')
-        rest = gas_piece_trim((struct gas_piece){rest.at + 1, rest.length - 1});
+        rest = gas_piece_behind(rest, 1);
     if (!gas_piece_take(&rest, "stages") && !gas_piece_take(&rest, "stage"))
         return true;
     *is_count = true;
@@ -245,27 +252,11 @@ static bool in_pieces(const struct gas_block *block, size_t row)
         if (gas_cell_at(block, row, i)->kind == GAS_CELL_NUMBER)
             return true;
     for (size_t i = 0; i < WORDS && first->kind == GAS_CELL_TEXT && block->columns > 1; i++) {
-        struct gas_piece label = gas_piece_trim((struct gas_piece){first->text, first->length});
+        struct gas_piece label = gas_piece_of(first);
         if (table[i].form && gas_piece_take(&label, table[i].words) && label.length == 0)
             return true;
     }
     return false;
-}
-
-static bool read_pieces(const struct gas_block *block, size_t row, const struct gas_options *options,
-                        struct gas_typed_staging *staging, struct gas_refusal *refusal)
-{
-    char text[200];
-    size_t used = 0;
-    for (size_t i = 0; i < block->columns && used < sizeof text; i++) {
-        const struct gas_cell *cell = gas_cell_at(block, row, i);
-        char number[40] = "";
-        if (cell->kind == GAS_CELL_NUMBER)
-            gas_number_format(number, sizeof number, cell->number, 15);
-        used +=
-            (size_t)snprintf(text + used, sizeof text - used, "%s ", cell->kind == GAS_CELL_TEXT ? cell->text : number);
-    }
-    return read_text((struct gas_piece){text, strlen(text)}, options, staging, refusal);
 }
 
 static bool read_cells(const struct gas_block *block, size_t row, const struct gas_options *options,
@@ -312,8 +303,10 @@ bool gas_staging_read(const struct gas_block *argument, const struct gas_options
         return gas_refuse(refusal, "stages",
                           "nothing is said of them; write such as 3 stages; isentropic 78 %%; cool to 40 °C.");
     for (size_t row = 0; row < argument->rows; row++) {
-        bool good = in_pieces(argument, row) ? read_pieces(argument, row, options, staging, refusal)
-                                             : read_cells(argument, row, options, staging, refusal);
+        char text[200];
+        bool good = in_pieces(argument, row)
+                        ? read_text(gas_piece_of_row(argument, row, text, sizeof text), options, staging, refusal)
+                        : read_cells(argument, row, options, staging, refusal);
         if (!good)
             return false;
     }

@@ -69,11 +69,11 @@ bool gas_table_cell(const struct gas_table *table, size_t column, size_t row, co
         return gas_refuse(refusal, name, "its cell holds an error; mend that cell first.");
     if (gas_cell_is_sentence(cell))
         return gas_refuse_sentence(refusal, cell->text);
-    struct gas_piece text = gas_piece_trim((struct gas_piece){cell->text, cell->length});
+    struct gas_piece text = gas_piece_of(cell);
     if (!gas_number_parse(text.at, text.length, figure, &used))
         return gas_refuse(refusal, name, "%s is not a number; write a figure, or leave the cell blank.",
                           gas_quoted(shown, sizeof shown, text.at, text.length));
-    struct gas_piece unit = gas_piece_trim((struct gas_piece){text.at + used, text.length - used});
+    struct gas_piece unit = gas_piece_behind(text, used);
     return unit.length == 0 || figure_with_unit(table, column, row, unit, figure, refusal);
 }
 

@@ -4,7 +4,7 @@
 
 #include <gasleaf/heat.h>
 
-#include "sheet/leg_refusal.h"
+#include "sheet/job_units.h"
 #include "sheet/machine.h"
 
 static bool refuse_outside(struct gas_refusal *refusal, const struct gas_job *job, const char *what, double T)

@@ -5,6 +5,7 @@
 #include <gasleaf/heat.h>
 
 #include "sheet/estimate.h"
+#include "sheet/job_units.h"
 #include "sheet/machine.h"
 #include "sheet/solver.h"
 #include "sheet/vessel_refusal.h"

@@ -34,6 +34,14 @@ static void put(struct desk_call *call, size_t index, const char *text)
     call->argument[index] = (struct gas_block){*text ? 1 : 0, *text ? 1 : 0, &call->cell[index], false};
 }
 
+static bool open_audit(struct desk_call *call, const struct gas_call *cells, const struct check_arguments *places)
+{
+    if (!check_open(&call->check, cells, places) || !check_one(&call->check, 0, &call->job, &call->arena))
+        return false;
+    desk_open(&call->desk, &call->job, &call->arena);
+    return audit_open(&call->audit, &call->desk, &call->arena, &call->check.refusal);
+}
+
 static const struct audited *audit_sheet(struct desk_call *call, const struct sheet *sheet, double legacy)
 {
     static const struct check_arguments places = {.given = 1, .wanted = 2, .legs = 4, .headings = 5, .options = 6};
@@ -41,9 +49,7 @@ static const struct audited *audit_sheet(struct desk_call *call, const struct sh
     const char *texts[7] = {sheet->gas_text, sheet->given, sheet->wanted, "", sheet->legs, "", sheet->options};
     for (size_t i = 0; i < 7; i++)
         put(call, i, texts[i]);
-    bool open = check_open(&call->check, &cells, &places) && check_one(&call->check, 0, &call->job, &call->arena) &&
-                desk_open(&call->desk, &call->job, &call->arena, &call->check.refusal) &&
-                audit_open(&call->audit, &call->desk, &call->arena, &call->check.refusal);
+    bool open = open_audit(call, &cells, &places);
     if (!check_true(sheet->given, open)) {
         fprintf(stderr, "%s\n", call->check.refusal.text);
         return NULL;
@@ -397,10 +403,7 @@ static void try_column(struct desk_call *call, size_t injection, size_t rows, st
     for (size_t i = 0; i < 7; i++)
         put(call, i, texts[i]);
     call->argument[1] = (struct gas_block){rows, 3, given, true};
-    bool open = check_open(&call->check, &cells_call, &places) &&
-                check_one(&call->check, 0, &call->job, &call->arena) &&
-                desk_open(&call->desk, &call->job, &call->arena, &call->check.refusal) &&
-                audit_open(&call->audit, &call->desk, &call->arena, &call->check.refusal);
+    bool open = open_audit(call, &cells_call, &places);
     check_true("column", open);
     for (size_t i = 0; i < rows; i++)
         legacy_read(&legacy[i], &call->job, &call->job.wanted.heading[0], 0, &call->audit.row[i].legacy,
