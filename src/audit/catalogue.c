@@ -158,12 +158,6 @@ static const struct gas_function rows[] = {
       {"options", "Text of options: adiabatic (left out), isothermal or heat gained 30 %; barometer 0.98 bar", true, GAS_PARAMETER_TEXT}},
      "GAS.VENT(\"Ar\";\"V = 1 m3; P1 = 32 bar; T1 = 1000 K; P2 = 1 bar\";\"T2, K\")", "250.0"},
 
-    {"GAS.WORKING", "working", gas_fn_working,
-     "A calculation step by step as a check print: formula, figures put in, result, unit and source; the answer last",
-     {CHECKED_GAS, CHECKED, {"wanted", "Heading of what is to be shown, such as m, kg, or a range of headings", false, GAS_PARAMETER_ANY},
-      CHECKED_LEGS, HEADINGS, OPTIONS},
-     "GAS.WORKING(\"N2\";\"7 bar(g); 35 °C; 12 m3\";\"m, kg\")", "step"},
-
     {"GAS.MIX", "mix", gas_fn_mix,
      "Streams or vessel contents mixed without heat: temperature, pressure, amounts, composition, entropy made",
      {{"streams", "Range with the heading row gas, P, T and one of m, n, V (vessels) or a flow (streams), then a row each", false, GAS_PARAMETER_TEXT},
