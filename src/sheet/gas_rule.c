@@ -69,7 +69,7 @@ static bool read_k(struct gas_rules *rules, struct gas_piece text)
 static bool read_M(struct gas_rules *rules, struct gas_piece text)
 {
     struct gas_unit unit = {0};
-    double M;
+    double M = NAN;
     if (!once(rules, &rules->M_said, "M") || !read_figure(rules, "M", text, &M, &unit))
         return false;
     return gas_molar_mass_read(M, &unit, &rules->M, rules->refusal);
@@ -91,7 +91,7 @@ bool gas_molar_mass_read(double figure, const struct gas_unit *unit, double *M, 
 static bool read_R(struct gas_rules *rules, struct gas_piece text)
 {
     struct gas_unit unit = {0};
-    double figure;
+    double figure = NAN;
     return once(rules, &rules->R_said, "R") && read_figure(rules, "R", text, &figure, &unit) &&
            gas_constant_read(figure, &unit, &rules->R, &rules->R_specific, rules->refusal);
 }
