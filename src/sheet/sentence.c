@@ -87,7 +87,7 @@ const char *gas_quoted(char *buffer, size_t size, const char *text, size_t lengt
 
 struct gas_shown gas_shown_to(double figure, int digits)
 {
-    struct gas_shown shown;
+    struct gas_shown shown = {""};
     if (isfinite(figure))
         gas_number_format(shown.text, sizeof shown.text, figure, digits);
     else

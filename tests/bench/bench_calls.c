@@ -171,7 +171,7 @@ static size_t fuss(size_t round, size_t count) /* so that the copy is not left o
 
 static double moved(const struct gas_cell *figures, size_t count)
 {
-    double took[ROUNDS];
+    double took[ROUNDS] = {0};
     struct gas_cell *copy = malloc(count * sizeof *copy);
     for (size_t round = 0; copy && round < ROUNDS; round++) {
         double begin = now();
@@ -190,8 +190,9 @@ static void measure(const struct table *table)
     struct gas_block block[ARGUMENTS];
     struct gas_arena arena = {0};
     double took[ROUNDS];
-    for (size_t i = 0; figures && i < ROWS * table->columns; i++)
-        figures[i] = gas_cell_number(table->start[i % table->columns] * (1 + (double)(i / table->columns) * 1e-6));
+    for (size_t row = 0; figures && row < ROWS; row++)
+        for (size_t column = 0; column < table->columns; column++)
+            figures[row * table->columns + column] = gas_cell_number(table->start[column] * (1 + (double)row * 1e-6));
     size_t count = arguments_of(table, cell, figures, block);
     for (size_t round = 0; round < ROUNDS; round++) {
         struct gas_call call = {.argument = block, .count = count, .arena = &arena};

@@ -59,7 +59,7 @@ uint64_t fuzz_bits(struct fuzz *fuzz)
 
 size_t fuzz_below(struct fuzz *fuzz, size_t limit)
 {
-    return (size_t)(fuzz_bits(fuzz) % limit);
+    return limit ? (size_t)(fuzz_bits(fuzz) % limit) : 0;
 }
 
 static const struct pool *pool_of(const char *parameter)

@@ -15,6 +15,10 @@
 #include "check.h"
 #include "fuzz.h"
 
+#ifndef TEST_LOCALES
+#define TEST_LOCALES "build/locale" /* the Makefile says where they are */
+#endif
+
 enum { CALLS = 6000, REPEATED = 2000, THREADS = 4, WORDS = 240 };
 
 static size_t setting(const char *name, size_t usual)
