@@ -43,7 +43,7 @@ suites = $(patsubst test_%.c,suite_%,$(filter test_%,$(notdir $(1))))
 all: $(OXT) ## build the extension, build/gasleaf.oxt
 
 help: ## print the targets
-	@awk -F ':.*## ' '/^[a-z-]+:.*## / { printf "make %-10s %s\n", $$1, $$2 }' $(MAKEFILE_LIST)
+	@awk -F ':.*## ' '/^[a-z-]+:.*## / { printf "make %-12s %s\n", $$1, $$2 }' $(MAKEFILE_LIST)
 
 # --- compiling ------------------------------------------------------------------------------------------------------
 $(BUILD)/%.o: %.c
@@ -186,7 +186,7 @@ lint: ## layout, clang-tidy, cppcheck: silent when all is well
 	@tests/tools/deps.sh $(LINT_PACKAGES)
 	@clang-format --dry-run -Werror $(C_FILES)
 	@printf '%s\n' $(filter %.c,$(C_FILES)) | xargs -P $(JOBS) -I{} clang-tidy --quiet {} -- \
-	  -std=c11 $(CPPFLAGS) -Itests/support -Itests -isystem $(SDK)/include 2>/dev/null
+	  -std=c11 $(CPPFLAGS) -DTEST_LOCALES='""' -Itests/support -Itests -isystem $(SDK)/include 2>/dev/null
 	@cppcheck --quiet --error-exitcode=1 --std=c11 --inline-suppr --enable=warning,performance,portability \
 	  -Iinclude -Isrc -Itests/support -DGASLEAF_VERSION='""' -DUNX -DLINUX $(filter %.c,$(C_FILES))
 

@@ -24,7 +24,7 @@ static void add_ratios(struct gas_cycle *cycle)
 struct gas_result gas_cycle_of(const struct gas_point *start, const struct gas_change *changes, size_t count,
                                double closes_within, struct gas_cycle *cycle)
 {
-    double v_least = start->v, v_most = start->v;
+    double v_least = start->v, v_most = v_least;
     *cycle = (struct gas_cycle){0};
     if (count == 0)
         return gas_bad(GAS_UNDETERMINED, 3, 0);

@@ -278,5 +278,6 @@ struct gas_result gas_leg_at(const struct gas *gas, enum gas_system system, cons
         return gas_good(at->P);
     /* the family a closed leg with an efficiency belongs to is told by its ending, so ratios count as what they are */
     resolve(&lc, &change->end);
+    /* cppcheck-suppress returnDanglingLifetime ; the result holds no pointer */
     return processes[leg->process].at(&lc, change, fraction, at);
 }

@@ -118,7 +118,7 @@ static struct gas_result against_end(const struct leg_case *lc, struct gas_point
 {
     const bool isothermal = lc->leg.process == GAS_AGAINST_ISOTHERMAL;
     const double T1 = lc->start.T;
-    double v = lc->leg.value, P = lc->leg.value;
+    double v = lc->leg.value, P = v; /* whichever the ending means */
     struct gas_result r;
     switch (lc->leg.ending) {
     case GAS_TO_BALANCE:

@@ -129,7 +129,8 @@ static double cp_itself(double T, void *gas)
 
 static double by_gsl(double (*function)(double, void *), const struct gas *gas, double T1, double T2)
 {
-    gsl_function f = {function, (void *)(size_t)gas};
+    struct gas copy = *gas; /* GSL hands on what is not const */
+    gsl_function f = {function, &copy};
     double middle = T1 < 1000 && T2 > 1000 ? 1000 : T2, part, rest = 0, error; /* nitrogen's join */
     size_t evaluations;
     gsl_integration_qng(&f, T1, middle, 0, 1e-12, &part, &error, &evaluations);

@@ -102,7 +102,7 @@ static double polynomial_ratio(int n, double P1, double P2, double drop)
     gsl_poly_complex_workspace *space = gsl_poly_complex_workspace_alloc((size_t)n + 1);
     gsl_poly_complex_solve(coefficient, (size_t)n + 1, space, roots);
     gsl_poly_complex_workspace_free(space);
-    for (int i = 0; i < n; i++)
+    for (size_t i = 0; i < (size_t)n; i++)
         if (roots[2 * i] > 0 && fabs(roots[2 * i + 1]) < 1e-9)
             return roots[2 * i];
     return NAN;

@@ -79,7 +79,7 @@ static size_t read_given(const char *text, struct gas_known *known, double *figu
 
 static double answer(const struct row *row, bool trimmed)
 {
-    struct gas_known known[MOST], wanted;
+    struct gas_known known[MOST], wanted = {GAS_VARIABLES, 0};
     double figures[MOST];
     struct gas_plan plan;
     struct gas_values values;

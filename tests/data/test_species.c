@@ -155,7 +155,8 @@ static void molar_masses(void)
     size_t count = sizeof printed_masses / sizeof printed_masses[0];
     for (size_t i = 0; i < count; i++) {
         const struct gas_species *species = find(printed_masses[i].name);
-        if (check_true(printed_masses[i].name, species != NULL))
+        check_true(printed_masses[i].name, species != NULL);
+        if (species)
             check_close(species->name, 1000 * gas_species_molar_mass(species), printed_masses[i].M, 2e-4, 0);
     }
     /* US Standard Atmosphere 1976, Table 3: M0 = 28.9644; the sum with our atomic weights (argon was 39.948) to 2e-5 */

@@ -70,7 +70,7 @@ static void at_temperatures(void)
     check_close("at the mean", gas_dh(&at_mean->gas, 300, 700).value, 400 * cpm, 1e-13, 0);
     check_close("both", gas_dh(&both->gas, 300, 700).value, 400 * 40.0, 1e-13, 0);
     const struct gas_choice *all[] = {CO2, at, bare, mean, at_mean, both};
-    for (size_t i = 0; i < sizeof all / sizeof *all; i++)
+    for (size_t i = 0; i < sizeof all / sizeof all[0]; i++)
         gas_choice_release(all[i]);
 }
 

@@ -328,8 +328,10 @@ static long put_checks(FILE *out, FILE *in, struct cells *cells, char **further)
     while (getline(&line, &room, in) >= 0)
         if (*line == '@')
             read_data(cells, line);
-        else if (*line == '!')
+        else if (*line == '!' && !*further)
             *further = strdup(line + 1);
+        else if (*line == '!')
+            die("further headings are given twice", line);
         else if (*line != '#' && *trimmed(line))
             put_check(out, row++, line);
     free(line);
