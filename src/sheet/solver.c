@@ -3,6 +3,8 @@
 #include <math.h>
 #include <string.h>
 
+#include "sheet/plan_cache.h"
+
 /* clang-format off */
 /* Extensive and intensive figures are told by their dimension (a normal volume is an amount), energies by symbol too. */
 static const struct {
@@ -102,11 +104,6 @@ struct gas_solver *gas_solver_open(const struct gas_job *job, int highest_state,
 
 /* -- plans --------------------------------------------------------------------------------------------------------- */
 
-struct gas_result solver_make(struct gas_plan *plan, const struct gas_known *known, size_t count, int states, bool open)
-{
-    return open ? gas_plan_make_open(plan, known, count, states) : gas_plan_make(plan, known, count, states);
-}
-
 void gas_solver_amounts(struct gas_solver *solver, enum gas_amounts amounts)
 {
     solver->amounts = amounts;
@@ -159,9 +156,9 @@ static bool make_plan(const struct gas_solver *solver, const struct gas_job *job
     entry->refusal.made = false;
     take_knowns(solver, mask, entry);
     bool open = solver->amounts != GAS_AMOUNTS_SAME;
-    struct gas_result made = solver_make(&entry->plan, entry->known, entry->count, solver->states, open);
+    struct gas_result made = gas_plan_for(&entry->plan, entry->known, entry->count, solver->states, open);
     if (made.status == GAS_OK && solver->amounts == GAS_AMOUNTS_ASKED && !finds_all(solver, &entry->plan))
-        made = solver_make(&entry->plan, entry->known, entry->count, solver->states, false);
+        made = gas_plan_for(&entry->plan, entry->known, entry->count, solver->states, false);
     return made.status == GAS_OK || solver_refuse_knowns(job, entry, made, &entry->refusal);
 }
 

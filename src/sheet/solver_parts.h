@@ -44,10 +44,6 @@ struct solver_entry *solver_entry_for(struct gas_solver *solver, const struct ga
 /* The SI figures of a case in the order of the knowns. */
 void solver_in_order(const struct solver_entry *entry, const struct gas_case *figures, double *ordered);
 
-/* The plan of an entry's knowns, after a change of them; open: amounts are of each state. */
-struct gas_result solver_make(struct gas_plan *plan, const struct gas_known *known, size_t count, int states,
-                              bool open);
-
 /* Why a required variable does not follow, and what would do. */
 bool solver_refuse_missing(const struct solver_entry *entry, struct gas_known wanted, struct gas_refusal *refusal);
 

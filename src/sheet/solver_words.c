@@ -5,6 +5,7 @@
 #include <stdio.h>
 #include <string.h>
 
+#include "sheet/plan_cache.h"
 #include <gasleaf/heat.h>
 
 enum { LIST_TEXT = 200 };
@@ -78,7 +79,7 @@ static size_t missing_pair(const struct solver_entry *entry, struct gas_known wa
     for (size_t i = 0; i < sizeof first / sizeof *first; i++) {
         known[entry->count] = (struct gas_known){first[i], wanted.state};
         if (same_thing(known[entry->count], wanted) || gas_plan_finds(&entry->plan, first[i], wanted.state) ||
-            solver_make(&trial, known, entry->count + 1, entry->plan.states, entry->plan.open).status != GAS_OK)
+            gas_plan_for(&trial, known, entry->count + 1, entry->plan.states, entry->plan.open).status != GAS_OK)
             continue;
         pair[0] = known[entry->count];
         if (missing_one(&trial, wanted, true, &pair[1], 1))
