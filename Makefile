@@ -199,7 +199,8 @@ valgrind: $(BUILD)/tests/run $(BUILD)/tests/glue-run $(ADDIN) ## the suites and 
 	GASLEAF_ADDIN=$(ADDIN) $(MEMCHECK) $(BUILD)/tests/glue-run $(SUITE)
 	$(MEMCHECK) $(BUILD)/tests/run $(SUITE)
 
-# Each in a build directory of its own, without the warnings that the instrumented code alone gives. MOST_CALLS: how many calls the fuzzing makes.
+# MOST_CALLS: how many calls the fuzzing makes. What follows it builds in directories of its own, without the warnings
+# that the instrumented code alone gives.
 MOST_CALLS ?= 200000
 fuzz: $(BUILD)/tests/run ## call the functions MOST_CALLS times with arguments made from seeds
 	GASLEAF_FUZZ=$(MOST_CALLS) $(BUILD)/tests/run fuzz

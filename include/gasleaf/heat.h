@@ -69,7 +69,7 @@ struct gas_result gas_ds_isochoric(const struct gas *gas, double T1, double T2);
  */
 struct gas_result gas_ds(const struct gas *gas, double T1, double P1, double T2, double P2);
 
-/* gas_cp_mean - dh/(T2 - T1), J/(mol K); cp(T1) when they are equal. Status as gas_dh. */
+/* gas_cp_mean - dh/(T2 - T1), J/(mol K); cp(T1) when they are equal. Status as gas_dh.  Check: test_heat.c */
 struct gas_result gas_cp_mean(const struct gas *gas, double T1, double T2);
 
 /*

@@ -83,6 +83,7 @@ struct gas_change {
  *   Status     GAS_NOT_POSITIVE, GAS_NOT_FINITE  argument 1 P, 2 T, 3 v
  *              GAS_UNDETERMINED   two unknown
  *              GAS_CONTRADICTION  three given, P v and R T more than 1e-6 apart
+ *   Check      tests/core/test_leg_refusals.c; every leg of test_path.c starts with it
  */
 struct gas_result gas_point_complete(const struct gas *gas, struct gas_point *point);
 
@@ -126,10 +127,12 @@ struct gas_result gas_leg_run(const struct gas *gas, enum gas_system system, con
  * gas_leg_at - the state at a fraction (0 to 1) along a leg that has been run; fraction 1 is exactly the end. For
  * charts.
  *
+ *   Returned   the pressure there, Pa; *at complete
  *   Status     as gas_leg_run; GAS_UNREACHABLE, argument 6: the fraction is not between 0 and 1
  *   Notes      Equal steps in v; in P where v does not move and for machines with an efficiency; through points every
  *              stretch gets the same share. Of irreversible legs: the states the gas would be found in, were it stopped
  *              there.
+ *   Check      tests/core/test_path.c, test_leg_refusals.c
  */
 struct gas_result gas_leg_at(const struct gas *gas, enum gas_system system, const struct gas_point *start,
                              const struct gas_leg *leg, const struct gas_change *change, double fraction,
@@ -143,6 +146,7 @@ struct gas_result gas_leg_at(const struct gas *gas, enum gas_system system, cons
  *   Status     that of the leg that failed, argument: its number, from 1; *fault (may be NULL) is the leg's own result.
  *              A faulty start counts as leg 1. GAS_UNDETERMINED: no legs
  *   Notes      Changes before the failing leg are filled, and total adds them.
+ *   Check      tests/core/test_path.c, test_cycle.c, test_leg_refusals.c
  */
 struct gas_result gas_path_run(const struct gas *gas, enum gas_system system, const struct gas_point *start,
                                const struct gas_leg *legs, size_t count, struct gas_change *changes,
@@ -157,6 +161,7 @@ struct gas_cycle {
     double mep;                      /* |W_net| / (v_max - v_min), Pa */
     double gap_P, gap_T, gap_v;      /* end less start, relative to the start */
 };
+
 /*
  * gas_cycle_of - the figures of a cycle from its legs.
  *

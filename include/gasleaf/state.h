@@ -133,6 +133,7 @@ bool gas_plan_finds(const struct gas_plan *plan, enum gas_variable variable, int
  *
  *   Notes      gas_plan_finds is false afterwards for what is no longer computed. Tables trim once and run
  *              often. Checks stay as they are.
+ *   Check      tests/core/test_state.c, test_state_cases.c: trimmed and untrimmed plans give the same figures
  */
 void gas_plan_trim(struct gas_plan *plan, const struct gas_known *wanted, size_t count);
 
@@ -141,6 +142,7 @@ void gas_plan_trim(struct gas_plan *plan, const struct gas_known *wanted, size_t
  *
  *   Given      order[GAS_STEPS]
  *   Returned   how many
+ *   Check      tests/core/test_state.c
  */
 int gas_plan_slice(const struct gas_plan *plan, const struct gas_known *wanted, size_t count, int *order);
 
@@ -151,6 +153,7 @@ int gas_plan_slice(const struct gas_plan *plan, const struct gas_known *wanted, 
  *   Returned   how many; 0 when it is found already or when one more figure is not enough
  *   Notes      Makes a plan for each trial: for the sentence of a refusal, not for every row. The plan must not be a
  *              trimmed one.
+ *   Check      tests/core/test_state.c
  */
 size_t gas_plan_missing(const struct gas_plan *plan, struct gas_known wanted, struct gas_known *candidate, size_t room);
 
@@ -176,6 +179,7 @@ struct gas_values {
  *                              GAS_CONSTANT is not read
  *              agree           relative disagreement allowed between over-determined figures, 1e-3 by default; below
  *                              1e-9 it is taken as 1e-9; INFINITY: no checks
+ *   Returned   value: 0; the figures are read by gas_plan_value
  *   Status     GAS_NOT_FINITE    a given figure (argument: index from 1)
  *              GAS_NOT_POSITIVE  a given P, T, V, n, m, v, rho or c (argument: index from 1); a needed one that comes
  *                                out so (argument 0, its figure)
@@ -187,6 +191,7 @@ struct gas_values {
  *              when a given is bad, a balance fails, or `needed` (NULL: nothing) contains a NAN value.
  *              h, u and s may be near zero: they are compared against R T and R.
  *              A check with a value that could not be computed is left out.
+ *   Check      tests/core/test_state.c, test_state_cases.c, test_state_relations.c
  */
 struct gas_result gas_plan_run(const struct gas_plan *plan, const struct gas *gas, const struct gas_datum *datum,
                                double agree, const double *figures, size_t count, const struct gas_known *needed,
@@ -208,6 +213,7 @@ double gas_plan_value(const struct gas_plan *plan, const struct gas_values *valu
  *   Method     part = (f(x + d) - f(x - d)) u / (2 d), d = u but at least 1e-6 |x|; where x - d or x + d cannot be
  *              computed, d is made smaller, then one-sided.
  *   Source     JCGM 100:2008, 5.1.2 and 5.1.3 note 2
+ *   Check      tests/core/test_state.c
  */
 struct gas_result gas_plan_uncertainty(const struct gas_plan *plan, const struct gas *gas,
                                        const struct gas_datum *datum, const double *figures, const double *uncertainty,

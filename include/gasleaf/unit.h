@@ -114,7 +114,8 @@ bool gas_unit_compatible(const struct gas_unit *a, const struct gas_unit *b);
 /* The SI unit of a dimension, for bare numbers. */
 struct gas_unit gas_unit_si(enum gas_dimension dimension);
 
-/* To SI and back. Gauge and vacuum use the barometer (Pa); a temperature is a level. */
+/* To SI and back (tests/units/test_unit.c, against GNU units). Gauge and vacuum use the barometer (Pa); a temperature
+ * is a level. */
 double gas_unit_to_si(const struct gas_unit *unit, double x, double barometer);
 double gas_unit_from_si(const struct gas_unit *unit, double si, double barometer);
 /* The same for differences (temperature rises, pressure drops, tolerances): scale alone. */

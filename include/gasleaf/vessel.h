@@ -101,13 +101,15 @@ struct gas_result gas_nozzle_flow(const struct gas *gas, double P, double T, dou
                                   double coefficient);
 
 /*
- * gas_vent_time - s to fall from P1 to P2 through that orifice, isothermal or adiabatic vessel (gamma at T1).
+ * gas_vent_time - time to fall from P1 to P2 through that orifice, isothermal or adiabatic vessel (gamma at T1).
  *
+ *   Returned   s
  *   Status     as gas_nozzle_flow; GAS_WRONG_SIDE: P2 above P1 or below P_down; GAS_NOT_APPLICABLE: another wall mode
  *   Argument   1 V, 2 P1, 3 T1, 4 P2, 6 wall; 8 P_down, 9 area, 10 coefficient; 0 the gas
  *   Notes      The time to come down to P_down itself is finite. Not for relief sizing.
  *   Method     choked: closed form. Below: the rate of fall integrated in the square root of 1 - (P_down/P)^((k-1)/k),
  *              which takes the infinite slope at P_down out of it, by 16-point Gauss-Legendre quadrature.
+ *   Source     as gas_nozzle_flow
  *   Check      tests/core/test_nozzle.c
  */
 struct gas_result gas_vent_time(const struct gas *gas, const struct gas_vessel *vessel, double P_down, double area,

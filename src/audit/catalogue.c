@@ -255,8 +255,8 @@ static const struct gas_cell *earlier_sentence(const struct gas_call *call)
 /* Calc hands an empty cell over as the number 0. Where texts are asked for it counts as left out. */
 static bool is_empty_for_text(const struct gas_parameter *parameter, const struct gas_block *block)
 {
-    return parameter->kind == GAS_PARAMETER_TEXT && gas_single(block) && block->cell->kind == GAS_CELL_NUMBER &&
-           block->cell->number == 0;
+    const struct gas_cell *cell = gas_single(block) ? block->cell : NULL;
+    return parameter->kind == GAS_PARAMETER_TEXT && cell && cell->kind == GAS_CELL_NUMBER && cell->number == 0;
 }
 
 /* The arguments as the entry shall see them; those of the call itself where nothing changes. */

@@ -84,7 +84,7 @@ static bool answer_cycle_card(struct gas_path_call *path, struct gas_call *call,
     for (size_t i = 0; i < sizeof cycle_rows / sizeof *cycle_rows; i++) {
         struct gas_heading heading = cycle_heading(&path->job, &cycle_rows[i]);
         struct gas_refusal no_value = {0};
-        double si;
+        double si = NAN;
         if (!cycle_quantity(path, solved, cycle, &heading, &si, &no_value))
             continue;
         bool work = heading.symbol == GAS_SYM_W_NET;

@@ -348,11 +348,12 @@ static void noise_is_survived(void)
     struct gas_heading heading;
     struct gas_heading_fault fault;
     double figure;
+    const size_t many = COUNT(pieces);
     check_seed(20260102);
     for (int i = 0; i < 3000; i++) {
         size_t length = 0;
         while (length < 60 && check_random(0, 1) < 0.9) {
-            const char *piece = pieces[(size_t)check_random(0, COUNT(pieces))];
+            const char *piece = pieces[(size_t)check_random(0, (double)many)];
             if (i % 3 == 0)
                 text[length++] = (char)check_random(0, 256);
             else

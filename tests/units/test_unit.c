@@ -326,6 +326,7 @@ static void noise_is_survived(void)
                                          "kPa", "²", "\xff", "Nm3", "per", "cu", "e9", "std", "\xe2\x84"};
     struct gas_unit unit;
     struct gas_unit_fault fault;
+    const size_t many = COUNT(pieces);
     check_seed(20260101);
     for (int i = 0; i < 4000; i++) {
         size_t length = 0;
@@ -333,9 +334,9 @@ static void noise_is_survived(void)
             if (i % 2) {
                 text[length++] = (char)check_random(0, 256);
             } else {
-                const char *piece = pieces[(size_t)check_random(0, COUNT(pieces))];
-                memcpy(text + length, piece, strlen(piece));
-                length += strlen(piece);
+                const char *piece = pieces[(size_t)check_random(0, (double)many)];
+                while (*piece)
+                    text[length++] = *piece++;
             }
         }
         if (gas_unit_parse(text, length, NULL, &unit, &fault))
