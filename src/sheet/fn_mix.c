@@ -5,7 +5,6 @@
 #include "sheet/functions.h"
 #include "sheet/job_units.h"
 #include "sheet/mix.h"
-#include "sheet/path_call.h"
 
 /* What the card shows before the composition: a unit for vessels and one for streams, unless a given sets it. */
 static const struct card_row {

@@ -6,7 +6,6 @@
 #include "sheet/functions.h"
 #include "sheet/job_units.h"
 #include "sheet/machine.h"
-#include "sheet/path_call.h"
 #include "sheet/vessel_task.h"
 
 /* What a card shows: the label and what it is read as. NULL as the unit: that of the givens. */

@@ -114,6 +114,19 @@ static bool ending_of(const struct gas_leg_figure *figure, enum gas_ending *endi
     return false;
 }
 
+static bool take_times(struct gas_piece *piece)
+{
+    static const char *const signs[] = {"x ", "X ", "×", "*"};
+    for (size_t i = 0; i < sizeof signs / sizeof *signs; i++) {
+        size_t length = strlen(signs[i]);
+        if (piece->length > length && strncmp(piece->at, signs[i], length) == 0) {
+            *piece = gas_piece_behind(*piece, length);
+            return true;
+        }
+    }
+    return false;
+}
+
 /* "P x 3", "V x 0.125", also with the multiplication sign. */
 static bool read_ratio(const struct reader *reader, struct gas_piece text, bool *is_ratio)
 {
@@ -121,17 +134,15 @@ static bool read_ratio(const struct reader *reader, struct gas_piece text, bool 
         char letter;
         enum gas_ending ending;
     } letters[] = {{'P', GAS_BY_P_RATIO}, {'V', GAS_BY_V_RATIO}, {'T', GAS_BY_T_RATIO}};
-    static const char *const signs[] = {"x ", "X ", "× ", "* ", "×", "*"};
-    struct gas_piece rest = gas_piece_trim((struct gas_piece){text.at + 1, text.length ? text.length - 1 : 0});
     *is_ratio = false;
-    for (size_t i = 0; text.length && i < 3; i++)
-        for (size_t k = 0; gas_ascii_upper(text.at[0]) == letters[i].letter && k < sizeof signs / sizeof *signs; k++)
-            if (rest.length > strlen(signs[k]) && strncmp(rest.at, signs[k], strlen(signs[k])) == 0) {
-                *is_ratio = true;
-                reader->leg->ending = letters[i].ending;
-                rest = (struct gas_piece){rest.at + strlen(signs[k]), rest.length - strlen(signs[k])};
-                return read_figure(reader, rest, &reader->leg->value);
-            }
+    for (size_t i = 0; text.length && i < sizeof letters / sizeof *letters; i++) {
+        struct gas_piece rest = gas_piece_behind(text, 1);
+        if (gas_ascii_upper(text.at[0]) != letters[i].letter || !take_times(&rest))
+            continue;
+        *is_ratio = true;
+        reader->leg->ending = letters[i].ending;
+        return read_figure(reader, rest, &reader->leg->value);
+    }
     return true;
 }
 
@@ -139,17 +150,18 @@ static bool read_end_point(const struct reader *reader, struct gas_piece text)
 {
     struct gas_typed_leg *leg = reader->leg;
     enum gas_ending kind = GAS_TO_P, other = GAS_TO_P;
-    size_t and = find_word(text, "and");
-    if (!read_figure(reader, (struct gas_piece){text.at, and}, &leg->value))
+    const char *joint = "and";
+    size_t first = find_word(text, joint);
+    if (!read_figure(reader, gas_piece_front(text, first), &leg->value))
         return false;
     if (!ending_of(&leg->value, &kind))
         return refuse_leg(reader,
                           "a leg ends at a pressure, a temperature or a volume; give one with its unit, a ratio "
                           "such as V x 0.125, or \"with Q = 50 kJ\".");
     leg->ending = kind;
-    if (and == text.length)
+    if (first == text.length)
         return true;
-    if (!read_figure(reader, (struct gas_piece){text.at + and+3, text.length - and-3}, &leg->second))
+    if (!read_figure(reader, gas_piece_behind(text, first + strlen(joint)), &leg->second))
         return false;
     if (!ending_of(&leg->second, &other) || kind == other || kind == GAS_TO_T || other == GAS_TO_T)
         return refuse_leg(reader, "two figures at the end must be a pressure and a volume.");
@@ -239,7 +251,6 @@ static bool read_modifier(const struct reader *reader, struct gas_piece text)
 static bool read_leg(const struct reader *reader, struct gas_piece text)
 {
     struct gas_typed_leg *leg = reader->leg;
-    struct gas_piece all = text;
     snprintf(leg->text, sizeof leg->text, "%.*s", (int)(text.length < 90 ? text.length : 90), text.at);
     if (!take_process(&text, &leg->process))
         return refuse_leg(reader, "it does not start with a process; these are known: isothermal, isobaric, isochoric, "
@@ -248,7 +259,7 @@ static bool read_leg(const struct reader *reader, struct gas_piece text)
     size_t end = to < with ? to : with;
     if (!read_modifier(reader, gas_piece_front(text, end)))
         return false;
-    if (end == text.length && leg->process == GAS_AGAINST && all.length) {
+    if (end == text.length && leg->process == GAS_AGAINST) {
         leg->ending = GAS_TO_BALANCE;
         return true;
     }

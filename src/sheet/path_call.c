@@ -22,14 +22,6 @@ bool gas_path_start(struct gas_path_call *path, const struct gas_call *call, con
     return gas_path_open(&path->job, &path->legs, &arguments, gas_argument(call, places->legs), &path->refusal);
 }
 
-struct gas_heading gas_heading_of(const char *text)
-{
-    struct gas_heading heading = {0};
-    struct gas_heading_fault fault;
-    gas_heading_parse(text, strlen(text), NULL, &heading, &fault);
-    return heading;
-}
-
 /* The single case of a function that shows a whole path. */
 bool gas_path_solve_one(struct gas_path_call *path, struct gas_call *call, struct gas_path_case *solved)
 {

@@ -38,7 +38,4 @@ const char *gas_path_energy_unit(const struct gas_job *job);
 /* gas_path_put_headings - the wanted headings into the first row, from a column on. */
 void gas_path_put_headings(const struct gas_job *job, struct gas_call *call, size_t first);
 
-/* gas_heading_of - a heading written in the code. */
-struct gas_heading gas_heading_of(const char *text);
-
 #endif

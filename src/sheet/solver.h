@@ -27,7 +27,6 @@ struct gas_solver;
  *   Given      job            its given headings; those that are no state variable (efficiency, P line ...) are passed
  *                             over, as are numbered ones above highest_state (0: none is)
  *              needs[count]   copied
-
  */
 struct gas_solver *gas_solver_open(const struct gas_job *job, int highest_state, const struct gas_need *needs,
                                    size_t count, struct gas_arena *arena, struct gas_refusal *refusal);

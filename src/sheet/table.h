@@ -64,6 +64,9 @@ struct gas_wanted {
 bool gas_wanted_read(const struct gas_block *argument, const struct gas_options *options, struct gas_wanted *wanted,
                      struct gas_refusal *refusal);
 
+/* gas_heading_of - a heading written in the code, where nothing in particular is wanted. */
+struct gas_heading gas_heading_of(const char *text);
+
 enum { GAS_NAME_TEXT = 40 };
 /* gas_quantity_name - "P1", "T", "P line": symbol and state as a sentence names them. Returns buffer. */
 const char *gas_quantity_name(char buffer[GAS_NAME_TEXT], enum gas_symbol symbol, int state);

@@ -1,4 +1,6 @@
 /* What is wanted: headings, in a text or in cells. */
+#include <string.h>
+
 #include "sheet/piece.h"
 #include "sheet/table_form.h"
 
@@ -61,4 +63,12 @@ bool gas_wanted_read(const struct gas_block *argument, const struct gas_options 
         if (!want_cell(wanted, &argument->cell[i], gas_single(argument), options, refusal))
             return false;
     return true;
+}
+
+struct gas_heading gas_heading_of(const char *text)
+{
+    struct gas_heading heading = {0};
+    struct gas_heading_fault fault;
+    gas_heading_parse(text, strlen(text), NULL, &heading, &fault);
+    return heading;
 }
