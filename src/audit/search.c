@@ -46,8 +46,10 @@ static bool is_rounding(const struct audit *audit, int part)
     return audit->instance[part].slip->rounding;
 }
 
+/* A second slip is a rare thing, a rounding beside a slip or beside another rounding less so (common practice). */
 static double likelihood(const struct audit *audit, const short part[TOGETHER])
 {
+    const double second_slip = 0.05, rounding_too = 0.1, further_rounding = 0.3;
     double product = 1;
     int count = 0, roundings = 0;
     for (size_t i = 0; i < TOGETHER && part[i] >= 0; i++, count++) {
@@ -55,7 +57,22 @@ static double likelihood(const struct audit *audit, const short part[TOGETHER])
         roundings += is_rounding(audit, part[i]);
     }
     int slips = count - roundings;
-    return product * (slips > 1 ? 0.05 : 1) * pow(slips ? 0.1 : 0.3, slips ? roundings : roundings - 1);
+    return product * (slips > 1 ? second_slip : 1) *
+           (slips ? pow(rounding_too, roundings) : pow(further_rounding, roundings - 1));
+}
+
+/* Into a list of at most so many, the best score first, behind its equals; what has no room is dropped. */
+static void insert(struct explanation *list, size_t *count, size_t most, const struct explanation *new)
+{
+    size_t place = *count;
+    while (place > 0 && list[place - 1].score < new->score)
+        place--;
+    if (place == most)
+        return;
+    if (*count < most)
+        ++*count;
+    memmove(list + place + 1, list + place, (*count - place - 1) * sizeof *list);
+    list[place] = *new;
 }
 
 static void keep(struct hunt *hunt, const short part[TOGETHER], double figure)
@@ -67,12 +84,7 @@ static void keep(struct hunt *hunt, const short part[TOGETHER], double figure)
         return;
     struct explanation new = {.figure = figure, .score = good * likelihood(hunt->audit, part)};
     memcpy(new.part, part, sizeof new.part);
-    size_t place = hunt->kept < KEPT ? hunt->kept++ : KEPT;
-    for (; place > 0 && hunt->best[place - 1].score < new.score; place--)
-        if (place < KEPT)
-            hunt->best[place] = hunt->best[place - 1];
-    if (place < KEPT)
-        hunt->best[place] = new;
+    insert(hunt->best, &hunt->kept, KEPT, &new);
 }
 
 /* -- one case ------------------------------------------------------------------------------------------------------ */
@@ -200,22 +212,39 @@ static bool contains(const struct explanation *more, const struct explanation *l
     return true;
 }
 
+static bool contains_any(const struct explanation *more, const struct explanation *list, size_t count)
+{
+    for (size_t i = 0; i < count; i++)
+        if (contains(more, &list[i]))
+            return true;
+    return false;
+}
+
+static bool is_single(const struct explanation *explanation)
+{
+    return explanation->part[1] < 0;
+}
+
+/* Is there nothing new in naming one of several parts? */
+static bool is_noise(const struct hunt *hunt, const struct explanation *more)
+{
+    const struct explanation *first = hunt->row->explanation;
+    if (is_single(more))
+        return false;
+    /* one rounded constant is enough: two that do the same say nothing more */
+    if (hunt->row->count && is_single(first) && is_rounding(hunt->audit, first->part[0]))
+        return true;
+    /* behind one slip that explains the figure, an accident of two unlikely ones is noise */
+    return is_single(hunt->best) && more->score < ACCIDENT * hunt->best->score;
+}
+
 /* The best ones into the row, behind those that are there. */
 static void name_best(struct hunt *hunt)
 {
     struct audited *row = hunt->row;
-    for (size_t i = 0; i < hunt->kept && row->count < NAMED; i++) {
-        /* one rounded constant is enough: two that do the same say nothing more */
-        bool named = row->count && is_rounding(hunt->audit, row->explanation[0].part[0]) &&
-                     row->explanation[0].part[1] < 0 && hunt->best[i].part[1] >= 0;
-        /* behind one slip that explains the figure, an accident of two unlikely ones is noise */
-        named = named || (hunt->best[0].part[1] < 0 && hunt->best[i].part[1] >= 0 &&
-                          hunt->best[i].score < ACCIDENT * hunt->best[0].score);
-        for (size_t k = 0; k < row->count; k++)
-            named = named || contains(&hunt->best[i], &row->explanation[k]);
-        if (!named)
+    for (size_t i = 0; i < hunt->kept && row->count < NAMED; i++)
+        if (!is_noise(hunt, &hunt->best[i]) && !contains_any(&hunt->best[i], row->explanation, row->count))
             row->explanation[row->count++] = hunt->best[i];
-    }
 }
 
 static void set_status(const struct audit *audit, struct audited *row)
@@ -257,13 +286,9 @@ static double holds(struct hunt *hunt, const struct explanation *explanation)
 static size_t leave_out_longer(struct explanation *list, size_t count)
 {
     size_t kept = 0;
-    for (size_t i = 0; i < count; i++) {
-        bool longer = false;
-        for (size_t k = 0; k < kept; k++)
-            longer = longer || contains(&list[i], &list[k]);
-        if (!longer)
+    for (size_t i = 0; i < count; i++)
+        if (!contains_any(&list[i], list, kept))
             list[kept++] = list[i];
-    }
     return kept;
 }
 
@@ -275,14 +300,8 @@ static size_t find_common(struct hunt *hunt, struct explanation common[NAMED])
         struct explanation new = hunt->best[i];
         new.score = holds(hunt, &new) * likelihood(hunt->audit, new.part);
         new.everywhere = true;
-        if (!(new.score > 0))
-            continue;
-        size_t place = count < NAMED ? count++ : NAMED;
-        for (; place > 0 && common[place - 1].score < new.score; place--)
-            if (place < NAMED)
-                common[place] = common[place - 1];
-        if (place < NAMED)
-            common[place] = new;
+        if (new.score > 0)
+            insert(common, &count, NAMED, &new);
     }
     return leave_out_longer(common, count);
 }

@@ -325,8 +325,8 @@ static void share_of_reference_volumes(struct gas_table *table)
 bool gas_table_read(const struct gas_block *given, const struct gas_block *headings, const struct gas_options *options,
                     struct gas_table *table, struct gas_refusal *refusal)
 {
-    struct opening opening = {table, refusal, "given", 0};
     memset(table, 0, sizeof *table);
+    struct opening opening = {table, refusal, "given", 0};
     table->barometer = options->barometer;
     table->references = options->references;
     if (gas_omitted(given))

@@ -375,8 +375,8 @@ static void settle_force(struct unit_product *product)
 
 bool gas_product_parse(const char *plain, struct unit_product *product, struct gas_unit_fault *fault)
 {
-    struct reader reader = {plain, plain, product, fault};
     *product = (struct unit_product){.number = 1.0};
+    struct reader reader = {plain, plain, product, fault};
     skip_spaces(&reader);
     if (reader.p[0] == '-' && !reader.p[1]) { /* a dash in a unit column: a plain number */
         product->count = gas_unit_name_find("-", true, &product->factor[0].name) == NAME_FOUND;
