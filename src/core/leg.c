@@ -119,6 +119,18 @@ struct gas_result leg_close(const struct leg_case *lc, struct gas_change *change
     return gas_good(change->W);
 }
 
+struct gas_result leg_close_along(const struct leg_case *lc, const struct curve *curve, int pieces,
+                                  struct gas_change *change)
+{
+    change->W = curve_work(curve, lc->system, 1);
+    const struct gas_result closed = leg_close(lc, change);
+    if (closed.status)
+        return closed;
+    change->Q_in = change->Q_out = 0;
+    curve_heats(lc->gas, curve, change->Q, pieces, &change->Q_in, &change->Q_out);
+    return closed;
+}
+
 struct gas_result leg_close_adiabatic(const struct leg_case *lc, struct gas_change *change)
 {
     const struct gas_result closed = leg_close(lc, change);

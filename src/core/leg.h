@@ -40,6 +40,12 @@ struct gas_result leg_T_after_energy(const struct leg_case *lc, double T1, doubl
  * A gas without heat capacity leaves them NAN where the temperature moves; S_made is left alone. */
 struct gas_result leg_close(const struct leg_case *lc, struct gas_change *change);
 
+/* The same for a leg along one curve, which gives its work too; a reversal of the heat is looked for in that many
+ * pieces of it. */
+struct curve;
+struct gas_result leg_close_along(const struct leg_case *lc, const struct curve *curve, int pieces,
+                                  struct gas_change *change);
+
 /* The same for an adiabatic leg, whose W is the energy change: Q is 0 and S_made is dS. */
 struct gas_result leg_close_adiabatic(const struct leg_case *lc, struct gas_change *change);
 

@@ -159,13 +159,7 @@ struct gas_result leg_line_run(const struct leg_case *lc, struct gas_change *cha
     const struct curve curve = curve_along(lc, line, s.value);
     change->end = curve_at(lc->gas, &curve, 1);
     set_asked(&lc->leg, &change->end);
-    change->W = curve_work(&curve, lc->system, 1);
-    const struct gas_result closed = leg_close(lc, change);
-    if (closed.status)
-        return closed;
-    change->Q_in = change->Q_out = 0;
-    curve_heats(lc->gas, &curve, change->Q, SIGN_PIECES, &change->Q_in, &change->Q_out);
-    return closed;
+    return leg_close_along(lc, &curve, SIGN_PIECES, change);
 }
 
 struct gas_result leg_line_at(const struct leg_case *lc, const struct gas_change *change, double fraction,

@@ -14,13 +14,7 @@ struct gas_result leg_straight_run(const struct leg_case *lc, struct gas_change 
 {
     change->end = completed(lc, lc->leg.value, lc->leg.second);
     const struct curve curve = curve_straight(&lc->start, &change->end);
-    change->W = curve_work(&curve, lc->system, 1);
-    const struct gas_result closed = leg_close(lc, change);
-    if (closed.status)
-        return closed;
-    change->Q_in = change->Q_out = 0;
-    curve_heats(lc->gas, &curve, change->Q, LINE_PIECES, &change->Q_in, &change->Q_out);
-    return closed;
+    return leg_close_along(lc, &curve, LINE_PIECES, change);
 }
 
 struct gas_result leg_straight_at(const struct leg_case *lc, const struct gas_change *change, double fraction,
