@@ -4,16 +4,6 @@
 #include <string.h>
 #include <strings.h>
 
-/* clang-format off */
-/* What normal and standard have been taken to mean (common practice). */
-const struct reference reference_conditions[] = {
-    {273.15, 101325}, {273.15, 1e5},  {288.15, 101325}, {288.15, 1e5}, {293.15, 101325}, {293.15, 1e5},
-    {298.15, 101325}, {298.15, 1e5},
-    {288.7055555555556, 101325}, {288.7055555555556, 101559.774928982}, {293.15, 101325.353861092},
-    {294.2611111111111, 101325.353861092},
-};
-/* clang-format on */
-
 double rounded_to(double x, int digits)
 {
     if (x == 0 || !isfinite(x))
@@ -269,13 +259,25 @@ bool read_moles_as_mass(struct replay *replay, const struct site *site, struct r
 
 /* -- reference volumes --------------------------------------------------------------------------------------------- */
 
+/* clang-format off */
+/* What normal and standard have been taken to mean (common practice). A slip names one by its index. */
+static const struct {
+    double T, P; /* K, Pa */
+} reference_conditions[] = {
+    {273.15, 101325}, {273.15, 1e5},  {288.15, 101325}, {288.15, 1e5}, {293.15, 101325}, {293.15, 1e5},
+    {298.15, 101325}, {298.15, 1e5},
+    {288.7055555555556, 101325}, {288.7055555555556, 101559.774928982}, {293.15, 101325.353861092},
+    {294.2611111111111, 101325.353861092},
+};
+/* clang-format on */
+
 bool read_reference(struct replay *replay, const struct site *site, struct reading *reading, double parameter)
 {
     (void)replay, (void)site;
-    const struct reference *other = &reference_conditions[(int)parameter];
+    double T = reference_conditions[(int)parameter].T, P = reference_conditions[(int)parameter].P;
     if (!reading->unit.reference_volume)
         return false;
-    double ratio = (other->P / other->T) / (reading->unit.reference_P / reading->unit.reference_T);
+    double ratio = (P / T) / (reading->unit.reference_P / reading->unit.reference_T);
     if (fabs(ratio - 1) < 1e-5)
         return false;
     reading->unit.scale *= ratio;

@@ -16,12 +16,6 @@ misreading read_pressure_unit, read_factor, read_flow_factor, read_rounded_facto
 misreading read_mass_as_moles, read_moles_as_mass, read_reference, read_rounded_molar_volume;
 misreading read_calorie, read_sign;
 
-/* parameter of read_reference: an index into these */
-struct reference {
-    double T, P; /* K, Pa */
-};
-extern const struct reference reference_conditions[];
-
 /* A figure rounded to a number of significant digits. */
 double rounded_to(double x, int digits);
 

@@ -4,7 +4,8 @@
 
 #include <gasleaf/heading.h>
 
-bool gas_cell_is_word(const struct gas_cell *cell)
+/* A text that does not start with a figure: a heading, a label, a unit. */
+static bool is_word(const struct gas_cell *cell)
 {
     double figure;
     size_t used;
@@ -47,7 +48,7 @@ struct gas_line gas_line_down(const struct gas_block *block, size_t column, size
 
 static bool is_figure(const struct gas_cell *cell)
 {
-    return !gas_cell_blank(cell) && !gas_cell_is_word(cell);
+    return !gas_cell_blank(cell) && !is_word(cell);
 }
 
 bool gas_line_figures(struct gas_line line)
@@ -61,7 +62,7 @@ bool gas_line_figures(struct gas_line line)
 static bool any_word(struct gas_line line)
 {
     for (size_t i = 0; i < line.count; i++)
-        if (gas_cell_is_word(&line.cell[i * line.step]))
+        if (is_word(&line.cell[i * line.step]))
             return true;
     return false;
 }
@@ -69,7 +70,7 @@ static bool any_word(struct gas_line line)
 static bool all_words(struct gas_line line)
 {
     for (size_t i = 0; i < line.count; i++)
-        if (!gas_cell_is_word(&line.cell[i * line.step]))
+        if (!is_word(&line.cell[i * line.step]))
             return false;
     return true;
 }
@@ -92,8 +93,8 @@ bool gas_line_of_units(struct gas_line line)
 static bool is_heading(const struct gas_cell *cell)
 {
     struct gas_heading heading;
-    return gas_cell_is_word(cell) && (gas_heading_parse(cell->text, cell->length, NULL, &heading, NULL) ||
-                                      gas_passed_over((struct gas_piece){cell->text, cell->length}));
+    return is_word(cell) && (gas_heading_parse(cell->text, cell->length, NULL, &heading, NULL) ||
+                             gas_passed_over((struct gas_piece){cell->text, cell->length}));
 }
 
 /* How many cells of a line are headings that show a unit. */
@@ -103,8 +104,7 @@ static size_t headings_with_unit(struct gas_line line)
     for (size_t i = 0; i < line.count; i++) {
         const struct gas_cell *cell = &line.cell[i * line.step];
         struct gas_heading heading;
-        count += gas_cell_is_word(cell) && gas_heading_parse(cell->text, cell->length, NULL, &heading, NULL) &&
-                 heading.has_unit;
+        count += is_word(cell) && gas_heading_parse(cell->text, cell->length, NULL, &heading, NULL) && heading.has_unit;
     }
     return count;
 }
@@ -129,7 +129,7 @@ static bool all_texts(const struct gas_block *given)
 static bool items_in_a_row(const struct gas_block *given)
 {
     return given->rows == 1 && all_texts(given) &&
-           (given->columns == 1 || !gas_cell_is_word(given->cell) || all_words(gas_line_across(given, 0, 0)));
+           (given->columns == 1 || !is_word(given->cell) || all_words(gas_line_across(given, 0, 0)));
 }
 
 /* Headings on top: no word below them in the first column, unless the column is one of names ("case", or no heading)

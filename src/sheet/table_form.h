@@ -20,9 +20,6 @@ enum gas_form {
 
 enum gas_form gas_form_of(const struct gas_block *given);
 
-/* gas_cell_is_word - a text that does not start with a figure: a heading, a label, a unit. */
-bool gas_cell_is_word(const struct gas_cell *cell);
-
 /* gas_cell_is_title - the word "value" over a block of pairs. */
 bool gas_cell_is_title(const struct gas_cell *cell);
 
