@@ -78,7 +78,7 @@ static bool answer_cycle_card(struct gas_path_call *path, struct gas_call *call,
 {
     static const char *const headings[] = {"quantity", "value", "unit"};
     size_t rows = 1;
-    if (!gas_answer_block(call, 1 + sizeof cycle_rows / sizeof *cycle_rows, 3))
+    if (!gas_answer_block(call, 2 + sizeof cycle_rows / sizeof *cycle_rows, 3))
         return true;
     gas_put_texts(call, 0, headings, 3);
     for (size_t i = 0; i < sizeof cycle_rows / sizeof *cycle_rows; i++) {
@@ -93,6 +93,9 @@ static bool answer_cycle_card(struct gas_path_call *path, struct gas_call *call,
         gas_put_number(call, rows, 1, gas_job_shown(&path->job, &path->figures, &heading, si));
         gas_put_text(call, rows++, 2, heading.has_unit ? heading.unit.text : "");
     }
+    gas_put_text(call, rows, 0, "direction");
+    gas_put_text(call, rows++, 1,
+                 cycle->W_net < 0 ? "clockwise in P-V, gives work" : "anticlockwise in P-V, takes work");
     call->answer.rows = rows;
     return true;
 }

@@ -1,6 +1,5 @@
 #include <math.h>
 #include <stdio.h>
-#include <time.h>
 
 #include <gasleaf/realgas.h>
 
@@ -256,21 +255,6 @@ static void bad_inputs(void)
     bad("tolerance", gas_ideal_up_to(&good, 300, 0), GAS_NOT_POSITIVE, 3);
 }
 
-/* Cheap enough for every row of a sheet. The bound is ten times what is wanted, for a slow or busy machine. */
-static void quick(void)
-{
-    struct timespec start, end;
-    double sum = 0;
-    clock_gettime(CLOCK_PROCESS_CPUTIME_ID, &start);
-    for (int i = 0; i < 20000; i++)
-        sum += gas_z_reduced(0.7 + 3.3 * i / 20000, 0.05 + (i % 97) * 0.1, 0.3).value;
-    clock_gettime(CLOCK_PROCESS_CPUTIME_ID, &end);
-    double seconds = (double)(end.tv_sec - start.tv_sec) + 1e-9 * (double)(end.tv_nsec - start.tv_nsec);
-    check_true("under 30 us a call", sum > 0 && seconds / 20000 < 30e-6);
-    if (seconds / 20000 > 3e-6)
-        printf("gas_z_reduced: %.2f us a call\n", 1e6 * seconds / 20000);
-}
-
 const struct test_suite suite_realgas = {"realgas",
                                          (const struct test_case[]){{"published tables", published_tables},
                                                                     {"vapour root", the_vapour_root},
@@ -282,5 +266,4 @@ const struct test_suite suite_realgas = {"realgas",
                                                                     {"mixtures", mixtures},
                                                                     {"ideal up to", where_the_ideal_gas_ends},
                                                                     {"bad inputs", bad_inputs},
-                                                                    {"speed", quick},
                                                                     {0}}};
