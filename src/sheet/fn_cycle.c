@@ -4,6 +4,7 @@
 #include <string.h>
 
 #include "sheet/functions.h"
+#include "sheet/job_units.h"
 #include "sheet/path_call.h"
 
 #define TURNING "the heat changes sign on a leg whose temperatures leave the data; split that leg."
@@ -42,11 +43,7 @@ static bool cycle_quantity(const struct gas_path_call *path, const struct gas_pa
             return gas_refuse(refusal, heading->text, "%s", row->why_not);
         bool energy = row->molar == GAS_DIM_MOLAR_ENERGY;
         *si = energy ? gas_job_from_molar(&path->job, row->molar, figure, solved->n, heading->unit.dimension) : figure;
-        return !isnan(*si) ||
-               gas_refuse(refusal, "wanted",
-                          "\"%s\" needs the amount of gas, which does not follow from the givens; give m, "
-                          "n or V, or ask per kg.",
-                          heading->text);
+        return !isnan(*si) || gas_refuse_no_basis(heading, solved->n, refusal);
     }
     return gas_refuse(refusal, heading->text,
                       "a cycle gives W net, Q in, Q out, efficiency, COP heating, COP "

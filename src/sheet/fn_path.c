@@ -2,12 +2,6 @@
 #include "sheet/functions.h"
 #include "sheet/path_call.h"
 
-static bool is_energy(enum gas_dimension dimension)
-{
-    return dimension == GAS_DIM_ENERGY || dimension == GAS_DIM_POWER || dimension == GAS_DIM_MOLAR_ENERGY ||
-           dimension == GAS_DIM_SPECIFIC_ENERGY;
-}
-
 /* "kJ" alone is the work for WORK, the heat for HEAT; nothing at all is J, or W in flow. */
 static bool complete_wanted(struct gas_path_call *path, enum gas_symbol symbol)
 {
@@ -19,7 +13,7 @@ static bool complete_wanted(struct gas_path_call *path, enum gas_symbol symbol)
     }
     for (size_t i = 0; i < wanted->columns; i++) {
         struct gas_heading *heading = &wanted->heading[i];
-        if (heading->symbol == GAS_SYM_NONE && is_energy(heading->unit.dimension) && symbol != GAS_SYM_NONE)
+        if (heading->symbol == GAS_SYM_NONE && gas_is_energy(heading->unit.dimension) && symbol != GAS_SYM_NONE)
             heading->symbol = symbol;
         else if (heading->symbol == GAS_SYM_NONE)
             return gas_refuse(&path->refusal, "wanted",

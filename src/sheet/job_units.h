@@ -16,4 +16,7 @@ const char *gas_shown_pressure(const struct gas_job *job, const struct gas_case 
 const char *gas_shown_temperature(const struct gas_job *job, const struct gas_case *figures, char buffer[GAS_SHOWN],
                                   double T);
 
+/* gas_refuse_no_basis - a wanted figure that is NAN: the amount is not known, or the unit does not fit. */
+bool gas_refuse_no_basis(const struct gas_heading *heading, double n, struct gas_refusal *refusal);
+
 #endif

@@ -191,6 +191,12 @@ static bool read_destination(const struct reader *reader, struct gas_piece text)
     return read_end_point(reader, text);
 }
 
+bool gas_is_energy(enum gas_dimension dimension)
+{
+    return dimension == GAS_DIM_ENERGY || dimension == GAS_DIM_POWER || dimension == GAS_DIM_MOLAR_ENERGY ||
+           dimension == GAS_DIM_SPECIFIC_ENERGY;
+}
+
 /* After "with": "Q = 50 kJ", "W = -20 kJ", "Q" for the column. */
 static bool read_transfer(const struct reader *reader, struct gas_piece text)
 {
@@ -205,10 +211,7 @@ static bool read_transfer(const struct reader *reader, struct gas_piece text)
     }
     if (!read_figure(reader, text, value))
         return false;
-    enum gas_dimension dimension = value->unit.dimension;
-    bool energy = dimension == GAS_DIM_ENERGY || dimension == GAS_DIM_POWER || dimension == GAS_DIM_MOLAR_ENERGY ||
-                  dimension == GAS_DIM_SPECIFIC_ENERGY;
-    if (value->kind == GAS_FIGURE_FIXED && !energy)
+    if (value->kind == GAS_FIGURE_FIXED && !gas_is_energy(value->unit.dimension))
         return refuse_leg(reader, "heat and work need a unit of energy, such as kJ, kW or kJ/kg.");
     return true;
 }

@@ -54,4 +54,7 @@ struct gas_typed_legs {
 bool gas_legs_read(const struct gas_block *argument, const struct gas_options *options, struct gas_typed_legs *legs,
                    struct gas_refusal *refusal);
 
+/* gas_is_energy - what work and heat can be in: total, per time, per mole, per mass. */
+bool gas_is_energy(enum gas_dimension dimension);
+
 #endif

@@ -38,16 +38,6 @@ double gas_case_figure(const struct gas_job *job, const struct gas_case *figures
     return column < 0 ? NAN : figures->si[column];
 }
 
-bool gas_refuse_no_basis(const struct gas_heading *heading, double n, struct gas_refusal *refusal)
-{
-    if (isnan(n) && gas_dimension_extent(heading->unit.dimension) != GAS_EXTENT_NONE)
-        return gas_refuse(refusal, "wanted",
-                          "\"%s\" needs the amount of gas, which does not follow from the givens; give m, n, V or Nm3, "
-                          "or their flows, or ask per kg or per mol.",
-                          heading->text);
-    return gas_refuse(refusal, heading->text, "it has no value here; ask for another quantity or unit.");
-}
-
 bool gas_job_one_case(struct gas_job *job, struct gas_arena *arena, struct gas_row *row, struct gas_case *figures,
                       struct gas_refusal *refusal)
 {

@@ -27,9 +27,6 @@ bool gas_admit_givens(const struct gas_job *job, const struct gas_admitted *list
 /* gas_case_figure - a given in SI; NAN when it has no column or is blank. */
 double gas_case_figure(const struct gas_job *job, const struct gas_case *figures, enum gas_symbol symbol, int state);
 
-/* gas_refuse_no_basis - a wanted figure that is NAN: the amount is not known, or the unit does not fit. */
-bool gas_refuse_no_basis(const struct gas_heading *heading, double n, struct gas_refusal *refusal);
-
 /* gas_job_one_case - the figures of a function that shows a single case; row and figures are filled. */
 bool gas_job_one_case(struct gas_job *job, struct gas_arena *arena, struct gas_row *row, struct gas_case *figures,
                       struct gas_refusal *refusal);

@@ -6,6 +6,8 @@
 
 #include <gasleaf/heat.h>
 
+#include "sheet/job_units.h"
+
 /* The wanted symbols that are a change along the path. */
 static const struct change_row {
     enum gas_symbol symbol;
@@ -76,15 +78,10 @@ static bool in_basis(const struct gas_job *job, enum gas_dimension molar, double
     *si = gas_job_from_molar(job, molar, figure, n, heading->unit.dimension);
     if (!isnan(*si))
         return true;
-    if (isnan(n) && gas_dimension_extent(heading->unit.dimension) != GAS_EXTENT_NONE)
-        return gas_refuse(refusal, "wanted",
-                          "\"%s\" needs the amount of gas, which does not follow from the givens; give m, n or V, or "
-                          "ask per kg or per mol.",
-                          heading->text);
-    if (job->gas.interval_count == 0)
+    if (isnan(figure) && job->gas.interval_count == 0)
         return gas_refuse(refusal, "gas", "%s has no heat capacity, which %s needs; give one after '|'.",
                           job->choice->label, heading->text);
-    return gas_refuse(refusal, heading->text, "it has no value here; ask for another quantity or unit.");
+    return gas_refuse_no_basis(heading, n, refusal);
 }
 
 bool gas_point_quantity(const struct gas_job *job, const struct gas_point *point, double n,

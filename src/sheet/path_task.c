@@ -9,10 +9,11 @@
 
 enum { NEED_P, NEED_T, NEED_N, NEEDS };
 
-/* What the task compiles: the solver of the start, and the points of a leg through points in SI. */
+/* What the task compiles: the solver of the start, and the points of a leg through points: as they are given, and room
+ * for them in SI, since a gauge pressure stands on the barometer of its case. */
 struct path_own {
     struct gas_solver *solver;
-    struct gas_point *points;
+    struct gas_point *given, *points;
     size_t point_count;
 };
 
@@ -52,18 +53,21 @@ bool gas_path_open(struct gas_job *job, struct gas_typed_legs *legs, const struc
 }
 
 /* The figures a leg can have, one after the other. */
-enum { FIGURES = 5 };
+enum { VALUE, SECOND, EXPONENT, EFFICIENCY, OUTSIDE, FIGURES };
 static const struct gas_leg_figure *figure_at(const struct gas_typed_leg *leg, size_t index)
 {
-    const struct gas_leg_figure *const figures[FIGURES] = {&leg->value, &leg->second, &leg->n, &leg->efficiency,
-                                                           &leg->outside};
+    const struct gas_leg_figure *const figures[FIGURES] = {[VALUE] = &leg->value,
+                                                           [SECOND] = &leg->second,
+                                                           [EXPONENT] = &leg->n,
+                                                           [EFFICIENCY] = &leg->efficiency,
+                                                           [OUTSIDE] = &leg->outside};
     return figures[index];
 }
 
 static bool column_is_there(const struct gas_job *job, const struct gas_typed_leg *leg, size_t number,
                             const struct gas_leg_figure *figure, struct gas_refusal *refusal)
 {
-    char what[24], name[GAS_NAME_TEXT];
+    char what[32], name[GAS_NAME_TEXT];
     if (figure->kind != GAS_FIGURE_COLUMN || gas_job_column(job, figure->symbol, figure->state) >= 0)
         return true;
     snprintf(what, sizeof what, "leg %zu", number);
@@ -86,27 +90,38 @@ static bool columns_are_there(const struct gas_job *job, struct gas_refusal *ref
     return true;
 }
 
-/* The points of a leg in SI; their volumes count relative to the first, so totals serve as well as specific ones. */
 static bool compile_points(const struct gas_job *job, struct path_own *own, struct gas_arena *arena,
                            struct gas_refusal *refusal)
 {
     const struct gas_typed_legs *legs = legs_of(job);
     if (!legs->points)
         return true;
-    own->points = gas_arena_take(arena, legs->points->rows, sizeof *own->points);
-    if (!own->points)
+    own->given = gas_arena_take(arena, 2 * legs->points->rows, sizeof *own->given);
+    if (!own->given)
         return gas_refuse(refusal, "legs", "there are too many points for the memory at hand; give fewer.");
+    own->points = own->given + legs->points->rows;
     for (size_t row = 1; row < legs->points->rows; row++) {
         const struct gas_cell *P = gas_cell_at(legs->points, row, 0), *V = gas_cell_at(legs->points, row, 1);
         if (gas_cell_blank(P) && gas_cell_blank(V))
             continue;
         if (P->kind != GAS_CELL_NUMBER || V->kind != GAS_CELL_NUMBER)
             return gas_refuse(refusal, "legs", "point %zu has no figure for P or for V; give both.", row);
-        own->points[own->point_count++] =
-            (struct gas_point){gas_unit_to_si(&legs->point_P, P->number, job->options.barometer), NAN,
-                               gas_unit_to_si(&legs->point_V, V->number, job->options.barometer)};
+        own->given[own->point_count++] = (struct gas_point){P->number, NAN, V->number};
     }
     return true;
+}
+
+/* The points in SI; their volumes count relative to the first, so totals serve as well as specific ones. */
+static void take_points(const struct gas_job *job, const struct gas_case *figures, struct gas_leg *leg)
+{
+    const struct path_own *own = job->own;
+    const struct gas_typed_legs *legs = legs_of(job);
+    for (size_t i = 0; i < own->point_count; i++)
+        own->points[i] = (struct gas_point){gas_unit_to_si(&legs->point_P, own->given[i].P, figures->barometer), NAN,
+                                            gas_unit_to_si(&legs->point_V, own->given[i].v, figures->barometer)};
+    leg->ending = GAS_TO_LAST_POINT;
+    leg->point = own->points;
+    leg->point_count = own->point_count;
 }
 
 static bool prepare(struct gas_job *job, struct gas_arena *arena, struct gas_refusal *refusal)
@@ -156,40 +171,44 @@ static double per_mole(const struct gas_job *job, double si, enum gas_dimension 
     }
 }
 
-static bool leg_figures(const struct gas_job *job, const struct gas_case *figures, const struct gas_typed_leg *typed,
-                        double n, struct gas_leg *leg)
-{
-    enum gas_dimension dimension = GAS_DIM_NUMBER, second = GAS_DIM_NUMBER, unused;
-    *leg = (struct gas_leg){.process = typed->process, .ending = typed->ending, .efficiency = 1};
-    leg->value = figure_si(job, figures, &typed->value, &dimension);
-    leg->value = per_mole(job, leg->value, dimension, n);
-    if (typed->ending == GAS_WITH_W && typed->value.kind == GAS_FIGURE_FIXED && job->options.work_by_gas)
-        leg->value = -leg->value;
-    leg->second = figure_si(job, figures, &typed->second, &second);
-    leg->second = per_mole(job, leg->second, second, n);
-    leg->n = figure_si(job, figures, &typed->n, &unused);
-    leg->P_outside = figure_si(job, figures, &typed->outside, &unused);
-    if (typed->efficiency.kind != GAS_FIGURE_NONE)
-        leg->efficiency = figure_si(job, figures, &typed->efficiency, &unused);
-    bool needs_figure = typed->value.kind != GAS_FIGURE_NONE;
-    return !needs_figure || !isnan(leg->value);
-}
-
 /* Why a leg's figure is not there: a blank cell of its column, or a total where the amount is unknown. */
-static bool refuse_figure(const struct gas_job *job, const struct gas_case *figures, const struct gas_typed_leg *leg,
-                          size_t number, struct gas_refusal *refusal)
+static bool refuse_figure(const struct gas_typed_leg *leg, const struct gas_leg_figure *figure, size_t number,
+                          bool blank, struct gas_refusal *refusal)
 {
-    char what[24], name[GAS_NAME_TEXT];
-    enum gas_dimension dimension = GAS_DIM_NUMBER;
+    char what[32], name[GAS_NAME_TEXT];
     snprintf(what, sizeof what, "leg %zu", number);
-    if (isnan(figure_si(job, figures, &leg->value, &dimension))) {
-        gas_quantity_name(name, leg->value.symbol, leg->value.state);
+    gas_quantity_name(name, figure->symbol, figure->state);
+    if (blank)
         return gas_refuse(refusal, what, "\"%s\" needs %s, which is blank here; give it.", leg->text, name);
-    }
     return gas_refuse(refusal, what,
                       "\"%s\" is a total, but the amount of gas does not follow from the givens; give m, "
                       "n or V, or write the figure per kg or per mol.",
                       leg->text);
+}
+
+/* The figures of a leg in SI and per mole; one that is named has to be there. */
+static bool leg_figures(const struct gas_job *job, const struct gas_case *figures, struct gas_path_case *path,
+                        size_t index, struct gas_refusal *refusal)
+{
+    const struct gas_typed_leg *typed = &legs_of(job)->leg[index];
+    double si[FIGURES];
+    for (size_t k = 0; k < FIGURES; k++) {
+        const struct gas_leg_figure *figure = figure_at(typed, k);
+        enum gas_dimension dimension = GAS_DIM_NUMBER;
+        double given = figure_si(job, figures, figure, &dimension);
+        si[k] = per_mole(job, given, dimension, path->n);
+        if (figure->kind != GAS_FIGURE_NONE && isnan(si[k]))
+            return refuse_figure(typed, figure, index + 1, isnan(given), refusal);
+    }
+    bool by_gas = typed->ending == GAS_WITH_W && typed->value.kind == GAS_FIGURE_FIXED && job->options.work_by_gas;
+    path->leg[index] = (struct gas_leg){.process = typed->process,
+                                        .ending = typed->ending,
+                                        .value = by_gas ? -si[VALUE] : si[VALUE],
+                                        .second = si[SECOND],
+                                        .n = si[EXPONENT],
+                                        .efficiency = typed->efficiency.kind == GAS_FIGURE_NONE ? 1 : si[EFFICIENCY],
+                                        .P_outside = si[OUTSIDE]};
+    return true;
 }
 
 /* Is a given column the figure of some leg? */
@@ -205,6 +224,19 @@ static bool used_by_legs(const struct gas_typed_legs *legs, const struct gas_hea
     return false;
 }
 
+/* How far two figures of a heading are apart, relative to the larger; energies and entropies, which may be near zero,
+ * relative to R T and R at least. */
+static double apart(const struct gas_job *job, const struct gas_path_case *path, const struct gas_heading *heading,
+                    double a, double b)
+{
+    enum gas_dimension dimension = heading->unit.dimension;
+    const struct gas_point *end = &path->change[heading->state - 2].end;
+    double scale = fmax(fabs(a), fabs(b));
+    double energy = gas_job_from_molar(job, GAS_DIM_MOLAR_ENERGY, job->gas.R * end->T, path->n, dimension);
+    double entropy = gas_job_from_molar(job, GAS_DIM_MOLAR_ENTROPY, job->gas.R, path->n, dimension);
+    return fabs(a - b) / fmax(scale, fmax(energy, entropy)); /* fmax passes over the NAN of another dimension */
+}
+
 /* A state given behind the start that no leg uses is a check: it must be what the path gives there. */
 static bool given_end_agrees(const struct gas_job *job, const struct gas_case *figures,
                              const struct gas_path_case *path, size_t column, struct gas_refusal *refusal)
@@ -212,7 +244,7 @@ static bool given_end_agrees(const struct gas_job *job, const struct gas_case *f
     const struct gas_heading *heading = &job->table.heading[column];
     char name[GAS_NAME_TEXT], given[80], found[80];
     double si;
-    if (isnan(figures->si[column]) || heading->state < 2 || used_by_legs(legs_of(job), heading))
+    if (isnan(figures->si[column]) || heading->state < 2 || heading->tolerance || used_by_legs(legs_of(job), heading))
         return true;
     gas_quantity_name(name, heading->symbol, heading->state);
     if (heading->state > (int)path->count + 1)
@@ -220,16 +252,15 @@ static bool given_end_agrees(const struct gas_job *job, const struct gas_case *f
                           path->count + 1);
     if (!gas_point_quantity(job, &path->change[heading->state - 2].end, path->n, heading, &si, refusal))
         return false;
-    double apart = fabs(si - figures->si[column]) / fmax(fabs(si), fabs(figures->si[column]));
-    bool energy = heading->symbol >= GAS_SYM_H_SPECIFIC;
-    if (energy || !(apart > job->options.agree))
+    double gap = apart(job, path, heading, si, figures->si[column]);
+    if (!(gap > job->options.agree))
         return true;
     gas_figure(given, sizeof given, figures->row->figure[column], &heading->unit);
     gas_figure(found, sizeof found, gas_job_shown(job, figures, heading, si), &heading->unit);
     return gas_refuse(refusal, name,
                       "%s is given, but the legs lead to %s (%s %% apart); name %s in a leg, or correct "
                       "one of them.",
-                      given, found, gas_shown_to(100 * apart, 2).text, name);
+                      given, found, gas_shown_to(100 * gap, 2).text, name);
 }
 
 bool gas_path_solve(const struct gas_job *job, const struct gas_case *figures, struct gas_path_case *path,
@@ -245,13 +276,10 @@ bool gas_path_solve(const struct gas_job *job, const struct gas_case *figures, s
     path->n = start[NEED_N];
     path->count = legs->count;
     for (size_t i = 0; i < legs->count; i++)
-        if (!leg_figures(job, figures, &legs->leg[i], path->n, &path->leg[i]))
-            return refuse_figure(job, figures, &legs->leg[i], i + 1, refusal);
-    if (legs->points) {
-        path->leg[0].ending = GAS_TO_LAST_POINT;
-        path->leg[0].point = own->points;
-        path->leg[0].point_count = own->point_count;
-    }
+        if (!leg_figures(job, figures, path, i, refusal))
+            return false;
+    if (legs->points)
+        take_points(job, figures, &path->leg[0]);
     struct gas_result fault;
     struct gas_result run = gas_path_run(&job->gas, job->options.system, &path->start, path->leg, path->count,
                                          path->change, &path->total, &fault);

@@ -181,7 +181,7 @@ static const struct sentence_row sentence_rows[] = {
     {"GAS.WORK(\"N2\";\"2 kg; 25 °C; 1 bar\";;\"kJ\")",
      "Check legs: there is none; write a process and where it ends, such as isothermal to 8 bar."},
     {"GAS.WORK(\"N2\";\"25 °C; 1 bar\";\"isothermal to 8 bar\";\"kJ\")",
-     "Check wanted: \"kJ\" needs the amount of gas, which does not follow from the givens; give m, n or V, or ask per kg or per mol."},
+     "Check wanted: \"kJ\" needs the amount of gas, which does not follow from the givens; give m, n, V or Nm3, or their flows, or ask per kg or per mol."},
     {"GAS.WORK(\"N2\";\"2 kg; 25 °C\";\"isothermal to 8 bar\";\"kJ\")",
      "Check given: P1 cannot be found from m and T; give V1."},
     {"GAS.WORK(\"N2\";\"2 kg; 25 °C; 1 bar\";\"isothermal to 8 bar\";\"kg\")",

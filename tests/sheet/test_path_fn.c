@@ -120,6 +120,12 @@ static void works_and_heats(void)
          "GAS.WORK(\"Ar\";\"P1 = 1 bar; T1 = 300 K; P2 = 8 bar; T2 = 300 K\";\"isothermal to 8 bar\";\"J/mol\")",
          R * 300 * log(8), NULL},
         {"no-cp-W", "GAS.WORK(\"R-134a\";\"300 K; 1 bar; 1 mol\";\"isobaric to 400 K\";\"J\")", -100 * R, NULL},
+        {"plus-minus-P2",
+         "GAS.WORK(\"Ar\";\"P1 = 1 bar; T1 = 300 K; P2 = 8 ± 0.1 bar\";\"isothermal to 8 bar\";\"J/mol\")",
+         R * 300 * log(8), NULL},
+        {"agreeing-h2",
+         "GAS.WORK(\"Ar\";\"P1 = 1 bar; T1 = 298.15 K; h2 = 0 J/mol\";\"isothermal to 8 bar\";\"J/mol\")",
+         R * 298.15 * log(8), NULL},
         {"cycle-otto",
          "GAS.CYCLE(\"air | k = 1.4\";\"300 K; 1 bar\";\"adiabatic to V x 0.125; isochoric to 1800 K; adiabatic to V x "
          "8; isochoric to start\";\"efficiency\")",
@@ -142,6 +148,10 @@ static void tables(void)
          "GAS.WORK(\"Ar\";{1;300;4;80};\"adiabatic efficiency to P2\";\"J/mol\";{\"P1, bar\";\"T1, K\";\"P2, "
          "bar\";\"efficiency, %\"};\"flow\")",
          ARGON_CP * 300 * (pow(4, R / ARGON_CP) - 1) / 0.8, NULL},
+        {"points-barometer",
+         "GAS.WORK(\"Ar\";{0;300;0.1;0.95};{\"P, bar(g)\";\"V, m3\"|0;0.1|1;0.2};\"kJ\";{\"P1, bar(g)\";\"T1, "
+         "K\";\"V1, m3\";\"barometer, bar\"})",
+         -(0.95 + 1.95) / 2 * 10, NULL},
         {"row-barometer",
          "GAS.WORK(\"Ar\";{0;300;7;0.95};\"isothermal to P2\";\"J/mol\";{\"P1, bar(g)\";\"T1, K\";\"P2, "
          "bar(g)\";\"barometer, bar\"})",
@@ -191,6 +201,16 @@ static void refusals(void)
          "has no heat capacity"},
         {"which-work", "GAS.WORK(\"N2\";\"1 kg/s; 25 °C; 1 bar\";\"adiabatic to 3 bar\";\"kW\")", 0,
          "Check options: a flow is given; add the option flow"},
+        {"blank-n-flow",
+         "GAS.END(\"Ar\";{1;300;4;\"\"};\"polytropic n to P2\";\"T, K\";{\"P1, bar\";\"T1, K\";\"P2, "
+         "bar\";\"n\"};\"flow\")",
+         0, "blank here"},
+        {"blank-efficiency",
+         "GAS.END(\"Ar\";{1;300;4;\"\"};\"adiabatic efficiency to P2\";\"T, K\";{\"P1, bar\";\"T1, K\";\"P2, "
+         "bar\";\"efficiency, %\"};\"flow\")",
+         0, "blank here"},
+        {"idle-h2", "GAS.WORK(\"Ar\";\"P1 = 1 bar; T1 = 300 K; h2 = 9 kJ/mol\";\"isothermal to 8 bar\";\"J/mol\")", 0,
+         "Check h2: 9 kJ/mol is given, but the legs lead to"},
         {"passed-on", "GAS.WORK(\"N2\";\"1 kg; 25 °C; 1 bar\";\"Check P1: from elsewhere.\";\"kJ\")", 0,
          "Check P1: from elsewhere."},
     };
