@@ -104,14 +104,14 @@ bool read_kelvin_as_degrees(struct replay *replay, const struct site *site, stru
     return true;
 }
 
-/* -12 degC read as 12 degC. */
+/* -12 degC read as 12 degC; a reading above zero stays what it is. */
 bool read_lost_sign(struct replay *replay, const struct site *site, struct reading *reading, double parameter)
 {
     (void)parameter;
     double figure = replay_figure(replay->desk, replay->truth, (size_t)(site - replay->desk->site));
-    if (site->kind == SITE_WANTED || site->unit->dimension != GAS_DIM_TEMPERATURE || !(figure < 0))
+    if (site->kind == SITE_WANTED || (!is_celsius(&reading->unit) && !is_fahrenheit(&reading->unit)))
         return false;
-    reading->shift -= 2 * figure * reading->unit.scale;
+    reading->shift -= figure < 0 ? 2 * figure * reading->unit.scale : 0;
     return true;
 }
 
