@@ -124,6 +124,38 @@ static void take_points(const struct gas_job *job, const struct gas_case *figure
     leg->point_count = own->point_count;
 }
 
+/* Is a given column the figure of some leg? */
+static bool used_by_legs(const struct gas_typed_legs *legs, const struct gas_heading *heading)
+{
+    for (size_t i = 0; i < legs->count; i++)
+        for (size_t k = 0; k < FIGURES; k++) {
+            const struct gas_leg_figure *figure = figure_at(&legs->leg[i], k);
+            if (figure->kind == GAS_FIGURE_COLUMN && figure->symbol == heading->symbol &&
+                figure->state == heading->state)
+                return true;
+        }
+    return false;
+}
+
+/* What is given must serve: as the start, as an end to check, or in a leg. */
+static bool givens_serve(const struct gas_job *job, struct gas_refusal *refusal)
+{
+    enum gas_variable variable;
+    char shown[80];
+    for (size_t i = 0; i < job->table.columns; i++) {
+        const struct gas_heading *heading = &job->table.heading[i];
+        bool time = heading->symbol == GAS_SYM_TIME && !job->table.one_case; /* of a reading: changes nothing */
+        bool serves = heading->tolerance || time || gas_variable_of(heading, &variable) ||
+                      (int)i == job->barometer_column || (int)i == job->altitude_column ||
+                      used_by_legs(legs_of(job), heading);
+        if (!serves)
+            return gas_refuse(refusal, "given",
+                              "no leg uses %s; name it in a leg, such as \"with Q\", or leave it out.",
+                              gas_quoted(shown, sizeof shown, heading->text, strlen(heading->text)));
+    }
+    return true;
+}
+
 static bool prepare(struct gas_job *job, struct gas_arena *arena, struct gas_refusal *refusal)
 {
     static const struct gas_need needs[NEEDS] = {
@@ -133,7 +165,7 @@ static bool prepare(struct gas_job *job, struct gas_arena *arena, struct gas_ref
         return gas_refuse(refusal, "given", "there is no memory for the calculation.");
     *own = (struct path_own){0};
     job->own = own;
-    if (!columns_are_there(job, refusal) || !compile_points(job, own, arena, refusal))
+    if (!columns_are_there(job, refusal) || !givens_serve(job, refusal) || !compile_points(job, own, arena, refusal))
         return false;
     own->solver = gas_solver_open(job, 1, needs, NEEDS, arena, refusal);
     return own->solver != NULL;
@@ -209,19 +241,6 @@ static bool leg_figures(const struct gas_job *job, const struct gas_case *figure
                                         .efficiency = typed->efficiency.kind == GAS_FIGURE_NONE ? 1 : si[EFFICIENCY],
                                         .P_outside = si[OUTSIDE]};
     return true;
-}
-
-/* Is a given column the figure of some leg? */
-static bool used_by_legs(const struct gas_typed_legs *legs, const struct gas_heading *heading)
-{
-    for (size_t i = 0; i < legs->count; i++)
-        for (size_t k = 0; k < FIGURES; k++) {
-            const struct gas_leg_figure *figure = figure_at(&legs->leg[i], k);
-            if (figure->kind == GAS_FIGURE_COLUMN && figure->symbol == heading->symbol &&
-                figure->state == heading->state)
-                return true;
-        }
-    return false;
 }
 
 /* How far two figures of a heading are apart, relative to the larger; energies and entropies, which may be near zero,

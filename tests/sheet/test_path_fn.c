@@ -209,6 +209,8 @@ static void refusals(void)
          "GAS.END(\"Ar\";{1;300;4;\"\"};\"adiabatic efficiency to P2\";\"T, K\";{\"P1, bar\";\"T1, K\";\"P2, "
          "bar\";\"efficiency, %\"};\"flow\")",
          0, "blank here"},
+        {"idle-Q", "GAS.END(\"Ar\";\"P1 = 1 bar; T1 = 300 K; n = 1 mol; Q = 1 kJ\";\"isobaric to 400 K\";\"T, K\")", 0,
+         "no leg uses \"Q, kJ\"; name it in a leg"},
         {"idle-h2", "GAS.WORK(\"Ar\";\"P1 = 1 bar; T1 = 300 K; h2 = 9 kJ/mol\";\"isothermal to 8 bar\";\"J/mol\")", 0,
          "Check h2: 9 kJ/mol is given, but the legs lead to"},
         {"passed-on", "GAS.WORK(\"N2\";\"1 kg; 25 °C; 1 bar\";\"Check P1: from elsewhere.\";\"kJ\")", 0,
